@@ -1,0 +1,2 @@
+/** The only door of the wiring-check engine. Pure: same input, same output, on server and phone. */
+export * from "./types";
