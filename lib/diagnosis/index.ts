@@ -1,2 +1,4 @@
 /** The only door of the wiring-check engine. Pure: same input, same output, on server and phone. */
 export * from "./types";
+export { parseCheck, vocabulary } from "./checks";
+export { DEFAULT_METER, meterLimit, standardUncertainty } from "./meter";
