@@ -1,4 +1,5 @@
-import type { Expect, ReadingValue } from "@/lib/diagnosis";
+import type { ConnectorShape } from "@/lib/catalogue/entry-data";
+import type { Expect, MeterSpec, ReadingValue } from "@/lib/diagnosis";
 
 /** Why a reading could not be taken; shown as choices, kept in the record. */
 export const SKIP_REASONS = ["cannot-reach", "not-safe-here", "no-function-on-meter", "cannot-part-connector", "cannot-move-actuator", "other"] as const;
@@ -11,8 +12,13 @@ export interface RunSetup {
   readonly entryId?: string;
   readonly entryVersionId?: string;
   readonly machineId?: string;
+  readonly machineName?: string;
+  readonly entryName?: string;
   readonly meterId?: string;
-  readonly connectorShape?: string;
+  /** Limits of the meter as they were at the start: the phone computes with them, and so must the server. */
+  readonly meter?: MeterSpec;
+  /** The connector's face with the labels of this device: from the entry, or picked by drawing. */
+  readonly connector?: ConnectorShape;
   readonly wireColours?: readonly [string | null, string | null, string | null];
   readonly senses?: string;
   readonly batteryVolts?: number;
