@@ -1,0 +1,10 @@
+export { Button, ButtonLink, type ButtonSize, type ButtonTone } from "./button";
+export { ChanceBar, chanceText } from "./chance-bar";
+export { DataTable, type Column, type Row } from "./data-table";
+export { EmptyState } from "./empty-state";
+export { Checkbox, Field, Select, TextArea, TextInput } from "./field";
+export { Notice, type NoticeTone } from "./notice";
+export { PageHeading } from "./page-heading";
+export { PinTag, type PinTagRole } from "./pin-tag";
+export { Quantity } from "./quantity";
+export { Sheet } from "./sheet";
