@@ -24,8 +24,9 @@ const config: Config = {
         sound: "var(--sound)",
       },
       fontFamily: {
-        read: ["var(--font-read)", "var(--font-read-greek)", "var(--font-maths)", "sans-serif"],
-        mono: ["var(--font-mono)", "var(--font-mono-greek)", "var(--font-maths)", "monospace"],
+        read: ["var(--font-read)", "var(--font-read-greek)", "var(--font-read-micro)", "var(--font-maths)", "sans-serif"],
+        // IBM Plex Mono has no Greek in its package, so the ohm sign comes from the sans.
+        mono: ["var(--font-mono)", "var(--font-read-greek)", "var(--font-maths)", "monospace"],
       },
       spacing: { touch: "2.75rem", glove: "6rem" },
     },
