@@ -8,13 +8,24 @@ export interface Cavity {
   readonly column: number;
 }
 
-/** A connector's face as data: drawn, never photographed. */
+/**
+ * A moulding that stops wrong mating. `at` is its middle as a share of the side (0 left or top, 1 right or bottom; on a
+ * round face the share of that quarter of the rim, counted the same way); `width` is in pitches.
+ */
+export interface Keying {
+  readonly side: "top" | "right" | "bottom" | "left";
+  readonly at: number;
+  readonly width: number;
+  readonly type: "rib" | "slot";
+}
+
+/** A connector's face as data: drawn, never photographed. Cavities stand in the order of their labels. */
 export interface ConnectorShape {
   readonly id: string;
   readonly name: string;
   readonly outline: "rectangle" | "rounded" | "round" | "triangle";
   readonly cavities: readonly Cavity[];
-  readonly keying: readonly { readonly side: "top" | "right" | "bottom" | "left"; readonly at: number; readonly width: number; readonly type: "rib" | "slot" }[];
+  readonly keying: readonly Keying[];
   readonly latch: "top" | "bottom" | "left" | "right" | "none";
   readonly gender: "plug" | "receptacle";
 }
