@@ -24,9 +24,13 @@ export const checks = sqliteTable("checks", {
   kind: text("kind"),
   findingCode: text("finding_code"),
   findingChance: real("finding_chance"),
+  sentence: text("sentence"),
 }, (t) => [
-  index("checks_person").on(t.personId, t.startedAt), index("checks_machine").on(t.machineId), index("checks_entry").on(t.entryId),
-  index("checks_finished").on(t.finishedAt), index("checks_recheck").on(t.recheckOf),
+  // The log pages by (startedAt, id), newest first, whichever filter is on.
+  index("checks_started").on(t.startedAt, t.id), index("checks_person").on(t.personId, t.startedAt),
+  index("checks_machine").on(t.machineId, t.startedAt), index("checks_entry").on(t.entryId, t.startedAt),
+  index("checks_kind").on(t.kind, t.startedAt), index("checks_finding").on(t.findingCode, t.startedAt),
+  index("checks_recheck").on(t.recheckOf),
 ]);
 
 export const checkSteps = sqliteTable("check_steps", {

@@ -1,17 +1,34 @@
-import type { EvidenceRow, FaultChance, KindChance, PinsChance } from "@/lib/diagnosis";
+import type { EvidenceRow, Fault, FaultChance, KindChance, NextCheck, PinsChance } from "@/lib/diagnosis";
+
+/** What to do about one finding that is still possible, and how to prove that it was mended. */
+export interface FindingAdvice {
+  readonly finding: FaultChance;
+  /** Steps in order, plain imperative sentences. */
+  readonly next: readonly string[];
+  /** Readings or movements that show the repair has worked. */
+  readonly prove: readonly string[];
+}
 
 /** What a finished check concludes; computed on the server and stored with the check. */
 export interface Verdict {
-  /** One sentence a colleague would say. */
+  /** One sentence a colleague would say, never surer than the evidence. */
   readonly sentence: string;
+  readonly state: "ranked" | "needs-reading" | "contradictory";
   readonly kinds: readonly KindChance[];
   readonly pins: readonly PinsChance[];
   readonly faults: readonly FaultChance[];
+  /** Smallest set of findings holding 95 %, best first. */
   readonly openFindings: readonly FaultChance[];
   readonly inseparable: boolean;
   readonly contradictory: boolean;
+  /** Readings to take again, when the readings contradict each other. */
+  readonly suspects: readonly { readonly check: string; readonly why: string }[];
+  /** Readings not yet taken that would tell the open findings apart, best first; empty when none would. */
+  readonly tellApart: readonly Pick<NextCheck, "check" | "why">[];
   readonly evidence: readonly EvidenceRow[];
-  readonly nextActions: readonly string[];
-  readonly proveRepair: readonly string[];
+  /** The finding that the evidence table sets against "sound": the best one that is not "none"; null when there is none. */
+  readonly evidenceFinding: Fault | null;
+  readonly advice: readonly FindingAdvice[];
+  readonly cautions: readonly string[];
   readonly engineVersion: string;
 }

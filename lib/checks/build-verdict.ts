@@ -1,0 +1,60 @@
+import type { Assessment, EvidenceRow, Fault, FaultChance, Standing } from "@/lib/diagnosis";
+import { adviceFor, cautionsFor } from "./advice";
+import type { Labels } from "./check-words";
+import type { FindingAdvice, Verdict } from "./verdict";
+import { settledPins, SURE, verdictSentence } from "./verdict-sentence";
+
+/** More findings than this are listed with their chances but get no advice of their own. */
+const MAX_ADVICE = 4;
+const MAX_TELL_APART = 5;
+/** A rival below this chance is not set against "sound" in the evidence table. */
+const RIVAL_FLOOR = 0.0005;
+
+export interface VerdictInput {
+  readonly labels: Labels;
+  readonly assessment: Exclude<Assessment, { state: "invalid-input" }>;
+  /** Rows for `evidenceFindingOf(assessment)`. */
+  readonly evidence: readonly EvidenceRow[];
+  readonly engineVersion: string;
+}
+
+/** The finding that the evidence is set against "sound": the best that is not "none"; null when none is worth the comparison. */
+export function evidenceFindingOf(standing: Pick<Standing, "faults">): Fault | null {
+  const best = standing.faults.find((fault) => fault.code !== "none" && fault.p >= RIVAL_FLOOR);
+  if (!best) return null;
+  return best.pins ? { code: best.code, pins: best.pins } : { code: best.code };
+}
+
+function adviceOf(open: readonly FaultChance[], standing: Standing, labels: Labels): FindingAdvice[] {
+  const pins = settledPins(standing.pins);
+  return open.slice(0, MAX_ADVICE).map((finding) => ({ finding, ...adviceFor(finding, labels, pins) }));
+}
+
+/**
+ * Turns an assessment into what is shown, printed and stored. Pure: no clock, no chance.
+ * A contradictory set of readings gets no advice on repairs, only the readings to take again.
+ */
+export function buildVerdict({ labels, assessment, evidence, engineVersion }: VerdictInput): Verdict {
+  const contradictory = assessment.state === "contradictory";
+  const suspects = contradictory ? assessment.suspects : [];
+  const open = assessment.openFindings;
+  const settledKind = assessment.kinds[0] && assessment.kinds[0].p >= SURE ? assessment.kinds[0].kind : null;
+  const separable = open.length > 1 && !assessment.inseparable;
+  return {
+    sentence: verdictSentence(assessment, labels, contradictory ? suspects : null),
+    state: assessment.state,
+    kinds: assessment.kinds,
+    pins: assessment.pins,
+    faults: assessment.faults,
+    openFindings: open,
+    inseparable: assessment.inseparable,
+    contradictory,
+    suspects,
+    tellApart: separable || contradictory ? assessment.next.slice(0, MAX_TELL_APART).map(({ check, why }) => ({ check, why })) : [],
+    evidence,
+    evidenceFinding: evidenceFindingOf(assessment),
+    advice: contradictory ? [] : adviceOf(open, assessment, labels),
+    cautions: cautionsFor(settledKind),
+    engineVersion,
+  };
+}
