@@ -1,6 +1,7 @@
-import type { CheckSpec, MachineState, Terminal } from "@/lib/diagnosis";
+import { parseCheck, type CheckSpec, type MachineState, type Terminal } from "@/lib/diagnosis";
 
-type Labels = readonly [string, string, string];
+/** Cavity labels of the device, in the order of its pins 1 to 3. */
+export type Labels = readonly [string, string, string];
 
 /** Where one meter lead goes, in words; "gnd" is battery negative. */
 function terminal(end: Terminal, place: string, labels: Labels): string {
@@ -56,6 +57,12 @@ function between(spec: CheckSpec, labels: Labels): string {
 /** A check in one line, e.g. "Resistance, device pin 1 to pin 2, actuator at rest". */
 export function checkTitle(spec: CheckSpec, labels: Labels): string {
   return [MEASURED[spec.meter], between(spec, labels), positionWords(spec)].filter((part) => part !== null).join(", ");
+}
+
+/** The same from a check's code; a code that the vocabulary does not know is given back as it is. */
+export function checkWords(code: string, labels: Labels): string {
+  const spec = parseCheck(code);
+  return spec ? checkTitle(spec, labels) : code;
 }
 
 /** The check without its measure and position, with a capital: "Device pin 1 to pin 2". */
