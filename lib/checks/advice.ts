@@ -1,5 +1,5 @@
 import type { Fault, FaultCode, Kind, PinAssignment } from "@/lib/diagnosis";
-import type { Labels } from "./check-words";
+import type { Labels } from "./check-name";
 import { placeWords } from "./finding-words";
 
 /**

@@ -1,6 +1,6 @@
 import type { Assessment, EvidenceRow, Fault, FaultChance, Standing } from "@/lib/diagnosis";
 import { adviceFor, cautionsFor } from "./advice";
-import type { Labels } from "./check-words";
+import type { Labels } from "./check-name";
 import type { FindingAdvice, Verdict } from "./verdict";
 import { settledPins, SURE, verdictSentence } from "./verdict-sentence";
 

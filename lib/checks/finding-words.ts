@@ -1,5 +1,5 @@
 import type { Fault, FaultCode, Kind, PinAssignment, PinNumber, Role } from "@/lib/diagnosis";
-import type { Labels } from "./check-words";
+import type { Labels } from "./check-name";
 
 /** Findings in a few words, for lists, filters and headings. */
 export const FINDING_TITLES: Readonly<Record<FaultCode, string>> = {

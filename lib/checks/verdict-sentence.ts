@@ -1,5 +1,5 @@
 import type { FaultChance, KindChance, PinsChance, Standing } from "@/lib/diagnosis";
-import { checkWords, type Labels } from "./check-words";
+import { checkName, type Labels } from "./check-name";
 import { findingClause, KIND_WORDS } from "./finding-words";
 
 /** From this chance on a thing is said without a hedge; the same share that the open findings hold. */
@@ -53,7 +53,7 @@ function findingPart(open: readonly FaultChance[], inseparable: boolean, clause:
  */
 export function verdictSentence(standing: Standing, labels: Labels, suspects: readonly { readonly check: string }[] | null): string {
   if (suspects) {
-    const again = suspects[0] ? `take "${checkWords(suspects[0].check, labels)}" again` : "take the last readings again";
+    const again = suspects[0] ? `take "${checkName(suspects[0].check, labels)}" again` : "take the last readings again";
     return `These readings contradict each other: ${again} before anything is renewed.`;
   }
   const pins = settledPins(standing.pins);
