@@ -17,13 +17,19 @@ export const entryVersions = sqliteTable("entry_versions", {
   id: text("id").primaryKey(),
   entryId: text("entry_id").notNull().references(() => entries.id),
   version: integer("version").notNull(),
-  data: text("data", { mode: "json" }).$type<EntryData>().notNull(),
-  /** Copied out of `data` for facets. */
+  publishedBy: text("published_by").notNull().references(() => people.id),
+  publishedAt: integer("published_at", { mode: "timestamp_ms" }).notNull(),
+  /** Copied out of `data` for facets; they stand before it so that reading them skips its overflow pages. */
   name: text("name").notNull(),
   kind: text("kind").notNull(),
   maker: text("maker").notNull(),
   quantity: text("quantity").notNull(),
   connectorShape: text("connector_shape").notNull(),
-  publishedBy: text("published_by").notNull().references(() => people.id),
-  publishedAt: integer("published_at", { mode: "timestamp_ms" }).notNull(),
+  /** "5", "8" … volts, or "battery". */
+  supply: text("supply").notNull(),
+  /** IEC 60757 letters of the three wires in cavity order, joined by "/": "BN/BU/BK". */
+  colours: text("colours").notNull(),
+  /** Words the entry is found by; triggers copy it into the two FTS5 tables when the version is the one shown. */
+  searchText: text("search_text").notNull(),
+  data: text("data", { mode: "json" }).$type<EntryData>().notNull(),
 }, (t) => [uniqueIndex("entry_versions_number").on(t.entryId, t.version), index("entry_versions_kind").on(t.kind)]);
