@@ -44,6 +44,7 @@ export async function flush(store: RunStore, send: Send, personId: string): Prom
   for (const run of await store.unsentRuns(personId)) {
     const result = await sendRun(store, send, run);
     if (result.type === "offline" || result.type === "signed-out") return result.type;
+    if (result.type === "ok" && run.refusal) await store.updateRun(run.id, { refusal: undefined });
     if (result.type === "refused") {
       worst = "refused";
       await store.updateRun(run.id, { refusal: { code: result.code, message: result.message } });
