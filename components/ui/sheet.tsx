@@ -2,7 +2,7 @@ import { useId, type CSSProperties, type ReactNode } from "react";
 
 const TONES = {
   plain: {},
-  ask: { "--sheet-fill": "var(--straw)", color: "var(--on-straw)" },
+  ask: { "--sheet-fill": "var(--straw)", "--quiet": "var(--on-straw)", color: "var(--on-straw)" },
   stop: { "--sheet-edge": "var(--stop)", "--edge": "6px" },
   sound: { "--sheet-edge": "var(--sound)", "--edge": "6px" },
 } as const;

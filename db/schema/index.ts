@@ -1,0 +1,4 @@
+export * from "./catalogue";
+export * from "./checks";
+export * from "./machines";
+export * from "./people";
