@@ -1,0 +1,53 @@
+import { parseCheck, type EvidenceRow, type Prediction, type ReadingValue } from "@/lib/diagnosis";
+import { formatQuantity } from "@/lib/units";
+
+/** A word expected with less than this chance does not count as fitting. */
+const WORD_FLOOR = 0.04;
+
+function wordText(word: string): string {
+  return word === "none" ? "no signal" : word;
+}
+
+/**
+ * What a hypothesis expects of a reading, e.g. "4.9 V to 5.1 V", "OL", "smooth or jumps".
+ * The number is the band that holds 95 %; its digits stop where the band's own width makes them idle.
+ */
+export function expectedWords(prediction: Prediction): string {
+  const unit = parseCheck(prediction.check)?.unit;
+  const words = prediction.words.filter((w) => w.p >= WORD_FLOOR).map((w) => wordText(w.word));
+  if (!prediction.number || !unit || unit === "word") return words.length > 0 ? words.join(" or ") : "anything";
+  const { low, high } = prediction.number;
+  const limit = (high - low) / 4;
+  const [from, to] = [formatQuantity(low, unit, { limit }), formatQuantity(high, unit, { limit })];
+  const band = from === to ? from : `${from} to ${to}`;
+  return words.length > 0 ? `${band}, or ${words.join(" or ")}` : band;
+}
+
+/**
+ * Does a reading lie where a prediction has it? A number may miss the 95 % band by the meter's limit of error;
+ * a word fits from WORD_FLOOR on.
+ */
+export function fits(prediction: Prediction, value: ReadingValue, limit: number | null): boolean {
+  if (typeof value === "string") return prediction.words.some((w) => w.word === value && w.p >= WORD_FLOOR);
+  if (!prediction.number) return false;
+  const slack = limit ?? 0;
+  return value >= prediction.number.low - slack && value <= prediction.number.high + slack;
+}
+
+export type Bearing = "fits-both" | "against-sound" | "against-finding" | "against-both";
+
+/** On which side a row of the evidence stands. */
+export function bearing(row: EvidenceRow): Bearing {
+  const sound = fits(row.ifSound, row.value, row.limit);
+  const finding = fits(row.ifFinding, row.value, row.limit);
+  if (sound && finding) return "fits-both";
+  if (finding) return "against-sound";
+  return sound ? "against-finding" : "against-both";
+}
+
+export const BEARING_WORDS: Readonly<Record<Bearing, string>> = {
+  "fits-both": "fits both",
+  "against-sound": "speaks for the finding",
+  "against-finding": "speaks against the finding",
+  "against-both": "fits neither: take it again",
+};

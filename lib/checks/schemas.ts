@@ -1,0 +1,59 @@
+import { z } from "zod";
+import { FAULT_CODES, KINDS } from "@/lib/diagnosis";
+import { idSchema, ulidSchema } from "./id-schemas";
+import { SKIP_REASONS } from "./run";
+import { SETUP_PARTS } from "./setup-schema";
+
+/** Most steps of one check, and most bytes they may take together. */
+export const MAX_STEPS = 400;
+export const MAX_STEP_BYTES = 64 * 1024;
+
+export const readingValueSchema = z.union([
+  z.number(), z.enum(["OL", "none", "smooth", "jumps", "still", "grips", "loose"]),
+], "A reading is a number, or one of the words that the check takes.");
+
+const checkCodeSchema = z.string().max(40);
+const stepBase = { id: ulidSchema, at: z.iso.datetime({ offset: true }) };
+
+export const stepSchema = z.discriminatedUnion("type", [
+  z.strictObject({ ...stepBase, type: z.literal("reading"), check: checkCodeSchema, value: readingValueSchema, typed: z.string().max(40) }),
+  z.strictObject({ ...stepBase, type: z.literal("skip"), check: checkCodeSchema, reason: z.enum(SKIP_REASONS), note: z.string().max(300).optional() }),
+  z.strictObject({ ...stepBase, type: z.literal("state"), deviceParted: z.boolean(), controllerParted: z.boolean(), powerOn: z.boolean() }),
+  z.strictObject({ ...stepBase, type: z.literal("retract"), step: ulidSchema }),
+]);
+
+export const setupSchema = z.strictObject(SETUP_PARTS);
+
+export const startCheckSchema = z.strictObject({
+  id: ulidSchema, setup: setupSchema,
+  /** When the phone began; it may have been without a server for days. */
+  startedAt: z.iso.datetime({ offset: true }).optional(),
+});
+export const appendStepsSchema = z.strictObject({ steps: z.array(stepSchema).min(1).max(MAX_STEPS) });
+
+/** The phone's own standing at the end, compared with the server's; what it holds is checked only by that comparison. */
+export const finishCheckSchema = z.strictObject({ standing: z.record(z.string().max(40), z.json()).optional() });
+
+export const attachMachineSchema = z.strictObject({ machineId: idSchema });
+export const startRecheckSchema = z.strictObject({ id: ulidSchema });
+
+const emptyIsAbsent = <T extends z.ZodType>(schema: T) => z.preprocess((value) => (value === "" ? undefined : value), schema.optional());
+const dateSchema = z.iso.date("A date looks like 2026-03-31.");
+
+/** A place in the log: the last row seen, as "<milliseconds>.<id>". */
+const cursorSchema = z.string().regex(/^\d{1,15}\.[0-9A-Za-z_-]{1,64}$/, "Not a place in the log.");
+
+/** Filters of the log, straight from the address: an empty field means "any". */
+export const listChecksSchema = z.object({
+  machine: emptyIsAbsent(idSchema),
+  entry: emptyIsAbsent(idSchema),
+  person: emptyIsAbsent(idSchema),
+  kind: emptyIsAbsent(z.enum(KINDS)),
+  finding: emptyIsAbsent(z.enum(FAULT_CODES)),
+  state: emptyIsAbsent(z.enum(["running", "finished", "abandoned"])),
+  from: emptyIsAbsent(dateSchema),
+  to: emptyIsAbsent(dateSchema),
+  after: emptyIsAbsent(cursorSchema),
+  limit: emptyIsAbsent(z.coerce.number().int().min(1).max(100)),
+});
+export type ListChecksFilters = z.infer<typeof listChecksSchema>;
