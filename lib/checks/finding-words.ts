@@ -86,3 +86,10 @@ export function findingHeading(fault: Fault, labels: Labels): string {
   if (places.length === 0) return FINDING_TITLES[fault.code];
   return `${FINDING_TITLES[fault.code]}, ${places.length === 1 ? "cavity" : "cavities"} ${placeWords(places, labels, null)}`;
 }
+
+/** The same after "if": "open wire, cavity B", "all is sound". */
+export function ifFinding(fault: Fault, labels: Labels): string {
+  if (fault.code === "none") return "all is sound";
+  const heading = findingHeading(fault, labels);
+  return heading.charAt(0).toLowerCase() + heading.slice(1);
+}

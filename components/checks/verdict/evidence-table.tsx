@@ -1,0 +1,68 @@
+import type { Labels } from "@/lib/checks/check-name";
+import { checkName, readingWords } from "@/lib/checks/check-name";
+import { bearing, BEARING_WORDS, expectedWords, type Bearing } from "@/lib/checks/evidence-words";
+import { ifFinding } from "@/lib/checks/finding-words";
+import { parseCheck, type EvidenceRow, type Fault } from "@/lib/diagnosis";
+import { formatQuantity } from "@/lib/units";
+
+const SHAPES: Readonly<Record<Bearing, string>> = {
+  "fits-both": "M4 12H20", "against-sound": "M12 3 21 20H3Z", "against-finding": "M4 4H20V20H4Z", "against-both": "M5 5 19 19M19 5 5 19",
+};
+
+/** Shape and word, so that no row is told apart by colour. */
+function BearingMark({ kind }: { kind: Bearing }) {
+  return (
+    <span className="inline-flex items-start gap-2">
+      <svg viewBox="0 0 24 24" aria-hidden="true" className="mt-1 size-4 shrink-0 fill-none stroke-ink [stroke-width:3]"><path d={SHAPES[kind]} /></svg>
+      {BEARING_WORDS[kind]}
+    </span>
+  );
+}
+
+function limitWords(row: EvidenceRow): string {
+  const unit = parseCheck(row.check)?.unit;
+  if (row.limit === null || !unit || unit === "word" || typeof row.value === "string") return "none, a word";
+  return `±\u00a0${formatQuantity(row.limit, unit, { limit: row.limit / 9 })}`;
+}
+
+interface Cell { readonly label: string; readonly text: React.ReactNode; readonly strong?: boolean }
+
+function cellsOf(row: EvidenceRow, findingTitle: string | null): readonly Cell[] {
+  return [
+    { label: "Reading", text: readingWords(row.check, row.value, row.limit), strong: true },
+    { label: "If sound", text: expectedWords(row.ifSound) },
+    ...(findingTitle ? [{ label: `If ${findingTitle}`, text: expectedWords(row.ifFinding) }] : []),
+    { label: "Limit of error", text: limitWords(row) },
+    ...(findingTitle ? [{ label: "Bearing", text: <BearingMark kind={bearing(row)} /> }] : []),
+  ];
+}
+
+interface EvidenceTableProps {
+  readonly rows: readonly EvidenceRow[];
+  readonly labels: Labels;
+  /** What the readings are set against; null when only "sound" is left. */
+  readonly finding: Fault | null;
+}
+
+/** Every reading with what it should be if all is sound, if the finding holds, and what the meter may be out by. */
+export function EvidenceTable({ rows, labels, finding }: EvidenceTableProps) {
+  if (rows.length === 0) return <p>No reading was taken.</p>;
+  const title = finding ? ifFinding(finding, labels) : null;
+  return (
+    <ol className="grid">
+      {rows.map((row) => (
+        <li key={row.check} className="grid gap-1 border-t border-quiet py-3 first:border-t-2 first:border-rule lg:grid-cols-[minmax(0,1.2fr)_minmax(0,3fr)] lg:gap-6 print:grid-cols-[minmax(0,1.2fr)_minmax(0,3fr)] print:gap-4 print:break-inside-avoid">
+          <h3 className="font-bold">{checkName(row.check, labels)}</h3>
+          <dl className="grid grid-cols-2 gap-x-4 gap-y-2 sm:grid-cols-3 lg:grid-cols-5 print:grid-cols-5">
+            {cellsOf(row, title).map((cell) => (
+              <div key={cell.label} className="min-w-0">
+                <dt className="text-quiet">{cell.label}</dt>
+                <dd className={cell.label === "Bearing" ? "" : `font-mono ${cell.strong ? "font-bold text-copper" : ""}`}>{cell.text}</dd>
+              </div>
+            ))}
+          </dl>
+        </li>
+      ))}
+    </ol>
+  );
+}

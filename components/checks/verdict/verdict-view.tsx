@@ -1,0 +1,121 @@
+import type { ReactNode } from "react";
+import { Notice, Sheet } from "@/components/ui";
+import { checkName, type Labels } from "@/lib/checks/check-name";
+import type { CheckView } from "@/lib/checks/check-view";
+import { findingHeading } from "@/lib/checks/finding-words";
+import type { Verdict } from "@/lib/checks/verdict";
+import { settledPins } from "@/lib/checks/verdict-sentence";
+import { AdviceList } from "./advice-list";
+import { FindingChances, KindChances, MarkLetter } from "./chances";
+import { EvidenceTable } from "./evidence-table";
+import { PinsTable } from "./pins-table";
+import { VerdictFace } from "./verdict-face";
+import { WiringSketch } from "./wiring-sketch";
+
+interface VerdictViewProps {
+  readonly check: CheckView;
+  /** Buttons that belong to the verdict: report, re-check, attach, back. */
+  readonly actions?: ReactNode;
+}
+
+function tone(verdict: Verdict): "sound" | "stop" | "plain" {
+  const [only, second] = verdict.openFindings;
+  if (verdict.contradictory || !only || second) return "plain";
+  return only.code === "none" ? "sound" : "stop";
+}
+
+const STATE_WORDS = { sound: "Sound", stop: "Finding", plain: "Not settled" } as const;
+
+function Sentence({ verdict }: { verdict: Verdict }) {
+  const kind = tone(verdict);
+  return (
+    <Sheet tone={kind}>
+      <p className="flex items-center gap-2 pr-4 font-bold">
+        <svg viewBox="0 0 24 24" aria-hidden="true" className="size-6 fill-none stroke-ink [stroke-width:2.5]">
+          {kind === "sound" ? <path d="M3 3h18v18H3ZM7 12l4 4 6-8" /> : kind === "stop" ? <path d="M8 2h8l6 6v8l-6 6H8l-6-6V8ZM12 6v8M12 16v2" /> : <path d="M12 3 22 21H2ZM12 10v5M12 17v1.5" />}
+        </svg>
+        {verdict.contradictory ? "Contradictory" : STATE_WORDS[kind]}
+      </p>
+      <p className="mt-2 max-w-[34ch] text-2xl leading-snug font-bold sm:max-w-[48ch] sm:text-3xl">{verdict.sentence}</p>
+    </Sheet>
+  );
+}
+
+function Place({ verdict, check }: { verdict: Verdict; check: CheckView }) {
+  const labels = check.setup.cavityLabels;
+  const open = verdict.openFindings.filter((fault) => fault.code !== "none");
+  return (
+    <Sheet title={open.length === 0 ? "Wiring" : "Where it is"}>
+      <WiringSketch labels={labels} pins={settledPins(verdict.pins)} findings={verdict.openFindings} wireColours={check.setup.wireColours} />
+      <ul className="mt-3 grid gap-2">
+        {verdict.openFindings.slice(0, 6).map((fault, index) => (
+          <li key={findingHeading(fault, labels)}>
+            {fault.code === "none" ? "Sound: nothing to mark." : <><MarkLetter index={index} /> {findingHeading(fault, labels)}</>}
+          </li>
+        ))}
+      </ul>
+    </Sheet>
+  );
+}
+
+function TellApart({ verdict, labels }: { verdict: Verdict; labels: Labels }) {
+  if (verdict.contradictory) {
+    return (
+      <Notice tone="ask" title="Take these readings again">
+        <ul className="list-disc pl-6">{verdict.suspects.map((s) => <li key={s.check}><strong>{checkName(s.check, labels)}.</strong> {s.why}</li>)}</ul>
+      </Notice>
+    );
+  }
+  if (verdict.openFindings.length < 2) return null;
+  if (verdict.tellApart.length === 0) {
+    return (
+      <Notice tone="ask" title="No reading with a meter will tell the rest apart">
+        <p>{verdict.inseparable ? "They read alike at every check. Go on with the steps below, the likeliest first, and check again after each." : "Nothing that can be read here separates them further. Go on with the steps below, the likeliest first."}</p>
+      </Notice>
+    );
+  }
+  return (
+    <Notice tone="ask" title="What would tell the rest apart">
+      <ol className="list-decimal space-y-1.5 pl-6">{verdict.tellApart.map((next) => <li key={next.check}><strong>{checkName(next.check, labels)}.</strong> {next.why}</li>)}</ol>
+    </Notice>
+  );
+}
+
+/** The verdict of a finished check, read-only. Server-rendered; the buttons come from the page. */
+export function VerdictView({ check, actions }: VerdictViewProps) {
+  const { verdict } = check;
+  const labels: Labels = check.setup.cavityLabels;
+  if (!verdict) return <Notice tone="plain" title="This check has no verdict yet." />;
+  return (
+    <div className="grid gap-6">
+      <Sentence verdict={verdict} />
+      {actions}
+      <TellApart verdict={verdict} labels={labels} />
+      <div className="grid items-start gap-6 lg:grid-cols-2">
+        <Place verdict={verdict} check={check} />
+        <Sheet title="Pins of the device">
+          <PinsTable verdict={verdict} setup={check.setup} />
+          {check.setup.connector ? <div className="mt-5"><VerdictFace shape={check.setup.connector} labels={labels} pins={settledPins(verdict.pins)} findings={verdict.openFindings} /></div> : null}
+        </Sheet>
+        <Sheet title="Findings still in play"><FindingChances verdict={verdict} labels={labels} /></Sheet>
+        <Sheet title="Kind of device"><KindChances kinds={verdict.kinds} /></Sheet>
+      </div>
+      {verdict.advice.length > 0 ? (
+        <div className="grid items-start gap-6 lg:grid-cols-2">
+          <Sheet title="What to do next"><AdviceList advice={verdict.advice} labels={labels} part="next" /></Sheet>
+          <Sheet title="How to prove the repair"><AdviceList advice={verdict.advice} labels={labels} part="prove" /></Sheet>
+        </div>
+      ) : null}
+      <Sheet title="Evidence"><EvidenceTable rows={verdict.evidence} labels={labels} finding={verdict.evidenceFinding} /></Sheet>
+      <Cautions lines={verdict.cautions} />
+    </div>
+  );
+}
+
+function Cautions({ lines }: { lines: readonly string[] }) {
+  return (
+    <Notice tone="stop" title="Before you touch anything">
+      <ul className="list-disc space-y-1 pl-6">{lines.map((line) => <li key={line}>{line}</li>)}</ul>
+    </Notice>
+  );
+}
