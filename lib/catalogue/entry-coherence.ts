@@ -1,4 +1,4 @@
-import { colourCodes } from "./wire-colours";
+import { parseColour } from "@/lib/units";
 import type { EntryData, RestFull } from "./entry-data";
 import { tableSpan } from "./transfer";
 
@@ -16,7 +16,8 @@ function pinProblems(data: EntryData): Problem[] {
     if (!connector.cavities.some((c) => c.label === pin.cavity)) {
       problems.push({ path: ["pins", i, "cavity"], message: `The connector has no cavity ${pin.cavity}. Enter one of ${connector.cavities.map((c) => c.label).join(", ")}.` });
     }
-    if (!colourCodes(pin.colour)) problems.push({ path: ["pins", i, "colour"], message: `${pin.colour} is no colour of IEC 60757. Enter letters such as BN, BU or GNYE.` });
+    const colour = parseColour(pin.colour);
+    if (!colour.ok || colour.code !== pin.colour) problems.push({ path: ["pins", i, "colour"], message: `${pin.colour} is no colour of IEC 60757. Enter letters such as BN, BU or GNYE.` });
   });
   return problems;
 }

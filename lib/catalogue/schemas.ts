@@ -75,8 +75,8 @@ export const slugSchema = z.string().regex(/^[a-z0-9]+(?:-[a-z0-9]+)*$/).max(120
 /** An entry to read: by slug, a version's number when not the one shown. */
 export const getEntrySchema = z.strictObject({ slug: slugSchema, version: z.int().min(1).max(100_000).optional() });
 
-/** A new version of an entry, or a new entry when the slug is not in use. */
-export const publishEntrySchema = z.strictObject({ slug: slugSchema, data: entryDataSchema });
+/** A new version of an entry, made from version `basedOn`; 0 for the first version of a new entry. */
+export const publishEntrySchema = z.strictObject({ slug: slugSchema, basedOn: z.int().min(0).max(100_000), data: entryDataSchema });
 
 export const FACETS = ["kind", "quantity", "connector", "supply", "colour"] as const;
 export type Facet = (typeof FACETS)[number];

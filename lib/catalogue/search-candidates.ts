@@ -1,0 +1,80 @@
+import "server-only";
+import { sql } from "drizzle-orm";
+import Fuse from "fuse.js";
+import type { Reader } from "@/db/client";
+
+export interface Candidates {
+  readonly ids: ReadonlySet<string>;
+  /** True when no entry has all the words: those with most of them are given. */
+  readonly relaxed: boolean;
+  /** Words nobody has, with the nearest that were looked for instead. */
+  readonly corrected: readonly { readonly typed: string; readonly used: readonly string[] }[];
+}
+
+interface Found { readonly ids: readonly string[]; readonly used?: readonly string[] }
+
+/** One or two letters cannot make a trigram: they are the start of a word ("bn", "5v", "tf"). */
+const SHORTEST_PART = 3;
+const MOST_NEAR_WORDS = 12;
+const MOST_ALIKE = 60;
+
+const quoted = (word: string) => `"${word}"`;
+
+async function idsOf(rows: Promise<readonly { id: string }[]>): Promise<string[]> {
+  return (await rows).map((row) => row.id);
+}
+
+const withPrefix = (db: Reader, word: string) =>
+  idsOf(db.all<{ id: string }>(sql`SELECT entry_id AS id FROM entry_words WHERE entry_words MATCH ${`${quoted(word)}*`}`));
+
+const withPart = (db: Reader, word: string) =>
+  idsOf(db.all<{ id: string }>(sql`SELECT entry_id AS id FROM entry_grams WHERE entry_grams MATCH ${quoted(word)}`));
+
+const withAnyWord = (db: Reader, words: readonly string[]) =>
+  idsOf(db.all<{ id: string }>(sql`SELECT entry_id AS id FROM entry_words WHERE entry_words MATCH ${words.map(quoted).join(" OR ")}`));
+
+/** Letters of a misspelling that may be wrong: none in a short word, where everything is near everything. */
+function errorsAllowed(word: string): number {
+  return word.length < 4 ? 0 : word.length < 5 ? 1 : 2;
+}
+
+/** Words of the catalogue within the errors allowed, nearest first. */
+async function nearWords(db: Reader, word: string): Promise<readonly string[]> {
+  const errors = errorsAllowed(word);
+  if (errors === 0) return [];
+  const terms = await db.all<{ term: string }>(sql`SELECT term FROM entry_terms WHERE length(term) BETWEEN ${word.length - errors} AND ${word.length + errors}`);
+  const fuse = new Fuse(terms.map((row) => row.term), { includeScore: true, ignoreLocation: true, ignoreFieldNorm: true, threshold: errors / word.length + 0.001 });
+  const near = fuse.search(word, { limit: MOST_NEAR_WORDS });
+  const best = near[0]?.score ?? 0;
+  return near.filter((match) => (match.score ?? 1) <= best + 0.5 / word.length).map((match) => match.item);
+}
+
+/** Last resort for words run together or badly spelled: entries that share most trigrams. */
+function alike(db: Reader, word: string): Promise<string[]> {
+  const grams = Array.from({ length: word.length - 2 }, (_, i) => quoted(word.slice(i, i + 3)));
+  return idsOf(db.all<{ id: string }>(sql`SELECT entry_id AS id FROM entry_grams WHERE entry_grams MATCH ${grams.join(" OR ")} ORDER BY rank LIMIT ${MOST_ALIKE}`));
+}
+
+async function find(db: Reader, word: string): Promise<Found> {
+  if (word.length < SHORTEST_PART) return { ids: await withPrefix(db, word) };
+  const ids = await withPart(db, word);
+  if (ids.length > 0) return { ids };
+  const used = await nearWords(db, word);
+  if (used.length > 0) return { ids: await withAnyWord(db, used), used };
+  return { ids: await alike(db, word), used: [] };
+}
+
+/**
+ * Entries that have the words of a query, by full-text search: a word counts as typed wherever it is part of a word;
+ * only when nobody has it so, the nearest words of the catalogue stand in for it (two letters wrong at most).
+ * @param words from `queryWords`, at least one
+ */
+export async function findCandidates(db: Reader, words: readonly string[]): Promise<Candidates> {
+  const found = await Promise.all(words.map((word) => find(db, word)));
+  const counts = new Map<string, number>();
+  for (const { ids } of found) for (const id of new Set(ids)) counts.set(id, (counts.get(id) ?? 0) + 1);
+  const most = Math.max(0, ...counts.values());
+  const ids = new Set([...counts].filter(([, count]) => count === most).map(([id]) => id));
+  const corrected = found.flatMap(({ used }, i) => (used ? [{ typed: words[i] ?? "", used }] : []));
+  return { ids, relaxed: ids.size > 0 && most < words.length, corrected };
+}
