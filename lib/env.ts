@@ -26,6 +26,8 @@ const schema = z.object({
 
 export interface Env {
   readonly production: boolean;
+  /** The development server, whose refreshing needs a looser content security policy. */
+  readonly development: boolean;
   readonly databaseUrl: string;
   readonly databaseAuthToken: string | undefined;
   /** Seals the cookies; at least 32 characters. */
@@ -83,6 +85,7 @@ export function parseEnv(source: Readonly<Record<string, string | undefined>>): 
   const { FIRST_ADMIN_EMAIL: email, FIRST_ADMIN_PASSWORD: password } = value;
   return {
     production,
+    development: value.NODE_ENV === "development",
     databaseUrl: value.DATABASE_URL,
     databaseAuthToken: value.DATABASE_AUTH_TOKEN,
     sessionSecret: value.SESSION_SECRET ?? localSecret(),

@@ -1,0 +1,35 @@
+import { closeDatabase, readDb, write, type Database } from "@/db/client";
+import { migrateDatabase } from "@/db/migrate";
+import { people } from "@/db/schema";
+import { env } from "@/lib/env";
+import { DEMO_PASSWORD, DEMO_PEOPLE, seedPeople } from "./people";
+
+interface Part { readonly name: string; readonly isEmpty: () => Promise<boolean>; readonly seed: (db: Database) => Promise<void> }
+
+/** In this order: each part points at rows of the ones before it. */
+const PARTS: readonly Part[] = [
+  { name: "people", isEmpty: async () => (await readDb().$count(people)) === 0, seed: seedPeople },
+];
+
+/** Fill what is empty with the demo workshop; what holds anything is left alone. */
+async function seedDatabase(): Promise<void> {
+  if (env().production) {
+    process.stdout.write("Production: no demo data. Set FIRST_ADMIN_EMAIL and FIRST_ADMIN_PASSWORD to get the first administrator.\n");
+    return;
+  }
+  for (const { name, isEmpty, seed } of PARTS) {
+    if (!(await isEmpty())) continue;
+    await write(seed);
+    process.stdout.write(`Demo data: ${name}\n`);
+  }
+}
+
+function printAccounts(): void {
+  const rows = DEMO_PEOPLE.map((person) => `  ${person.email.padEnd(32)} ${person.roles.join(", ")}`);
+  process.stdout.write(`Demo accounts (password for all: ${DEMO_PASSWORD})\n${rows.join("\n")}\n`);
+}
+
+await migrateDatabase();
+await seedDatabase();
+if (process.argv.includes("--accounts") && !env().production) printAccounts();
+await closeDatabase();
