@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { connectorShapeSchema } from "@/lib/catalogue/schemas";
 import { KINDS } from "@/lib/diagnosis";
 import { idSchema } from "./id-schemas";
 
@@ -34,16 +35,6 @@ const meterSchema = z.strictObject({
   triggerVolts: z.number().min(0).max(10),
 });
 
-const side = z.enum(["top", "right", "bottom", "left"]);
-const pitch = z.number().min(0).max(40);
-const connectorSchema = z.strictObject({
-  id: idSchema, name, outline: z.enum(["rectangle", "rounded", "round", "triangle"]),
-  cavities: z.array(z.strictObject({ label, row: pitch, column: pitch })).min(3).max(64),
-  keying: z.array(z.strictObject({ side, at: share, width: pitch, type: z.enum(["rib", "slot"]) })).max(12),
-  latch: z.enum(["top", "bottom", "left", "right", "none"]),
-  gender: z.enum(["plug", "receptacle"]),
-});
-
 const colour = z.string().regex(/^[A-Z]{2}(\+?[A-Z]{2})*$/, "Wire colours are IEC 60757 letters, for example BK or GNYE.").max(12);
 
 /** The parts of what is known before the first reading (RunSetup), each within sane bounds. */
@@ -57,7 +48,7 @@ export const SETUP_PARTS = {
   entryName: name.optional(),
   meterId: idSchema.optional(),
   meter: meterSchema.optional(),
-  connector: connectorSchema.optional(),
+  connector: connectorShapeSchema.optional(),
   wireColours: z.tuple([colour.nullable(), colour.nullable(), colour.nullable()]).optional(),
   senses: z.string().max(120).optional(),
   batteryVolts: volts.optional(),
