@@ -1,7 +1,9 @@
 import { closeDatabase, readDb, write, type Database } from "@/db/client";
 import { migrateDatabase } from "@/db/migrate";
-import { people } from "@/db/schema";
+import { entries, machines, people } from "@/db/schema";
 import { env } from "@/lib/env";
+import { seedCatalogue } from "./catalogue";
+import { seedMachines } from "./machines";
 import { DEMO_PASSWORD, DEMO_PEOPLE, seedPeople } from "./people";
 
 interface Part { readonly name: string; readonly isEmpty: () => Promise<boolean>; readonly seed: (db: Database) => Promise<void> }
@@ -9,6 +11,8 @@ interface Part { readonly name: string; readonly isEmpty: () => Promise<boolean>
 /** In this order: each part points at rows of the ones before it. */
 const PARTS: readonly Part[] = [
   { name: "people", isEmpty: async () => (await readDb().$count(people)) === 0, seed: seedPeople },
+  { name: "machines and meters", isEmpty: async () => (await readDb().$count(machines)) === 0, seed: seedMachines },
+  { name: "catalogue", isEmpty: async () => (await readDb().$count(entries)) === 0, seed: seedCatalogue },
 ];
 
 /** Fill what is empty with the demo workshop; what holds anything is left alone. */

@@ -3,7 +3,7 @@ import { machines, meters } from "@/db/schema";
 import { SEED_MACHINES } from "./machines";
 import { SEED_METERS } from "./meters";
 
-const REGISTERED = new Date("2023-01-09T08:00:00Z");
+const REGISTERED = new Date("2026-09-01T09:00:00Z");
 
 /** Fill the empty register with the demo workshop's machines and meters; to be run inside one write. */
 export async function seedMachines(db: Pick<Database, "insert">): Promise<void> {
