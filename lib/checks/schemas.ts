@@ -31,8 +31,24 @@ export const startCheckSchema = z.strictObject({
 });
 export const appendStepsSchema = z.strictObject({ steps: z.array(stepSchema).min(1).max(MAX_STEPS) });
 
-/** The phone's own standing at the end, compared with the server's; what it holds is checked only by that comparison. */
-export const finishCheckSchema = z.strictObject({ standing: z.record(z.string().max(40), z.json()).optional() });
+const chance = z.number().min(0).max(1);
+const pinSchema = z.union([z.literal(1), z.literal(2), z.literal(3)]);
+const faultSchema = z.object({ code: z.enum(FAULT_CODES), pins: z.array(pinSchema).max(3).optional(), p: chance });
+
+/** What of a standing decides a verdict; the rest of an assessment is left out here and not compared. */
+export const standingSchema = z.object({
+  state: z.string().max(40),
+  kinds: z.array(z.object({ kind: z.enum(KINDS), p: chance })).max(10),
+  pins: z.array(z.object({ supply: pinSchema, ground: pinSchema, signal: pinSchema, p: chance })).max(6),
+  faults: z.array(faultSchema).max(200),
+  openFindings: z.array(faultSchema).max(200),
+  done: z.boolean(),
+  inseparable: z.boolean(),
+});
+export type ComparedStanding = z.infer<typeof standingSchema>;
+
+/** The phone's own standing at the end, where it has one, to be compared with the server's. */
+export const finishCheckSchema = z.strictObject({ standing: standingSchema.optional() });
 
 export const attachMachineSchema = z.strictObject({ machineId: idSchema });
 export const startRecheckSchema = z.strictObject({ id: ulidSchema });

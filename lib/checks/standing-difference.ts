@@ -1,7 +1,5 @@
 import type { Assessment } from "@/lib/diagnosis";
-
-/** What of a standing decides a verdict; what only words or proposes may differ between versions of the page. */
-const COMPARED = ["state", "kinds", "pins", "faults", "openFindings", "done", "inseparable"] as const;
+import { standingSchema, type ComparedStanding } from "./schemas";
 
 /** Same structure, same numbers to the last bit; the order of an object's keys does not matter, that of a list does. */
 function same(a: unknown, b: unknown): boolean {
@@ -16,7 +14,8 @@ function same(a: unknown, b: unknown): boolean {
  * Names of the parts in which the phone's standing differs from the server's; empty when they are equal to the last bit.
  * Numbers survive JSON unchanged, so any difference means that the two did not run the same code on the same readings.
  */
-export function standingDifference(server: Assessment, phone: Readonly<Record<string, unknown>>): readonly string[] {
-  const own = JSON.parse(JSON.stringify(server)) as Record<string, unknown>;
-  return COMPARED.filter((key) => Object.hasOwn(phone, key) && !same(own[key], phone[key]));
+export function standingDifference(server: Assessment, phone: ComparedStanding): readonly string[] {
+  const own = standingSchema.parse(JSON.parse(JSON.stringify(server)));
+  const keys = Object.keys(own) as (keyof ComparedStanding)[];
+  return keys.filter((key) => !same(own[key], phone[key]));
 }
