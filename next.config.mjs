@@ -5,7 +5,9 @@ const config = {
   poweredByHeader: false,
   // `next dev` may be opened by either name of this machine.
   allowedDevOrigins: ["127.0.0.1", "localhost"],
-  experimental: { authInterrupts: true },
+  // The badge of the development server would lie over the bottom bar.
+  devIndicators: false,
+  experimental: { authInterrupts: true, serverActions: { bodySizeLimit: "256kb" } },
   serverExternalPackages: ["@libsql/client", "pino"],
 };
 

@@ -3,6 +3,7 @@ export { ChanceBar, chanceText } from "./chance-bar";
 export { DataTable, type Column, type Row } from "./data-table";
 export { EmptyState } from "./empty-state";
 export { Checkbox, Field, Select, TextArea, TextInput } from "./field";
+export { MessagePage } from "./message-page";
 export { Notice, type NoticeTone } from "./notice";
 export { PageHeading } from "./page-heading";
 export { PinTag, type PinTagRole } from "./pin-tag";

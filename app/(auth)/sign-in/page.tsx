@@ -16,7 +16,7 @@ export default async function SignInPage({ searchParams }: PageProps<"/sign-in">
       {expired ? <Notice tone="ask" title="Sign in to go on">What you typed in a running check is kept on this phone.</Notice> : null}
       {ended ? <Notice tone="sound" title="You are signed out" live="polite">On this browser.</Notice> : null}
       <SignInForm action={signInAction} />
-      <p className="text-quiet">No account, or the password is gone? An administrator of your workshop helps.</p>
+      <p className="text-quiet">No account yet? Ask an administrator of your workshop.</p>
     </main>
   );
 }
