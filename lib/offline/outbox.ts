@@ -30,7 +30,7 @@ async function sendRun(store: RunStore, send: Send, run: RunRecord): Promise<Sen
   }
   const steps = await sendSteps(store, send, run);
   if (steps.type !== "ok" || run.finish !== "asked") return steps;
-  const finished = await send(`/api/checks/${run.id}/finish`, {});
+  const finished = await send(`/api/checks/${run.id}/finish`, run.standing ? { standing: run.standing } : {});
   if (finished.type === "ok") await store.updateRun(run.id, { finish: "done" });
   return finished;
 }

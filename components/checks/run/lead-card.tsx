@@ -1,0 +1,59 @@
+import type { CheckSpec } from "@/lib/diagnosis";
+import type { RunSetup } from "@/lib/checks/run";
+import { leadWords, measuredWords, meterWords, stateWords, type Labels } from "@/lib/checks/check-words";
+import { LeadTag, type LeadColour } from "./lead-tag";
+import { MiniFace } from "./mini-face";
+import { ScreenHeading } from "./screen-heading";
+
+function LeadLine({ colour, to, extra }: { readonly colour: LeadColour; readonly to: string; readonly extra: string | null }) {
+  return (
+    <p className="flex items-center gap-2 text-lg leading-tight">
+      <LeadTag colour={colour} />
+      <span><span className="sr-only">{colour} lead on </span><strong className="text-copper">{to}</strong>{extra ? <span className="text-quiet"> {extra}</span> : null}</span>
+    </p>
+  );
+}
+
+function positionTitle(spec: CheckSpec): string {
+  if (spec.meter === "watch") return "Sweep, rest to full";
+  if (spec.position === null) return measuredWords(spec);
+  return `${measuredWords(spec)}, ${spec.position === "rest" ? "at rest" : "at full travel"}`;
+}
+
+/** What the hands do, where it is more than touching two places. */
+function handWords(spec: CheckSpec): string | null {
+  if (spec.meter === "watch") return "Move the actuator slowly from rest to full and watch the reading. Nobody near what moves.";
+  if (spec.meter === "grip") return "Push a matching test terminal in and pull it out: feel whether the contact grips. Never force a probe tip in.";
+  if (spec.position === "full") return "Hold the actuator at full travel. Nobody near what moves.";
+  if (spec.place === "mated") return "Slide the probe in along the wire from behind. Never pierce insulation.";
+  return null;
+}
+
+/** Where each lead goes, what the meter is set to and what state the machine is in, in words and on the connector's face. */
+export function LeadCard({ spec, setup }: { readonly spec: CheckSpec; readonly setup: RunSetup }) {
+  const labels: Labels = setup.cavityLabels;
+  const leads = leadWords(spec, labels);
+  const meter = meterWords(spec);
+  const hands = handWords(spec);
+  return (
+    <section className="grid gap-2">
+      <ScreenHeading screen={spec.code}>{positionTitle(spec)}</ScreenHeading>
+      <div className="flex items-start justify-between gap-3">
+        <div className="grid min-w-0 gap-2">
+          {leads ? (
+            <>
+              <LeadLine colour="red" to={leads.red} extra={null} />
+              <LeadLine colour="black" to={leads.black} extra={null} />
+            </>
+          ) : <p className="text-lg leading-tight">Test terminal into <strong className="text-copper">harness contact {typeof spec.red === "number" ? labels[spec.red - 1] : ""}</strong></p>}
+          <p className="leading-tight">Meter: <strong className="font-mono">{meter.dial}</strong> <span className="text-quiet">({meter.range})</span></p>
+        </div>
+        <MiniFace spec={spec} shape={setup.connector} labels={labels} />
+      </div>
+      <p className="leading-tight text-quiet">
+        <span className="sr-only">Machine: </span>{stateWords(spec.state).join(" · ")}
+      </p>
+      {hands ? <p className="leading-tight">{hands}</p> : null}
+    </section>
+  );
+}

@@ -1,0 +1,72 @@
+"use client";
+
+import { useId, useRef, useState, type KeyboardEvent } from "react";
+import type { CheckSpec, ReadingValue } from "@/lib/diagnosis";
+import { pressKey, type KeypadKey } from "@/lib/checks/keypad-text";
+import { isBareNumber, readTyped, UNIT_CHOICES } from "@/lib/checks/typed-reading";
+import type { Draft } from "@/lib/offline/draft";
+import { Keypad } from "./keypad";
+
+interface ReadingEntryProps {
+  readonly spec: CheckSpec;
+  readonly typed: Draft["typed"];
+  readonly onTyped: (typed: Draft["typed"]) => void;
+  /** Resolves once the reading is kept on the phone. */
+  readonly onReading: (value: ReadingValue, typed: string) => Promise<void>;
+}
+
+/** One field for the reading, fed by the keypad below it, the phone's keyboard or dictation. */
+export function ReadingEntry({ spec, typed, onTyped, onReading }: ReadingEntryProps) {
+  const [error, setError] = useState<string | null>(null);
+  const [busy, setBusy] = useState(false);
+  const field = useRef<HTMLInputElement>(null);
+  const id = useId();
+  const mine = typed?.check === spec.code ? typed : null;
+  const text = mine?.text ?? "";
+  const unit = mine?.unit ?? UNIT_CHOICES[spec.unit][0] ?? "";
+
+  const change = (nextText: string, nextUnit = unit) => {
+    setError(null);
+    onTyped({ check: spec.code, text: nextText, unit: nextUnit });
+  };
+  const enter = async () => {
+    if (busy) return;
+    const read = readTyped(spec, text, unit);
+    if (!read.ok) {
+      setError(read.message);
+      return;
+    }
+    setBusy(true);
+    await onReading(read.value, read.typed);
+    setBusy(false);
+  };
+
+  return (
+    <form noValidate className="grid gap-2" onSubmit={(event) => { event.preventDefault(); void enter(); }}>
+      <div className="grid gap-1">
+        <label htmlFor={id} className="sr-only">Reading{unit ? `, in ${unit} unless you type another unit` : ""}</label>
+        <div className={`flex min-h-20 items-center border-2 bg-sheet ${error ? "border-4 border-stop" : "border-rule"}`}>
+          <input
+            ref={field} id={id} value={text} onChange={(event) => change(event.target.value)} inputMode="decimal" autoComplete="off" autoCorrect="off" spellCheck={false}
+            enterKeyHint="enter" maxLength={40} placeholder="Reading" aria-invalid={error ? true : undefined} aria-describedby={error ? `${id}-error` : undefined}
+            className="min-h-19 min-w-0 flex-1 bg-transparent px-3 text-right font-mono text-[2.5rem] leading-none text-ink outline-offset-0 placeholder:font-read placeholder:text-xl placeholder:text-quiet"
+          />
+          <span aria-hidden="true" className="min-w-14 pr-3 font-mono text-2xl">{text === "" || isBareNumber(text) ? unit : ""}</span>
+        </div>
+        {error ? <p id={`${id}-error`} role="alert" className="flex gap-2 font-bold text-stop"><span aria-hidden="true">■</span><span>{error}</span></p> : null}
+      </div>
+      <Keypad
+        unit={spec.unit} selected={unit} busy={busy}
+        onKey={(key: KeypadKey) => change(pressKey(text, key))} onUnit={(choice) => change(text, choice)} onEnter={() => void enter()}
+      />
+    </form>
+  );
+}
+
+/** A digit typed anywhere on the reading's screen belongs in the field: moves the focus there before the character arrives. */
+export function typeAhead(event: KeyboardEvent<HTMLElement>): void {
+  const target = event.target as HTMLElement;
+  const plain = !event.ctrlKey && !event.metaKey && !event.altKey && /^[\d.,+-]$/.test(event.key);
+  if (!plain || target.closest("input, textarea, select, dialog")) return;
+  event.currentTarget.querySelector<HTMLInputElement>("input[inputmode=decimal]")?.focus();
+}

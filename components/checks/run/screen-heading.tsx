@@ -1,0 +1,18 @@
+"use client";
+
+import { useEffect, useRef, type ReactNode } from "react";
+
+/**
+ * The heading of a screen of the check. It takes the focus when the screen changes, so that a screen reader says
+ * where one is and the keyboard starts from there. A dialog that is open keeps the focus.
+ */
+export function ScreenHeading({ screen, children }: { readonly screen: string; readonly children: ReactNode }) {
+  const heading = useRef<HTMLHeadingElement>(null);
+  useEffect(() => {
+    const focused = document.activeElement;
+    const elsewhere = focused instanceof HTMLElement && focused.closest("dialog[open]") !== null;
+    if (!elsewhere) heading.current?.focus({ preventScroll: true });
+    heading.current?.scrollIntoView({ block: "start" });
+  }, [screen]);
+  return <h1 ref={heading} tabIndex={-1} className="scroll-mt-28 text-2xl leading-tight font-bold outline-none">{children}</h1>;
+}

@@ -1,0 +1,62 @@
+import type { Assessment } from "@/lib/diagnosis";
+import { chanceText } from "@/components/ui";
+import { chanceWords } from "@/lib/checks/chance-words";
+import type { Labels } from "@/lib/checks/check-words";
+import { findingHeading, kindTitle } from "@/lib/checks/finding-words";
+
+interface LineProps { readonly name: string; readonly chance: number }
+
+/** Name, chance in words and percent, and a thin bar under them. */
+function Line({ name, chance }: LineProps) {
+  return (
+    <span className="grid gap-0.5">
+      <span className="flex items-baseline justify-between gap-2 leading-tight">
+        <span className="truncate font-bold">{name}</span>
+        <span className="whitespace-nowrap">{chanceWords(chance)} <span className="font-mono">{chanceText(chance)}</span></span>
+      </span>
+      <svg aria-hidden="true" viewBox="0 0 100 4" preserveAspectRatio="none" className="h-1.5 w-full border border-rule bg-sheet text-bench">
+        <rect width={chance * 100} height="4" fill="currentColor" />
+      </svg>
+    </span>
+  );
+}
+
+/** The standing in one sentence, for the live region. */
+export function standingSentence(assessment: Assessment | null, labels: Labels): string {
+  if (!assessment || assessment.state === "invalid-input") return "";
+  const [kind, fault] = [assessment.kinds[0], assessment.faults[0]];
+  const parts = [
+    kind ? `${kindTitle(kind.kind)} ${chanceWords(kind.p)}, ${chanceText(kind.p)}` : null,
+    fault ? `${findingHeading(fault, labels)} ${chanceWords(fault.p)}, ${chanceText(fault.p)}` : null,
+  ].filter((part) => part !== null);
+  return parts.length > 0 ? `Standing: ${parts.join("; ")}.` : "";
+}
+
+interface StandingStripProps {
+  readonly assessment: Assessment | null;
+  readonly working: boolean;
+  readonly labels: Labels;
+  readonly open: boolean;
+  readonly onToggle: () => void;
+}
+
+/** What is believed so far, always in sight; pressing it opens all of it. */
+export function StandingStrip({ assessment, working, labels, open, onToggle }: StandingStripProps) {
+  const standing = assessment && assessment.state !== "invalid-input" ? assessment : null;
+  const [kind, fault] = [standing?.kinds[0], standing?.faults[0]];
+  return (
+    <button
+      type="button" aria-expanded={open} aria-controls="standing-details" onClick={onToggle}
+      className="grid min-h-glove w-full cursor-pointer grid-cols-[minmax(0,1fr)_auto] items-center gap-3 border-b-2 border-rule bg-paper py-2 text-left hover:bg-(--hover)"
+    >
+      <span className="grid gap-1.5">
+        {kind ? <Line name={kindTitle(kind.kind)} chance={kind.p} /> : <span className="font-bold">Standing</span>}
+        {fault ? <Line name={findingHeading(fault, labels)} chance={fault.p} /> : <span>{working ? "Working it out …" : "Nothing is believed yet"}</span>}
+      </span>
+      <span className="flex w-12 flex-col items-center text-base font-bold">
+        <svg aria-hidden="true" viewBox="0 0 24 14" className={`w-6 ${open ? "rotate-180" : ""}`} fill="none" stroke="currentColor" strokeWidth={3}><path d="M2 2l10 10L22 2" /></svg>
+        {open ? "Less" : "All"}
+      </span>
+    </button>
+  );
+}

@@ -1,0 +1,66 @@
+"use client";
+
+import { useEffect, useMemo, useRef, useState } from "react";
+import { vocabulary, type Assessment, type Reading, type ReadingEffect, type Setup } from "@/lib/diagnosis";
+import type { Run } from "@/lib/checks/run";
+import { effectiveReadings, engineSetup } from "@/lib/checks/run-state";
+import { startEngine, type EngineClient } from "./engine-client";
+
+export interface EngineState {
+  /** The answer to exactly the present steps; null while it is worked out. */
+  readonly current: Assessment | null;
+  /** The last answer there was, shown meanwhile. */
+  readonly latest: Assessment | null;
+  readonly failed: boolean;
+  readonly setup: Setup;
+  readonly readings: readonly Reading[];
+}
+
+interface Answer<T> { readonly key: string; readonly value: T | null }
+
+let shared: EngineClient | null = null;
+
+/** One engine for the page; it stays so that its script is there when the server no longer is. */
+export function sharedEngine(): EngineClient {
+  shared ??= startEngine();
+  return shared;
+}
+
+/** The live standing of a run, worked out on the phone. */
+export function useEngine(run: Run): EngineState {
+  const setup = useMemo(() => engineSetup(run, vocabulary()), [run]);
+  const readings = useMemo(() => effectiveReadings(run.steps), [run.steps]);
+  const key = useMemo(() => JSON.stringify([setup, readings]), [setup, readings]);
+  const [answer, setAnswer] = useState<Answer<Assessment>>({ key: "", value: null });
+  const asked = useRef("");
+
+  useEffect(() => {
+    asked.current = key;
+    const [askedSetup, askedReadings] = JSON.parse(key) as [Setup, Reading[]];
+    const settle = (value: Assessment | null) => { if (asked.current === key) setAnswer((before) => ({ key, value: value ?? before.value })); };
+    sharedEngine().assess(askedSetup, askedReadings).then(settle, () => {
+      if (asked.current === key) setAnswer({ key: `failed ${key}`, value: null });
+    });
+  }, [key]);
+
+  return { current: answer.key === key ? answer.value : null, latest: answer.value, failed: answer.key === `failed ${key}`, setup, readings };
+}
+
+/** What each reading speaks for and against; worked out only while `wanted`. */
+export function useEffects(setup: Setup, readings: readonly Reading[], wanted: boolean): readonly ReadingEffect[] | null {
+  const key = JSON.stringify([setup, readings]);
+  const [answer, setAnswer] = useState<Answer<readonly ReadingEffect[]>>({ key: "", value: null });
+
+  useEffect(() => {
+    if (!wanted) return;
+    let gone = false;
+    const [askedSetup, askedReadings] = JSON.parse(key) as [Setup, Reading[]];
+    void sharedEngine().effects(askedSetup, askedReadings).then(
+      (value) => { if (!gone) setAnswer({ key, value }); },
+      () => { if (!gone) setAnswer({ key, value: [] }); },
+    );
+    return () => { gone = true; };
+  }, [key, wanted]);
+
+  return answer.key === key ? answer.value : null;
+}
