@@ -17,8 +17,9 @@ export default async function AccountPage() {
   const [sessions, current] = await Promise.all([listOwnSessions(person), currentSession()]);
   const theme = parseTheme((await cookies()).get(THEME_COOKIE)?.value);
   return (
-    <div className="grid max-w-3xl gap-6">
+    <>
       <PageHeading title="Account" lead={person.name} />
+      <div className="grid max-w-3xl grid-cols-1 gap-6">
       <Sheet title="You">
         <dl className="grid gap-x-6 gap-y-1 sm:grid-cols-[auto_1fr]">
           <dt className="font-bold">E-mail address</dt><dd>{person.email}</dd>
@@ -34,6 +35,7 @@ export default async function AccountPage() {
       <Sheet title="Where you are signed in">
         <SessionList sessions={sessions.map((session) => ({ ...session, own: session.id === current?.sessionId }))} revoke={revokeSessionAction} revokeOthers={signOutElsewhereAction} />
       </Sheet>
-    </div>
+      </div>
+    </>
   );
 }

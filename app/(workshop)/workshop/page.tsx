@@ -15,11 +15,13 @@ export default async function WorkshopPage({ searchParams }: PageProps<"/worksho
   const person = await requirePermission("people:read");
   const { before } = await searchParams;
   return (
-    <div className="grid gap-8">
+    <>
       <PageHeading title="Workshop" lead="Who works here, and what was done." />
-      <People person={person} />
-      {hasPermission(person, "audit:read") ? <Audit person={person} before={typeof before === "string" ? before : undefined} /> : null}
-    </div>
+      <div className="grid grid-cols-1 gap-8">
+        <People person={person} />
+        {hasPermission(person, "audit:read") ? <Audit person={person} before={typeof before === "string" ? before : undefined} /> : null}
+      </div>
+    </>
   );
 }
 
