@@ -93,7 +93,7 @@ export class NodalNetwork {
     for (let k = 0; k < this.diodeCount; k++) {
       const d = this.diodes[k]!;
       const next = limitJunction(this.volts[d.anode]! - this.volts[d.cathode]!, d.volts, d.limitVolts);
-      if (Math.abs(next - d.volts) > 1e-6 + 1e-6 * Math.abs(next)) settled = false;
+      if (Math.abs(next - d.volts) > 1e-9) settled = false;
       d.volts = next;
     }
     return settled;

@@ -1,0 +1,71 @@
+import { THERMAL_VOLTS } from "../network/solve";
+import { GROUND, SIGNAL, SUPPLY, type Candidate } from "./candidate";
+import { P } from "./parameters";
+
+/** An ohms function: a source behind a range resistor; the lowest range that holds the reading is shown. */
+const SOURCE_VOLTS = 2.5;
+const LOWEST_RANGE = 600, RANGES = 6;
+/** Range resistor over full range, ohms per ohm. */
+const RANGE_RESISTOR = 1000 / 600;
+/** Forward drops are stated at this current, amperes. */
+export const DROP_AMPERES = 2e-6;
+
+/**
+ * What an autoranging ohms function shows across a resistance in series with diode drops, ohms.
+ * `drop` is their sum at 2 microamperes, `junctions` how many there are (each rises 60 mV a decade of current).
+ */
+export function ohmsThroughDiodes(ohms: number, drop: number, junctions: number): number {
+  let full = LOWEST_RANGE;
+  for (let k = 0; k < RANGES; k++, full *= 10) {
+    const range = full * RANGE_RESISTOR;
+    const amperes = currentThrough(range + ohms, drop, junctions);
+    const shown = SOURCE_VOLTS / amperes - range;
+    if (shown < full || k === RANGES - 1) return shown;
+  }
+  return Infinity;
+}
+
+/** Fixed-point solution of the series loop; the drop moves only with the logarithm of the current. */
+function currentThrough(series: number, drop: number, junctions: number): number {
+  let amperes = (SOURCE_VOLTS - drop) / series;
+  for (let k = 0; k < 4; k++) {
+    const volts = drop + junctions * THERMAL_VOLTS * Math.log(amperes / DROP_AMPERES);
+    amperes = Math.max(SOURCE_VOLTS - volts, 0.05) / series;
+  }
+  return amperes;
+}
+
+/** Ohms between two roles of the parted device; `position` is 0 at rest, 1 at full travel. Infinity where nothing conducts. */
+export function deviceOhms(c: Candidate, x: Float64Array, red: number, black: number, position: number): number {
+  return c.family === "potentiometer" ? trackOhms(c, x, red, black, position) : electronicOhms(c, x, red, black);
+}
+
+function trackOhms(c: Candidate, x: Float64Array, a: number, b: number, position: number): number {
+  const share = clampShare(x[position === 0 ? P.rest : P.full]!);
+  const touches = (role: number) => a === role || b === role;
+  if (c.code === "wiper-open" && touches(SIGNAL)) return Infinity;
+  if (c.code === "track-open" && touches(c.breakEnd)) return Infinity;
+  const track = x[P.track]!;
+  if (!touches(SIGNAL)) return track;
+  return x[P.wiper]! + track * (touches(GROUND) ? share : 1 - share);
+}
+
+/** Wiper share kept within the track. */
+export function clampShare(share: number): number {
+  return Math.min(0.998, Math.max(0.002, share));
+}
+
+/** Series resistance of the clamp diode from ground to signal, ohms (common practice). */
+const CLAMP_OHMS = 60;
+
+function electronicOhms(c: Candidate, x: Float64Array, red: number, black: number): number {
+  const internal = x[P.internal]!, dropIn = x[P.dropSupply]!, dropSig = x[P.dropSignal]!;
+  if (red === SUPPLY) return black === GROUND ? ohmsThroughDiodes(internal, dropIn, 1) : ohmsThroughDiodes(internal + CLAMP_OHMS, dropIn + dropSig, 2);
+  if (black === SUPPLY) return Infinity;
+  if (red === GROUND) return ohmsThroughDiodes(CLAMP_OHMS, dropSig, 1);
+  const leak = x[P.leak]!;
+  if (c.family === "open-collector") return leak;
+  // A driven output also conducts back through its upper switch into the device's internal supply.
+  const back = ohmsThroughDiodes(internal, dropSig, 1);
+  return leak * back / (leak + back);
+}

@@ -1,0 +1,57 @@
+import { FAMILIES, FAULT_PLACES, GROUND, makeCandidate, PERMUTATIONS, SIGNAL, SUPPLY, type Candidate, type FaultPlace, type Running } from "../circuit/candidate";
+import type { Family, Pull } from "../circuit/parameters";
+import { FAMILY_SHARE, FAULT_WEIGHTS, KIND_WEIGHTS, PULL_SHARE } from "../priors";
+import { KINDS, type Expect, type Kind, type PinAssignment } from "../types";
+
+const PULLS: readonly Pull[] = ["down", "up"];
+
+/** Log-weights of a family's findings, normalised; the places of one finding share its weight. */
+function faultLogWeights(family: Family): readonly { place: FaultPlace; log: number }[] {
+  const places = FAULT_PLACES[family];
+  const count = (code: string) => places.filter((p) => p.code === code).length;
+  const total = [...new Set(places.map((p) => p.code))].reduce((sum, code) => sum + FAULT_WEIGHTS[code], 0);
+  return places.map((place) => ({ place, log: Math.log(FAULT_WEIGHTS[place.code] / count(place.code) / total) }));
+}
+
+function ofFamily(kind: Kind, family: Family, pins: PinAssignment, base: number, expect?: Expect): Candidate[] {
+  return faultLogWeights(family).flatMap(({ place, log }) => {
+    const ends = place.code === "track-open" ? ([0, 1] as const) : ([0] as const);
+    const states = runningStates(family, place);
+    return pullsFor(family, place).flatMap((pull) => ends.flatMap((breakEnd) => states.map((running) => makeCandidate({
+      family, kind, pins, place, pull, breakEnd, running, expect,
+      logPrior: base + log + Math.log(pullShare(family, pull, place)) - Math.log(ends.length * states.length),
+    }))));
+  });
+}
+
+/** A supply or ground that is only weak may or may not leave the electronics enough to run on. */
+function runningStates(family: Family, place: FaultPlace): readonly Running[] {
+  if (family === "potentiometer") return ["by-volts"];
+  const weakens = (place.code === "wire-resistive" && place.at !== SIGNAL) || (place.code === "short-to-ground" && place.at === SUPPLY) || (place.code === "short-to-battery" && place.at === GROUND);
+  return weakens ? ["yes", "no"] : ["by-volts"];
+}
+
+/** With its pull gone an input is the same whichever way it was held. */
+function pullsFor(family: Family, place: FaultPlace): readonly Pull[] {
+  if (place.code === "pull-missing") return ["down"];
+  return PULLS.filter((pull) => PULL_SHARE[family][pull] > 0);
+}
+
+const pullShare = (family: Family, pull: Pull, place: FaultPlace) => (place.code === "pull-missing" ? 1 : PULL_SHARE[family][pull]);
+
+let unknownDevice: readonly Candidate[] | null = null;
+
+/** Every way an unknown three-wire device may be built; made once, since nothing in it depends on the readings. */
+export function candidatesForUnknown(): readonly Candidate[] {
+  unknownDevice ??= KINDS.flatMap((kind) => PERMUTATIONS.flatMap((pins) => FAMILIES[kind].flatMap((family) =>
+    ofFamily(kind, family, pins, Math.log(KIND_WEIGHTS[kind] * FAMILY_SHARE[family] / PERMUTATIONS.length)))));
+  return unknownDevice;
+}
+
+/** Every way the device of a catalogue entry may be built and wired, taking the entry at its word. */
+export function candidatesForEntry(expect: Expect): readonly Candidate[] {
+  const families = FAMILIES[expect.kind].filter((f) => !expect.output || f === expect.output);
+  const total = families.reduce((sum, f) => sum + FAMILY_SHARE[f], 0);
+  return families.flatMap((family) => ofFamily(expect.kind, family, expect.pins, Math.log(FAMILY_SHARE[family] / total), expect));
+}
+

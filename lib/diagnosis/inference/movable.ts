@@ -1,0 +1,45 @@
+import type { Candidate } from "../circuit/candidate";
+import { P } from "../circuit/parameters";
+import { GROUP } from "../circuit/predict";
+
+const HAS_FAULT_OHMS = new Set(["wire-resistive", "short-to-ground", "short-to-battery", "wires-shorted"]);
+const cache = new Map<string, readonly number[]>();
+
+/** Which unknowns the given groups of checks can speak of, for this candidate; ascending places. */
+export function movedBy(c: Candidate, groups: number): readonly number[] {
+  const key = `${c.family}|${c.pull}|${c.code}|${c.suppliedByBattery}|${groups}`;
+  let list = cache.get(key);
+  if (!list) cache.set(key, list = listFor(c, groups));
+  return list;
+}
+
+function listFor(c: Candidate, groups: number): readonly number[] {
+  const set = new Set<number>();
+  const add = (...places: number[]) => places.forEach((p) => set.add(p));
+  if (groups & GROUP.cold) add(P.supplyBleed, P.pull, ...(c.pull === "up" ? [P.railOff] : []));
+  if (groups & (GROUP.live | GROUP.mated)) {
+    add(P.battery, P.supply, P.supplySource, P.pull);
+    if (c.pull === "up") add(P.rail);
+    if (c.code === "supply-missing") add(P.supplyBleed);
+  }
+  if (groups & GROUP.device) add(...deviceUnknowns(c));
+  if (groups & GROUP.mated) add(P.rest, P.full, ...deviceUnknowns(c), ...runningUnknowns(c));
+  if (HAS_FAULT_OHMS.has(c.code) && groups & ~GROUP.device) add(P.fault);
+  if (c.code === "short-to-battery" && groups & (GROUP.cold | GROUP.wires)) add(P.batteryOff);
+  if (c.suppliedByBattery) set.delete(P.supply);
+  return [...set].sort((a, b) => a - b);
+}
+
+function deviceUnknowns(c: Candidate): readonly number[] {
+  if (c.family === "potentiometer") return [P.track, P.wiper, P.rest, P.full];
+  return [P.internal, P.leak, P.dropSupply, P.dropSignal];
+}
+
+function runningUnknowns(c: Candidate): readonly number[] {
+  switch (c.family) {
+    case "potentiometer": return [];
+    case "open-collector": return [P.load, P.driveLow, P.frequency];
+    case "push-pull": return [P.load, P.high, P.frequency];
+    case "voltage": return [P.load, P.high];
+  }
+}
