@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { dutyFromMean, measurePulses, pulseMean } from "@/lib/waveform";
+import { seedEntries } from "../../seed/catalogue";
 
 describe("rules of the trade (common practice)", () => {
   it("a pulsed 24 V at 50 % reads about 12 V: the mean is amplitude times duty", () => {
@@ -17,5 +18,42 @@ describe("rules of the trade (common practice)", () => {
     const measured = measurePulses(samples, 1e-6);
     expect(measured?.hertz).toBeCloseTo(500, 3);
     expect(measured?.duty).toBeCloseTo(duty, 3);
+  });
+});
+
+describe("the demo catalogue keeps the trade's rules (common practice)", () => {
+  const pwm = seedEntries().map(({ data }) => data).filter(({ kind }) => kind === "pwm");
+
+  it("PWM sensors keep their duty between 5 and 95 %, long strokes from 4 %", () => {
+    expect(pwm.length).toBeGreaterThan(10);
+    for (const { name, healthy } of pwm) {
+      const { rest, full } = healthy.duty ?? { rest: NaN, full: NaN };
+      expect(Math.min(rest, full), name).toBeGreaterThanOrEqual(0.04);
+      expect(Math.max(rest, full), name).toBeLessThanOrEqual(0.95);
+    }
+  });
+
+  it("their frequency is between 100 Hz and 2 kHz, most often 500 Hz", () => {
+    const count = new Map<number, number>();
+    for (const { healthy } of pwm) {
+      const hertz = healthy.frequencyHz ?? NaN;
+      expect(hertz).toBeGreaterThanOrEqual(100);
+      expect(hertz).toBeLessThanOrEqual(2000);
+      count.set(hertz, (count.get(hertz) ?? 0) + 1);
+    }
+    expect([...count].sort((a, b) => b[1] - a[1])[0]?.[0]).toBe(500);
+  });
+
+  it("an open-collector output has its pull-up named: without it there is no signal, and no fault of the sensor", () => {
+    for (const { healthy } of pwm.filter(({ healthy }) => healthy.output === "open-collector")) expect(healthy.pullUpNeeded).toBe(true);
+  });
+
+  it("potentiometers keep clear of their ends and lie between 100 ohm and 100 kilohm", () => {
+    // Source: component handbook for the range of totals, read.
+    for (const { kind, healthy, name } of seedEntries().map(({ data }) => data)) {
+      if (kind !== "potentiometer") continue;
+      expect(healthy.totalOhms, name).toBeGreaterThanOrEqual(100);
+      expect(healthy.totalOhms, name).toBeLessThanOrEqual(100_000);
+    }
   });
 });
