@@ -38,11 +38,20 @@ function errorsAllowed(word: string): number {
   return word.length < 4 ? 0 : word.length < 5 ? 1 : 2;
 }
 
+/**
+ * Words of the catalogue that a misspelling may stand for. Letters are compared with words, and what has a digit only with part
+ * numbers of the same first character, or a large catalogue's part numbers would outweigh its words a hundred to one.
+ */
+function vocabulary(db: Reader, word: string, errors: number): Promise<{ term: string }[]> {
+  const alike = /[0-9]/.test(word) ? sql`term GLOB ${`${word.slice(0, 1)}*[0-9]*`}` : sql`term NOT GLOB '*[0-9]*'`;
+  return db.all<{ term: string }>(sql`SELECT term FROM entry_terms WHERE length(term) BETWEEN ${word.length - errors} AND ${word.length + errors} AND ${alike}`);
+}
+
 /** Words of the catalogue within the errors allowed, nearest first. */
 async function nearWords(db: Reader, word: string): Promise<readonly string[]> {
   const errors = errorsAllowed(word);
   if (errors === 0) return [];
-  const terms = await db.all<{ term: string }>(sql`SELECT term FROM entry_terms WHERE length(term) BETWEEN ${word.length - errors} AND ${word.length + errors}`);
+  const terms = await vocabulary(db, word, errors);
   const fuse = new Fuse(terms.map((row) => row.term), { includeScore: true, ignoreLocation: true, ignoreFieldNorm: true, threshold: errors / word.length + 0.001 });
   const near = fuse.search(word, { limit: MOST_NEAR_WORDS });
   const best = near[0]?.score ?? 0;

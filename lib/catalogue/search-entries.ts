@@ -7,9 +7,9 @@ import { pinsInOrder } from "./expect-of-entry";
 import { searchEntriesSchema } from "./schemas";
 import { findCandidates } from "./search-candidates";
 import { facetGroups, filterRows } from "./search-facets";
-import { rankRows } from "./search-rank";
+import { rankRows, sortByName, worthRanking } from "./search-rank";
 import type { SearchHit, SearchResult } from "./search-result";
-import { dataOf, searchRows, type SearchRow } from "./search-rows";
+import { dataOf, partNumbersOf, searchRows, type SearchRow } from "./search-rows";
 import { supplyWords } from "./supply-words";
 import { queryWords } from "./words";
 
@@ -29,7 +29,8 @@ export async function search(db: Reader, input: unknown): Promise<SearchResult> 
   const words = queryWords(wanted.q);
   const candidates = words.length > 0 ? await findCandidates(db, words) : null;
   const rows = await searchRows(db, candidates?.ids ?? null);
-  const ranked = rankRows(filterRows(rows, wanted), words);
+  const fitting = filterRows(rows, wanted);
+  const ranked = worthRanking(fitting, words) ? rankRows(fitting, await partNumbersOf(db, fitting), words) : sortByName(fitting);
   const pages = Math.max(1, Math.ceil(ranked.length / PAGE_SIZE));
   const page = Math.min(wanted.page, pages);
   const onPage = ranked.slice((page - 1) * PAGE_SIZE, page * PAGE_SIZE);

@@ -1,6 +1,7 @@
 import { colourWords, IEC_COLOURS } from "@/lib/units";
 import type { Kind } from "@/lib/diagnosis";
 import type { EntryData } from "./entry-data";
+import { foldPartNumber } from "./entry-coherence";
 import { pinsInOrder } from "./expect-of-entry";
 
 /** What a kind is called on screens and in print. */
@@ -11,7 +12,8 @@ const KIND_WORDS: Readonly<Record<Kind, string>> = {
   potentiometer: "potentiometer pot divider resistive", pwm: "pwm pulse duty powered", voltage: "voltage analogue powered",
 };
 
-const OUTPUT_WORDS = { "open-collector": "open-collector", "push-pull": "push-pull" } as const;
+/** True of every entry: typed beside what is meant ("brown wire"), they must not empty the list. */
+const EVERY_ENTRY = "three-wire device sensor wires connector cavity pins";
 
 const ascii = (text: string) => text.normalize("NFKD").toLowerCase().replace(/[\u0300-\u036f]/g, "");
 
@@ -41,11 +43,11 @@ export function searchTextOf(data: EntryData): string {
   const colours = pinsInOrder(data).map((pin) => pin.colour);
   const supply = data.supply.type === "fixed" ? `${data.supply.volts}v` : "battery";
   const texts = [
-    ...data.partNumbers, data.name, data.maker, data.senses, data.movement, KIND_WORDS[data.kind],
-    data.connector.name, data.connector.gender, supply, data.healthy.output ? OUTPUT_WORDS[data.healthy.output] : "",
+    ...data.partNumbers, ...data.partNumbers.map(foldPartNumber), data.name, data.maker, data.senses, data.movement, KIND_WORDS[data.kind],
+    data.connector.name, data.connector.gender, supply, data.healthy.output ?? "",
     ...colours, colours.join("/"), ...colours.map((code) => colourWords(code) ?? ""),
   ];
-  return [...new Set(texts.flatMap(foldWords))].join(" ");
+  return [...new Set([...texts, EVERY_ENTRY].flatMap(foldWords))].join(" ");
 }
 
 function isColour(piece: string): boolean {
