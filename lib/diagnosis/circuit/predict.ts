@@ -12,6 +12,7 @@ export const CHECK_INDEX: ReadonlyMap<string, number> = new Map(ALL_CHECKS.map((
 
 /** Groups of checks that hang on different parts of the machine, so that a fit computes only what it needs. */
 export const GROUP = { device: 1, cold: 2, live: 4, mated: 8, wires: 16 } as const;
+/** Every group at once. */
 export const ALL_GROUPS = 31;
 
 const GROUP_OF: Readonly<Record<CheckSpec["place"], number>> = { device: GROUP.device, harness: 0, wire: GROUP.wires, loose: GROUP.wires, mated: GROUP.mated, contact: GROUP.wires, battery: GROUP.live };
@@ -29,10 +30,12 @@ export interface Predictions {
   readonly slack: Float64Array;
   /** Log-chance that the device's electronics are in the state the candidate says. */
   logState: number;
+  /** True when the electronics do not run, so that junctions and leakage decide the volts. */
+  idle: boolean;
 }
 
 export function newPredictions(): Predictions {
-  return { value: new Float64Array(CHECK_COUNT), word: new Float64Array(CHECK_COUNT), jumps: new Float64Array(CHECK_COUNT), slack: new Float64Array(CHECK_COUNT), logState: 0 };
+  return { value: new Float64Array(CHECK_COUNT), word: new Float64Array(CHECK_COUNT), jumps: new Float64Array(CHECK_COUNT), slack: new Float64Array(CHECK_COUNT), logState: 0, idle: false };
 }
 
 const MAX_OHMS = 60e6;
@@ -44,21 +47,43 @@ const IDLE_SLACK = 0.03, IDLE_VOLTS = 0.02;
 const SEEN_VOLTS = 0.15;
 const TRIGGER_VOLTS = 0.8;
 
+const logistic = (z: number) => 1 / (1 + Math.exp(-z));
 const roles = new Int8Array(4);
 const here: Thevenin = { volts: 0, ohms: 0 }, there: Thevenin = { volts: 0, ohms: 0 };
 const mated = newMatedVolts();
-const byGroup = (group: number) => ALL_CHECKS.map((spec, index) => ({ spec, index, red: spec.red as number, black: spec.black as number })).filter((c) => CHECK_GROUP[c.index] === group);
-const DEVICE = byGroup(GROUP.device), COLD = byGroup(GROUP.cold), LIVE = byGroup(GROUP.live), MATED = byGroup(GROUP.mated), WIRES = byGroup(GROUP.wires);
 
-/** Fills `out` for the groups asked for. Pure but for `out`; the scratch memory is overwritten on every call. */
-export function predictInto(c: Candidate, x: Float64Array, groups: number, out: Predictions): void {
+interface Item { readonly spec: CheckSpec; readonly index: number; readonly red: number; readonly black: number; readonly full: number }
+const ITEMS: readonly Item[] = ALL_CHECKS.map((spec, index) => ({ spec, index, red: spec.red as number, black: spec.black as number, full: spec.position === "full" ? 1 : 0 }));
+
+/** Which checks to predict, sorted by the part of the machine they hang on. */
+export interface Plan {
+  readonly groups: number;
+  readonly device: readonly Item[];
+  readonly cold: readonly Item[];
+  readonly live: readonly Item[];
+  readonly mated: readonly Item[];
+  readonly wires: readonly Item[];
+}
+
+/** A plan for the checks of the given places in the vocabulary. */
+export function planFor(indices: readonly number[]): Plan {
+  const of = (group: number) => [...new Set(indices)].filter((i) => CHECK_GROUP[i] === group).map((i) => ITEMS[i]!);
+  const groups = indices.reduce((mask, i) => mask | CHECK_GROUP[i]!, 0);
+  return { groups, device: of(GROUP.device), cold: of(GROUP.cold), live: of(GROUP.live), mated: of(GROUP.mated), wires: of(GROUP.wires) };
+}
+
+/** The whole vocabulary. */
+export const WHOLE_PLAN = planFor(ITEMS.map((i) => i.index));
+
+/** Fills `out` for those checks of the plan that are in `groups`. Pure but for `out`; scratch memory is overwritten on every call. */
+export function predictInto(c: Candidate, x: Float64Array, plan: Plan, groups: number, out: Predictions): void {
   for (let role = 0; role < 3; role++) roles[c.pinOf[role]!] = role;
-  out.logState = 0;
-  if (groups & GROUP.device) for (const k of DEVICE) deviceCheck(c, x, k.index, roles[k.red]!, roles[k.black]!, k.spec.position === "full" ? 1 : 0, out);
-  if (groups & GROUP.cold) for (const k of COLD) setOhms(out, k.index, coldOhms(c, x, roles[k.red]!));
-  if (groups & GROUP.live) for (const k of LIVE) out.value[k.index] = liveVolts(c, x, k.spec);
-  if (groups & GROUP.mated) matedChecks(c, x, out);
-  if (groups & GROUP.wires) for (const k of WIRES) wireCheck(c, x, k.spec, k.index, out);
+  const wanted = groups & plan.groups;
+  if (wanted & GROUP.device) for (const k of plan.device) deviceCheck(c, x, k.index, roles[k.red]!, roles[k.black]!, k.full, out);
+  if (wanted & GROUP.cold) for (const k of plan.cold) setOhms(out, k.index, coldOhms(c, x, roles[k.red]!));
+  if (wanted & GROUP.live) for (const k of plan.live) out.value[k.index] = liveVolts(c, x, k.spec);
+  if (wanted & GROUP.mated) matedChecks(c, x, plan.mated, out);
+  if (wanted & GROUP.wires) for (const k of plan.wires) wireCheck(c, x, k.spec, k.index, out);
 }
 
 function deviceCheck(c: Candidate, x: Float64Array, index: number, red: number, black: number, position: number, out: Predictions): void {
@@ -68,7 +93,8 @@ function deviceCheck(c: Candidate, x: Float64Array, index: number, red: number, 
 
 function setOhms(out: Predictions, index: number, ohms: number): void {
   out.value[index] = ohms;
-  out.word[index] = ohms > 2 * MAX_OHMS ? 1 : 1 / (1 + Math.exp(-Math.log(ohms / MAX_OHMS) / 0.02));
+  if (ohms < 0.5 * MAX_OHMS) out.word[index] = 0;
+  else out.word[index] = ohms > 2 * MAX_OHMS ? 1 : logistic(Math.log(ohms / MAX_OHMS) / 0.02);
 }
 
 /** The partner of a cavity whose wire is shorted to another wire, or -1. */
@@ -110,15 +136,13 @@ function voltsBetween(c: Candidate, x: Float64Array, red: number, black: number)
   return loop === Infinity ? 0 : (here.volts - there.volts) * METER_OHMS / loop;
 }
 
-const logistic = (z: number) => 1 / (1 + Math.exp(-z));
-
-function matedChecks(c: Candidate, x: Float64Array, out: Predictions): void {
+function matedChecks(c: Candidate, x: Float64Array, items: readonly Item[], out: Predictions): void {
   solveMated(c, x, mated);
-  const idle = c.family !== "potentiometer" && mated.running === 0;
-  if (c.running === "yes") out.logState = Math.log(Math.max(mated.running, 1e-4));
-  for (const k of MATED) {
-    const role = roles[k.red]!, place = (k.spec.position === "full" ? 3 : 0) + role;
-    if (k.spec.meter === "dc-volts") { out.value[k.index] = mated.volts[place]!; out.word[k.index] = 0; out.slack[k.index] = idle ? IDLE_SLACK * Math.abs(mated.volts[place]!) + (Math.abs(mated.volts[place]!) > 0.03 ? IDLE_VOLTS : 0) : 0; }
+  out.idle = c.family !== "potentiometer" && mated.running === 0;
+  out.logState = c.running === "yes" ? Math.log(Math.max(mated.running, 1e-4)) : 0;
+  for (const k of items) {
+    const role = roles[k.red]!, place = 3 * k.full + role, volts = mated.volts[place]!;
+    if (k.spec.meter === "dc-volts") { out.value[k.index] = volts; out.slack[k.index] = out.idle && Math.abs(volts) > 0.03 ? IDLE_SLACK * Math.abs(volts) + IDLE_VOLTS : 0; }
     else if (k.spec.meter === "watch") watch(c, role, k.index, out);
     else pulseCheck(c, x, k.spec, k.index, place, out);
   }

@@ -30,6 +30,24 @@ function listFor(c: Candidate, groups: number): readonly number[] {
   return [...set].sort((a, b) => a - b);
 }
 
+const LINES = GROUP.live | GROUP.mated;
+const DEVICE_LINES = GROUP.device | GROUP.mated;
+
+/** Groups of checks that one unknown can move; `idle`: the electronics do not run, so what leaks and conducts decides. */
+export function reachOf(c: Candidate, parameter: number, idle: boolean): number {
+  switch (parameter) {
+    case P.battery: case P.supply: case P.supplySource: case P.rail: return LINES;
+    case P.supplyBleed: return c.code === "supply-missing" ? GROUP.cold | LINES : GROUP.cold;
+    case P.pull: return GROUP.cold | LINES;
+    case P.railOff: return GROUP.cold;
+    case P.fault: return GROUP.cold | LINES | GROUP.wires;
+    case P.batteryOff: return GROUP.cold | GROUP.wires;
+    case P.load: case P.driveLow: case P.high: case P.frequency: return GROUP.mated;
+    case P.rest: case P.full: return c.family === "potentiometer" ? DEVICE_LINES : GROUP.mated;
+    default: return c.family === "potentiometer" || idle ? DEVICE_LINES : GROUP.device;
+  }
+}
+
 function deviceUnknowns(c: Candidate): readonly number[] {
   if (c.family === "potentiometer") return [P.track, P.wiper, P.rest, P.full];
   return [P.internal, P.leak, P.dropSupply, P.dropSignal];

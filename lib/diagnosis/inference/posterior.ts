@@ -1,8 +1,8 @@
-import { CHECK_GROUP, GROUP } from "../circuit/predict";
 import type { Candidate } from "../circuit/candidate";
 import { PARAMETER_COUNT } from "../circuit/parameters";
+import { GROUP } from "../circuit/predict";
 import type { MeterSpec } from "../types";
-import { fitCandidate, type Fit } from "./fit";
+import { evidenceOf, fitCandidate, type Evidence, type Fit } from "./fit";
 import type { Observation } from "./observe";
 
 /** A candidate with its fit and its share of the belief. */
@@ -10,12 +10,25 @@ export interface Believed { readonly candidate: Candidate; readonly fit: Fit; re
 
 /** Candidates this far (in natural-log units) behind the best are left out: less than one in a million. */
 const CUT = 14;
-const GROUPS_APART = GROUP.cold | GROUP.live | GROUP.wires;
-
-interface Scored { candidate: Candidate; bound: number; start: Float64Array; device: Fit | null; harness: Fit | null }
-
-const maskOf = (obs: readonly Observation[]) => obs.reduce((mask, o) => mask | CHECK_GROUP[o.index]!, 0);
+const HARNESS = GROUP.cold | GROUP.live | GROUP.wires;
 const ZERO = new Float64Array(PARAMETER_COUNT);
+const NO_FIT: Fit = { logEvidence: 0, z: ZERO, active: [], precision: new Float64Array(0) };
+
+/** The readings by the part of the machine they speak of, and the most that each part could add to a fit. */
+interface Parts { readonly device: Evidence; readonly harness: Evidence; readonly all: Evidence; readonly harnessPeak: number; readonly matedPeak: number; readonly joint: boolean }
+
+const peakOf = (obs: readonly Observation[]) => obs.reduce((sum, o) => sum + (o.word === null ? o.logPeak : 0), 0);
+
+function partsOf(obs: readonly Observation[], meter: MeterSpec): Parts {
+  const harness = obs.filter((o) => o.group & HARNESS), mated = obs.filter((o) => o.group === GROUP.mated);
+  return {
+    device: evidenceOf(obs.filter((o) => o.group === GROUP.device), meter), harness: evidenceOf(harness, meter), all: evidenceOf(obs, meter),
+    harnessPeak: peakOf(harness), matedPeak: peakOf(mated), joint: mated.length > 0,
+  };
+}
+
+/** Candidates whose device, seen alone, is the same: one fit of the device readings serves them all. */
+interface Block { readonly device: Fit; readonly members: readonly Candidate[]; readonly bound: number }
 
 /**
  * Belief over all candidates. Device readings and harness readings have no unknown in common, so each is
@@ -24,27 +37,52 @@ const ZERO = new Float64Array(PARAMETER_COUNT);
  * everything jointly, best bound first.
  */
 export function believe(candidates: readonly Candidate[], obs: readonly Observation[], meter: MeterSpec): Believed[] {
-  const device = obs.filter((o) => o.group === GROUP.device), harness = obs.filter((o) => o.group & GROUPS_APART);
-  const mated = obs.filter((o) => o.group === GROUP.mated);
-  const scored = score(candidates, device, harness, mated, meter);
-  const believed = mated.length > 0 ? joint(scored, obs, meter) : apart(scored);
-  return normalise(believed);
+  const parts = partsOf(obs, meter), harnessFits = new Map<string, Fit>(), out: Believed[] = [];
+  let best = -Infinity;
+  for (const block of blocksOf(candidates, parts)) {
+    if (block.bound < best - CUT) break;
+    for (const b of blockBelief(block, parts, harnessFits, best)) { best = Math.max(best, b.logWeight); out.push(b); }
+  }
+  return normalise(out);
 }
 
-function score(candidates: readonly Candidate[], device: readonly Observation[], harness: readonly Observation[], mated: readonly Observation[], meter: MeterSpec): Scored[] {
-  const deviceFits = new Map<string, Fit>(), harnessFits = new Map<string, Fit>();
-  const best = mated.reduce((sum, o) => sum + (o.word === null ? o.logPeak : 0), 0);
-  return candidates.map((candidate) => {
-    const d = device.length === 0 ? null : shared(deviceFits, deviceKey(candidate), candidate, device, meter);
-    const h = harness.length === 0 ? null : shared(harnessFits, harnessKey(candidate), candidate, harness, meter);
-    const bound = candidate.logPrior + (d?.logEvidence ?? 0) + (h?.logEvidence ?? 0) + best;
-    return { candidate, bound, start: startOf(d, h), device: d, harness: h };
-  }).sort((a, b) => b.bound - a.bound || (a.candidate.hypothesis.id < b.candidate.hypothesis.id ? -1 : 1));
+function blocksOf(candidates: readonly Candidate[], parts: Parts): Block[] {
+  const byKey = new Map<string, Candidate[]>();
+  for (const c of candidates) {
+    const list = byKey.get(deviceKey(c));
+    if (list) list.push(c); else byKey.set(deviceKey(c), [c]);
+  }
+  const blocks = [...byKey.values()].map((members) => {
+    const device = parts.device.observations.length === 0 ? NO_FIT : fitCandidate(members[0]!, parts.device, ZERO);
+    const prior = members.reduce((most, c) => Math.max(most, c.logPrior), -Infinity);
+    return { device, members, bound: prior + device.logEvidence + parts.harnessPeak + parts.matedPeak };
+  });
+  return blocks.sort((a, b) => b.bound - a.bound || byId(a.members[0]!, b.members[0]!));
 }
 
-function shared(cache: Map<string, Fit>, key: string, c: Candidate, obs: readonly Observation[], meter: MeterSpec): Fit {
+function blockBelief(block: Block, parts: Parts, harnessFits: Map<string, Fit>, toBeat: number): Believed[] {
+  const scored = block.members.map((candidate) => {
+    const apart = candidate.logPrior + block.device.logEvidence + parts.matedPeak;
+    const harness = harnessFit(harnessFits, candidate, parts.harness, toBeat - apart);
+    return { candidate, harness, bound: apart + harness.logEvidence };
+  }).sort((a, b) => b.bound - a.bound || byId(a.candidate, b.candidate));
+  const out: Believed[] = [];
+  let best = toBeat;
+  for (const { candidate, harness, bound } of scored) {
+    if (bound < best - CUT) break;
+    const fit = parts.joint ? fitCandidate(candidate, parts.all, startOf(block.device, harness), best - candidate.logPrior) : together(block.device, harness);
+    const logWeight = candidate.logPrior + fit.logEvidence;
+    best = Math.max(best, logWeight);
+    out.push({ candidate, fit, logWeight, p: 0 });
+  }
+  return out;
+}
+
+function harnessFit(cache: Map<string, Fit>, c: Candidate, evidence: Evidence, toBeat: number): Fit {
+  if (evidence.observations.length === 0) return NO_FIT;
+  const key = harnessKey(c);
   let fit = cache.get(key);
-  if (!fit) cache.set(key, fit = bestStart(c, obs, maskOf(obs), meter, [ZERO]));
+  if (!fit) cache.set(key, fit = fitCandidate(c, evidence, ZERO, toBeat));
   return fit;
 }
 
@@ -52,51 +90,28 @@ const DEVICE_FAULTS = new Set(["wiper-open", "track-open"]);
 const deviceKey = (c: Candidate) => `${c.family}|${c.pinOf}|${DEVICE_FAULTS.has(c.code) ? c.code + c.breakEnd : ""}`;
 const HARNESS_SOUND = new Set(["none", "wiper-open", "track-open", "track-worn", "output-dead", "output-stuck-high", "output-stuck-low"]);
 const harnessKey = (c: Candidate) => `${c.family}|${c.pull}|${c.pinOf}|${HARNESS_SOUND.has(c.code) ? "" : `${c.code}${c.at}${c.at2}`}`;
+const byId = (a: Candidate, b: Candidate) => (a.hypothesis.id < b.hypothesis.id ? -1 : 1);
 
-function startOf(d: Fit | null, h: Fit | null): Float64Array {
+function startOf(...fits: readonly Fit[]): Float64Array {
   const z = new Float64Array(PARAMETER_COUNT);
-  for (const fit of [d, h]) if (fit) for (const p of fit.active) z[p] = fit.z[p]!;
+  for (const fit of fits) for (const p of fit.active) z[p] = fit.z[p]!;
   return z;
 }
 
-/** Fits from each start and keeps the best; the misfit of a fault's ohms may have more than one valley. */
-function bestStart(c: Candidate, obs: readonly Observation[], groups: number, meter: MeterSpec, starts: readonly Float64Array[]): Fit {
-  return starts.map((start) => fitCandidate(c, obs, groups, meter, start)).reduce((a, b) => (b.logEvidence > a.logEvidence ? b : a));
-}
-
-function joint(scored: readonly Scored[], obs: readonly Observation[], meter: MeterSpec): Believed[] {
-  const groups = maskOf(obs), out: Believed[] = [];
-  let best = -Infinity;
-  for (const s of scored) {
-    if (s.bound < best - CUT) break;
-    const fit = bestStart(s.candidate, obs, groups, meter, [s.start]);
-    const logWeight = s.candidate.logPrior + fit.logEvidence;
-    best = Math.max(best, logWeight);
-    out.push({ candidate: s.candidate, fit, logWeight, p: 0 });
-  }
-  return out;
-}
-
-function apart(scored: readonly Scored[]): Believed[] {
-  const best = scored[0]!.bound;
-  return scored.filter((s) => s.bound >= best - CUT).map((s) => ({ candidate: s.candidate, fit: together(s), logWeight: s.bound, p: 0 }));
-}
-
-/** One fit out of the two that were made apart: their unknowns do not overlap, so the precision is block-diagonal. */
-function together(s: Scored): Fit {
-  const parts = [s.device, s.harness].filter((f): f is Fit => f !== null);
-  const active = parts.flatMap((f) => f.active), m = active.length, precision = new Float64Array(m * m);
+/** One fit out of two that were made apart: their unknowns do not overlap, so the precision is block-diagonal. */
+function together(...fits: readonly Fit[]): Fit {
+  const active = fits.flatMap((f) => f.active), m = active.length, precision = new Float64Array(m * m);
   let offset = 0;
-  for (const f of parts) {
+  for (const f of fits) {
     const k = f.active.length;
     for (let i = 0; i < k; i++) for (let j = 0; j <= i; j++) precision[(offset + i) * m + offset + j] = f.precision[i * k + j]!;
     offset += k;
   }
-  return { logEvidence: parts.reduce((sum, f) => sum + f.logEvidence, 0), z: s.start, active, precision };
+  return { logEvidence: fits.reduce((sum, f) => sum + f.logEvidence, 0), z: startOf(...fits), active, precision };
 }
 
 function normalise(list: Believed[]): Believed[] {
-  list.sort((a, b) => b.logWeight - a.logWeight || (a.candidate.hypothesis.id < b.candidate.hypothesis.id ? -1 : 1));
+  list.sort((a, b) => b.logWeight - a.logWeight || byId(a.candidate, b.candidate));
   const best = list[0]!.logWeight;
   const kept = list.filter((b) => b.logWeight >= best - CUT);
   const total = kept.reduce((sum, b) => sum + Math.exp(b.logWeight - best), 0);
