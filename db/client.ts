@@ -78,6 +78,7 @@ function isBusy(error: unknown): boolean {
 }
 
 const RETRIES = 3;
+const PAUSE_MS = 100;
 
 /** One SQLITE_BUSY poisons the connection, so it is thrown away before the task runs again. */
 async function attempt<T>(own: Clients, task: (db: Database) => Promise<T>, left: number): Promise<T> {
@@ -87,6 +88,8 @@ async function attempt<T>(own: Clients, task: (db: Database) => Promise<T>, left
     return await task(own.writeDb);
   } catch (error) {
     if (left === 0 || !isBusy(error)) throw error;
+    // A pause of the event loop, not only of this promise: whoever holds the lock may be in this process.
+    await new Promise((resolve) => setTimeout(resolve, PAUSE_MS));
     await own.writer.reconnect();
     await setPragmas(own.writer);
     return attempt(own, task, left - 1);
