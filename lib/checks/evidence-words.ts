@@ -51,3 +51,11 @@ export const BEARING_WORDS: Readonly<Record<Bearing, string>> = {
   "against-finding": "speaks against the finding",
   "against-both": "fits neither: take it again",
 };
+
+/** Meter's limit of error at a reading, e.g. "± 0.029 V"; words have none. */
+export function limitWords(row: Pick<EvidenceRow, "check" | "value" | "limit">): string {
+  const unit = parseCheck(row.check)?.unit;
+  if (row.limit === null || !unit || unit === "word" || typeof row.value === "string") return "none: a word";
+  // Two digits of the limit itself; its own size stands in for its uncertainty.
+  return `\u00b1\u00a0${formatQuantity(row.limit, unit, { limit: row.limit / 9 })}`;
+}

@@ -1,9 +1,8 @@
 import type { Labels } from "@/lib/checks/check-name";
 import { checkName, readingWords } from "@/lib/checks/check-name";
-import { bearing, BEARING_WORDS, expectedWords, type Bearing } from "@/lib/checks/evidence-words";
+import { bearing, BEARING_WORDS, expectedWords, limitWords, type Bearing } from "@/lib/checks/evidence-words";
 import { ifFinding } from "@/lib/checks/finding-words";
-import { parseCheck, type EvidenceRow, type Fault } from "@/lib/diagnosis";
-import { formatQuantity } from "@/lib/units";
+import type { EvidenceRow, Fault } from "@/lib/diagnosis";
 
 const SHAPES: Readonly<Record<Bearing, string>> = {
   "fits-both": "M4 12H20", "against-sound": "M12 3 21 20H3Z", "against-finding": "M4 4H20V20H4Z", "against-both": "M5 5 19 19M19 5 5 19",
@@ -17,12 +16,6 @@ function BearingMark({ kind }: { kind: Bearing }) {
       {BEARING_WORDS[kind]}
     </span>
   );
-}
-
-function limitWords(row: EvidenceRow): string {
-  const unit = parseCheck(row.check)?.unit;
-  if (row.limit === null || !unit || unit === "word" || typeof row.value === "string") return "none, a word";
-  return `±\u00a0${formatQuantity(row.limit, unit, { limit: row.limit / 9 })}`;
 }
 
 interface Cell { readonly label: string; readonly text: React.ReactNode; readonly strong?: boolean }

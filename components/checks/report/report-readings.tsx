@@ -1,0 +1,60 @@
+import { checkName, readingWords } from "@/lib/checks/check-name";
+import type { CheckView } from "@/lib/checks/check-view";
+import { bearing, BEARING_WORDS, expectedWords, limitWords } from "@/lib/checks/evidence-words";
+import { ifFinding } from "@/lib/checks/finding-words";
+import { readingSteps, skipSteps } from "@/lib/checks/run-state";
+import type { SkipReason } from "@/lib/checks/run";
+import type { Verdict } from "@/lib/checks/verdict";
+
+const REASONS: Readonly<Record<SkipReason, string>> = {
+  "cannot-reach": "cannot be reached", "not-safe-here": "not safe here", "no-function-on-meter": "the meter has no such function",
+  "cannot-part-connector": "the connector cannot be parted", "cannot-move-actuator": "the actuator cannot be moved", other: "another reason",
+};
+
+const TH = "px-1.5 py-1 text-left align-bottom font-bold first:pl-0";
+const TD = "px-1.5 py-1.5 align-top first:pl-0";
+
+/** Readings in the order taken, with limits of error and what was expected. */
+export function ReportReadings({ check, verdict }: { readonly check: CheckView; readonly verdict: Verdict }) {
+  const labels = check.setup.cavityLabels;
+  const order = new Map(readingSteps(check.steps).map((step, index) => [step.check, index]));
+  const rows = [...verdict.evidence].sort((a, b) => (order.get(a.check) ?? 0) - (order.get(b.check) ?? 0));
+  const finding = verdict.evidenceFinding;
+  return (
+    <div role="region" aria-label="Readings and evidence" tabIndex={0} className="overflow-x-auto print:overflow-visible">
+      <table className="w-full min-w-[44rem] border-collapse print:min-w-0">
+        <thead>
+          <tr className="border-b-2 border-ink">
+            <th scope="col" className={TH}>Reading</th><th scope="col" className={TH}>Taken</th><th scope="col" className={TH}>Limit of error</th><th scope="col" className={TH}>If sound</th>
+            {finding ? <><th scope="col" className={TH}>If {ifFinding(finding, labels)}</th><th scope="col" className={TH}>Bearing</th></> : null}
+          </tr>
+        </thead>
+        <tbody>
+          {rows.map((row) => (
+            <tr key={row.check} className="break-inside-avoid border-b border-quiet">
+              <th scope="row" className={`${TD} text-left font-normal`}>{checkName(row.check, labels)}</th>
+              <td className={`${TD} font-mono font-bold`}>{readingWords(row.check, row.value, row.limit)}</td>
+              <td className={`${TD} font-mono`}>{limitWords(row)}</td>
+              <td className={`${TD} font-mono`}>{expectedWords(row.ifSound)}</td>
+              {finding ? <><td className={`${TD} font-mono`}>{expectedWords(row.ifFinding)}</td><td className={TD}>{BEARING_WORDS[bearing(row)]}</td></> : null}
+            </tr>
+          ))}
+        </tbody>
+      </table>
+    </div>
+  );
+}
+
+/** Checks that could not be made, with the reasons given; nothing when all asked for were made. */
+export function ReportSkips({ check }: { readonly check: CheckView }) {
+  const skips = skipSteps(check.steps);
+  if (skips.length === 0) return null;
+  return (
+    <>
+      <h3 className="mt-4 font-bold">Not taken</h3>
+      <ul className="list-disc pl-6">
+        {skips.map((step) => <li key={step.id}>{checkName(step.check, check.setup.cavityLabels)}: {REASONS[step.reason]}{step.note ? ` (${step.note})` : ""}.</li>)}
+      </ul>
+    </>
+  );
+}
