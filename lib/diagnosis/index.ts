@@ -2,3 +2,6 @@
 export * from "./types";
 export { parseCheck, vocabulary } from "./checks";
 export { DEFAULT_METER, meterLimit, standardUncertainty } from "./meter";
+export { assess } from "./assess";
+export { answerRequest, type Answer, type Refusal } from "./answer";
+export { faultText, whyText } from "./words";

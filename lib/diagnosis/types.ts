@@ -52,6 +52,8 @@ export interface Setup {
   readonly meter?: MeterSpec;
   /** Checks the technician cannot do here; never proposed. */
   readonly excluded?: readonly string[];
+  /** State of the machine now, where it is known; else it follows from the readings taken. */
+  readonly state?: { readonly deviceParted: boolean; readonly controllerParted: boolean; readonly powerOn: boolean };
 }
 
 /** Limit of error = percent of reading + a fixed part, as JCGM 100 4.3.7 takes a maker's limits. */

@@ -1,0 +1,61 @@
+import { ALL_CHECKS } from "./checks";
+import { CHECK_INDEX } from "./circuit/predict";
+import { candidatesForEntry, candidatesForUnknown } from "./inference/candidates";
+import { rankChecks } from "./inference/choose";
+import { contradictions, fitsBadly } from "./inference/contradiction";
+import { observe } from "./inference/observe";
+import { believe, type Believed } from "./inference/posterior";
+import { marginals, type Marginals } from "./inference/standing";
+import { DEFAULT_METER } from "./meter";
+import type { PlannedTest } from "./planning";
+import { ENTRY_IS_RIGHT } from "./priors";
+import type { Assessment, NextCheck, Reading, Setup } from "./types";
+import { validate } from "./validate";
+import { whyText } from "./words";
+
+/** Belief in a finding, a kind and pins at which the question counts as answered. */
+const SETTLED = 0.985;
+/** Bits per unit of effort below which a further check is not worth a technician's while. */
+const WORTH_WHILE = 0.012;
+const MOST_NEXT = 5;
+
+/** Belief over everything that may be true of the machine, likeliest first. */
+export function beliefs(setup: Setup, readings: readonly Reading[]): Believed[] {
+  const meter = setup.meter ?? DEFAULT_METER, observations = observe(readings, meter);
+  if (!setup.expect) return believe(candidatesForUnknown(), observations, meter);
+  const byEntry = believe(candidatesForEntry(setup.expect), observations, meter);
+  if (!fitsBadly(byEntry[0]!, observations, meter)) return byEntry;
+  // The entry cannot explain the readings: another device may be fitted, or its pins may differ.
+  const shifted = (list: ReturnType<typeof candidatesForEntry>, share: number) => list.map((c) => ({ ...c, logPrior: c.logPrior + Math.log(share) }));
+  return believe([...shifted(candidatesForEntry(setup.expect), ENTRY_IS_RIGHT), ...shifted(candidatesForUnknown(), 1 - ENTRY_IS_RIGHT)], observations, meter);
+}
+
+/**
+ * What the readings taken so far say of the device and its wiring, and which to take next.
+ * Readings in any order give the same belief; the proposed next check also depends on the state that the
+ * last one left the machine in. Method: Bayes' rule over circuit models whose unknowns are integrated over
+ * jointly; next check by expected information per effort with look-ahead.
+ */
+export function assess(setup: Setup, readings: readonly Reading[]): Assessment {
+  const problem = validate(setup, readings);
+  if (problem) return { state: "invalid-input", ...problem };
+  const meter = setup.meter ?? DEFAULT_METER, believed = beliefs(setup, readings), m = marginals(believed);
+  const ranked = rankChecks(setup, readings, believed, meter);
+  const answered = settled(m), worth = ranked.filter((r) => r.gainBits / r.effort >= WORTH_WHILE);
+  const done = answered || worth.length === 0;
+  const standing = {
+    ...m, done, inseparable: done && m.openFindings.length > 1 && worth.length === 0,
+    next: ranked.slice(0, MOST_NEXT).map((r) => nextCheck(r, setup)),
+  };
+  const suspects = contradictions(believed[0]!, readings, meter);
+  if (suspects.length > 0) return { state: "contradictory", suspects, ...standing };
+  return { state: readings.length === 0 ? "needs-reading" : "ranked", ...standing };
+}
+
+function settled(m: Marginals): boolean {
+  return m.faults[0]!.p >= SETTLED && m.kinds[0]!.p >= SETTLED && m.pins[0]!.p >= SETTLED;
+}
+
+function nextCheck(r: PlannedTest, setup: Setup): NextCheck {
+  return { check: r.test, why: whyText(ALL_CHECKS[CHECK_INDEX.get(r.test)!]!, setup.pins), gainBits: r.gainBits, effort: r.effort };
+}

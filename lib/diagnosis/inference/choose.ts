@@ -1,0 +1,55 @@
+import { ALL_CHECKS } from "../checks";
+import { CHECK_INDEX } from "../circuit/predict";
+import { rankTests, type PlannedTest } from "../planning";
+import type { MachineState, MeterSpec, Reading, Setup } from "../types";
+import { outcomeTable, type Expected } from "./outcomes";
+import { outlookOf } from "./outlook";
+import type { Believed } from "./posterior";
+
+/** Effort of parting or mating the device connector, the controller connector, and of switching the power; a reading counts 1. */
+export const TOGGLE_EFFORT = [2, 4, 1] as const;
+const READING_EFFORT = 1;
+
+/** Candidates and hypotheses looked into when a check is planned, and the belief that may be left out. */
+const MOST_CANDIDATES = 70, LEFT_OUT = 0.002;
+
+type Switches = readonly [boolean, boolean, boolean];
+
+/** State of the machine after the readings: mated and switched off at first. Index: device parted, controller parted, power on. */
+export function stateAfter(setup: Setup, readings: readonly Reading[]): Switches {
+  if (setup.state) return [setup.state.deviceParted, setup.state.controllerParted, setup.state.powerOn];
+  let state: Switches = [false, false, false];
+  for (const [check] of readings) {
+    const needs = switches(ALL_CHECKS[CHECK_INDEX.get(check)!]!.state);
+    state = state.map((now, i) => needs[i] ?? now) as unknown as Switches;
+  }
+  return state;
+}
+
+const switches = (s: MachineState): readonly (boolean | null)[] => [s.deviceParted, s.controllerParted, s.powerOn];
+
+/** The believed candidates as rows of hypotheses, likeliest first, with what each expects of every check. */
+export function expectations(believed: readonly Believed[], meter: MeterSpec): { expected: Expected[]; priors: number[]; ids: string[] } {
+  const rows = new Map<string, number>(), priors: number[] = [], expected: Expected[] = [];
+  let held = 0;
+  for (const b of believed) {
+    if (expected.length >= MOST_CANDIDATES || held > 1 - LEFT_OUT) break;
+    const id = b.candidate.hypothesis.id, row = rows.get(id) ?? priors.length;
+    rows.set(id, row);
+    priors[row] = (priors[row] ?? 0) + b.p;
+    expected.push({ p: b.p, row, outlook: outlookOf(b, meter) });
+    held += b.p;
+  }
+  return { expected, priors, ids: [...rows.keys()] };
+}
+
+/** Checks not yet taken and not excluded, best first by what they are expected to tell for their effort. */
+export function rankChecks(setup: Setup, readings: readonly Reading[], believed: readonly Believed[], meter: MeterSpec): PlannedTest[] {
+  const { expected, priors } = expectations(believed, meter);
+  if (priors.length < 2) return [];
+  const closed = new Set([...readings.map(([check]) => check), ...(setup.excluded ?? [])]);
+  const tests = ALL_CHECKS.flatMap((spec, index) => closed.has(spec.code) ? [] : [{
+    id: spec.code, cost: READING_EFFORT, needs: switches(spec.state), outcomes: outcomeTable(spec, index, expected, priors.length),
+  }]);
+  return rankTests({ priors, tests, state: stateAfter(setup, readings), toggleCosts: TOGGLE_EFFORT }, { lookAhead: 2, beam: 5 });
+}

@@ -1,0 +1,72 @@
+import { ALL_GROUPS, CHECK_COUNT, newPredictions, predictInto, WHOLE_PLAN, type Predictions } from "../circuit/predict";
+import { PARAMETER_COUNT } from "../circuit/parameters";
+import { ALL_CHECKS } from "../checks";
+import type { MeterSpec } from "../types";
+import { forward } from "./cholesky";
+import { physical } from "./fit";
+import { movedBy, reachOf } from "./movable";
+import { scaledSd, scalePrediction, unscale } from "./observe";
+import type { Believed } from "./posterior";
+
+/** What one candidate, fitted to the readings so far, expects of every check: a normal on the comparison scale, or a word. */
+export interface Outlook {
+  readonly mean: Float64Array;
+  readonly sd: Float64Array;
+  /** Chance of "OL", "none", "loose" or, for a sweep, "still"; and of "jumps". */
+  readonly word: Float64Array;
+  readonly jumps: Float64Array;
+}
+
+const DIFFERENCE = 1e-3;
+const at = newPredictions(), nudged = newPredictions();
+const x = new Float64Array(PARAMETER_COUNT);
+
+/** Expectation of every check under a fitted candidate, with what the fit leaves open and the meter's own error in the spread. */
+export function outlookOf(b: Believed, meter: MeterSpec): Outlook {
+  const { candidate: c, fit } = b;
+  at.logState = 0; at.idle = false;
+  predictInto(c, physical(c, fit.z, x), WHOLE_PLAN, ALL_GROUPS, at);
+  const variance = new Float64Array(CHECK_COUNT), mean = new Float64Array(CHECK_COUNT);
+  for (let i = 0; i < CHECK_COUNT; i++) mean[i] = numeric(at, i) ? scalePrediction(ALL_CHECKS[i]!, at.value[i]!, meter) : 0;
+  const derivatives = derivativesOf(b, meter, mean);
+  addKnown(b, derivatives, variance);
+  const sd = new Float64Array(CHECK_COUNT);
+  for (let i = 0; i < CHECK_COUNT; i++) {
+    if (numeric(at, i)) sd[i] = Math.sqrt(variance[i]! + at.slack[i]! ** 2 + scaledSd(ALL_CHECKS[i]!, unscale(ALL_CHECKS[i]!, mean[i]!), meter) ** 2);
+  }
+  return { mean, sd, word: Float64Array.from(at.word), jumps: Float64Array.from(at.jumps) };
+}
+
+/** Whether a number, rather than a word, is expected at all. */
+const numeric = (p: Predictions, i: number) => ALL_CHECKS[i]!.unit !== "word" && p.word[i]! < 0.999;
+
+interface Derivatives { readonly parameters: readonly number[]; readonly rows: readonly Float64Array[] }
+
+function derivativesOf(b: Believed, meter: MeterSpec, mean: Float64Array): Derivatives {
+  const { candidate: c, fit } = b, parameters = movedBy(c, ALL_GROUPS);
+  const idle = at.idle, rows = parameters.map((p) => {
+    const row = new Float64Array(CHECK_COUNT), kept = x[p]!, v = c.ranges.mean[p]! + c.ranges.sd[p]! * (fit.z[p]! + DIFFERENCE), reach = reachOf(c, p, idle);
+    x[p] = c.ranges.log[p] ? Math.exp(v) : v;
+    nudged.value.set(at.value);
+    predictInto(c, x, WHOLE_PLAN, reach, nudged);
+    x[p] = kept;
+    for (let i = 0; i < CHECK_COUNT; i++) if (numeric(at, i) && nudged.value[i] !== at.value[i]) row[i] = (scalePrediction(ALL_CHECKS[i]!, nudged.value[i]!, meter) - mean[i]!) / DIFFERENCE;
+    return row;
+  });
+  return { parameters, rows };
+}
+
+/** Adds the variance that the unknowns still carry: what the readings fixed jointly, and untouched unknowns at their full range. */
+function addKnown(b: Believed, d: Derivatives, variance: Float64Array): void {
+  const { active, precision } = b.fit, m = active.length;
+  const place = new Map(d.parameters.map((p, k) => [p, k])), untouched = d.parameters.filter((p) => !active.includes(p));
+  const joint = new Float64Array(m);
+  for (let i = 0; i < CHECK_COUNT; i++) {
+    let sum = 0;
+    for (const p of untouched) sum += d.rows[place.get(p)!]![i]! ** 2;
+    let any = false;
+    for (let k = 0; k < m; k++) { const row = place.get(active[k]!); joint[k] = row === undefined ? 0 : d.rows[row]![i]!; any ||= joint[k] !== 0; }
+    if (any) { forward(precision, m, joint); for (let k = 0; k < m; k++) sum += joint[k]! ** 2; }
+    variance[i] = sum;
+  }
+}
