@@ -3,9 +3,7 @@ import type { ConnectorShape } from "@/lib/catalogue/entry-data";
 import type { Role } from "@/lib/diagnosis";
 import { type Box, FLAG, faceBox, LATCH, type LeadLanes, leadLanes, placeCavities, type Side } from "./face-geometry";
 import { CavityMark, KeyingMark, Latch, Lead, LeadFlag, Outline } from "./face-parts";
-
-/** What a pin's tag says, everywhere in the product. */
-export const ROLE_TAG: Readonly<Record<Role, string>> = { supply: "+V", ground: "0V", signal: "SIG" };
+import { ROLE_TAG } from "./role-tag";
 
 export interface FacePin { readonly cavity: string; readonly role?: Role; readonly tag?: string }
 

@@ -3,7 +3,7 @@ import { KINDS } from "@/lib/diagnosis";
 import { FACETS, type Facet, type SearchInput } from "./schemas";
 import type { FacetGroup } from "./search-result";
 import type { SearchRow } from "./search-rows";
-import { KIND_NAMES } from "./words";
+import { KIND_NAMES } from "./kind-names";
 
 const TITLES: Readonly<Record<Facet, string>> = { kind: "Kind", quantity: "Senses", connector: "Connector", supply: "Supply", colour: "Wire colour" };
 

@@ -1,5 +1,6 @@
 import Fuse from "fuse.js";
-import { foldWords, KIND_NAMES } from "./words";
+import { KIND_NAMES } from "./kind-names";
+import { foldWords } from "./words";
 import type { SearchRow } from "./search-rows";
 
 /** So many are ranked; a query that fits more says too little to rank by, and names in order serve better. */

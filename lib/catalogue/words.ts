@@ -4,9 +4,6 @@ import type { EntryData } from "./entry-data";
 import { foldPartNumber } from "./entry-coherence";
 import { pinsInOrder } from "./expect-of-entry";
 
-/** What a kind is called on screens and in print. */
-export const KIND_NAMES: Readonly<Record<Kind, string>> = { potentiometer: "Potentiometer", pwm: "Powered PWM", voltage: "Powered voltage" };
-
 /** Other words people type for a kind. */
 const KIND_WORDS: Readonly<Record<Kind, string>> = {
   potentiometer: "potentiometer pot divider resistive", pwm: "pwm pulse duty powered", voltage: "voltage analogue powered",

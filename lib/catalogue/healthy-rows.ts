@@ -1,0 +1,53 @@
+import { formatQuantity } from "@/lib/units";
+import type { EntryData, RestFull } from "./entry-data";
+import { supplyWords } from "./supply-words";
+
+/** One healthy reading: what it is, its value, and how it is taken. */
+export interface HealthyRow { readonly name: string; readonly value: string; readonly how: string }
+
+const cavityOf = (data: EntryData, role: string) => data.pins.find((pin) => pin.role === role)?.cavity ?? "?";
+
+function spanRows(name: string, span: RestFull, words: (value: number) => string, how: string): HealthyRow[] {
+  return [{ name: `${name} at rest`, value: words(span.rest), how }, { name: `${name} at full travel`, value: words(span.full), how }];
+}
+
+function potentiometerRows(data: EntryData): HealthyRow[] {
+  const { totalOhms, tolerancePercent, wiperSeriesOhms, signalRatio } = data.healthy;
+  const [supply, ground, signal] = [cavityOf(data, "supply"), cavityOf(data, "ground"), cavityOf(data, "signal")];
+  const rows: HealthyRow[] = [];
+  if (totalOhms !== undefined) {
+    const share = (tolerancePercent ?? 0) / 100;
+    const limits = `${formatQuantity(totalOhms * (1 - share), "ohm")} to ${formatQuantity(totalOhms * (1 + share), "ohm")}`;
+    rows.push({ name: "Total resistance", value: `${formatQuantity(totalOhms, "ohm")} ± ${tolerancePercent ?? "?"}\u00a0% (${limits})`, how: `Ohms, ${supply} to ${ground}, connector parted` });
+  }
+  rows.push({
+    name: "In series with the wiper", value: wiperSeriesOhms ? formatQuantity(wiperSeriesOhms, "ohm") : "none stated",
+    how: `Ohms, ${supply} to ${signal} plus ${signal} to ${ground}, less the total, halved`,
+  });
+  const volts = (ratio: number) => (data.supply.type === "fixed" ? `, ${formatQuantity(ratio * data.supply.volts, "volt")}` : "");
+  if (signalRatio) rows.push(...spanRows("Signal", signalRatio, (ratio) => `${formatQuantity(ratio, "ratio")} of supply${volts(ratio)}`, `DC volts, ${signal} to ${ground}, mated, power on`));
+  return rows;
+}
+
+function pwmRows(data: EntryData): HealthyRow[] {
+  const { duty, frequencyHz, output, pullUpNeeded } = data.healthy;
+  const how = `${cavityOf(data, "signal")} to ${cavityOf(data, "ground")}, mated, power on`;
+  const kind = output === "open-collector" ? "Open collector" : "Push-pull";
+  return [
+    { name: "Output", value: `${kind}, ${pullUpNeeded ? "needs a pull-up" : "no pull-up needed"}`, how: pullUpNeeded ? "The pull-up is in the controller: no signal when parted" : "Drives both ways by itself" },
+    ...(frequencyHz === undefined ? [] : [{ name: "Frequency", value: formatQuantity(frequencyHz, "hertz"), how: `Hz, ${how}` }]),
+    ...(duty ? spanRows("Duty", duty, (value) => `${formatQuantity(value, "ratio")} high`, `Duty, ${how}`) : []),
+  ];
+}
+
+function voltageRows(data: EntryData): HealthyRow[] {
+  const how = `DC volts, ${cavityOf(data, "signal")} to ${cavityOf(data, "ground")}, mated, power on`;
+  return data.healthy.signalVolts ? spanRows("Signal", data.healthy.signalVolts, (value) => formatQuantity(value, "volt"), how) : [];
+}
+
+/** Readings of a healthy device with units, and between which cavities each is taken; supply first. */
+export function healthyRows(data: EntryData): readonly HealthyRow[] {
+  const supply: HealthyRow = { name: "Supply", value: supplyWords(data.supply), how: `DC volts, ${cavityOf(data, "supply")} to ${cavityOf(data, "ground")}, power on` };
+  const rows = { potentiometer: potentiometerRows, pwm: pwmRows, voltage: voltageRows }[data.kind](data);
+  return [supply, ...rows];
+}
