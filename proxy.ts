@@ -1,8 +1,10 @@
 import { NextResponse, type NextRequest } from "next/server";
-import { isOwnRequest } from "@/lib/auth/own-origin";
+import { assertActionBody } from "@/lib/auth/action-body";
+import { assertOwnRequest } from "@/lib/auth/own-origin";
 import { isHttps, SURFACE_HEADER, type Surface } from "@/lib/auth/request-facts";
 import { contentSecurityPolicy, securityHeaders } from "@/lib/auth/security-headers";
 import { env } from "@/lib/env";
+import { AppError, errorBody } from "@/lib/errors";
 
 const READS = new Set(["GET", "HEAD"]);
 
@@ -11,27 +13,24 @@ function surfaceOf(request: NextRequest): Surface {
   return READS.has(request.method) ? "page" : "action";
 }
 
-/** A page takes nothing but the forms and actions of its own. */
-function isActionCall(request: NextRequest): boolean {
-  if (request.method !== "POST") return false;
-  const type = request.headers.get("content-type") ?? "";
-  return request.headers.has("next-action") || type.startsWith("multipart/form-data");
+/** The answer to a request that goes no further; null when it may. */
+async function refusal(request: NextRequest, surface: Surface, https: boolean): Promise<NextResponse | null> {
+  try {
+    assertOwnRequest(request.method, request.headers);
+    if (surface === "action") await assertActionBody(request);
+    return null;
+  } catch (error) {
+    if (!(error instanceof AppError)) throw error;
+    return NextResponse.json({ error: errorBody(error) }, { status: error.status, headers: securityHeaders(https) });
+  }
 }
 
-function refuse(status: number, code: string, message: string, https: boolean): NextResponse {
-  return NextResponse.json({ error: { code, message } }, { status, headers: securityHeaders(https) });
-}
-
-/** Headers and the origin rule for everything. No boundary: every page, action and route authorises itself. */
-export function proxy(request: NextRequest): NextResponse {
+/** Headers, origin and form of everything that comes in. No boundary: every page, action and route authorises itself. */
+export async function proxy(request: NextRequest): Promise<NextResponse> {
   const https = isHttps(request.headers);
-  if (!isOwnRequest(request.method, request.headers)) {
-    return refuse(403, "foreign-origin", "This request did not come from a page of this workshop. Reload the page and try again.", https);
-  }
   const surface = surfaceOf(request);
-  if (surface === "action" && !isActionCall(request)) {
-    return refuse(405, "method-not-allowed", "This address only shows a page.", https);
-  }
+  const refused = await refusal(request, surface, https);
+  if (refused) return refused;
   const nonce = Buffer.from(crypto.randomUUID()).toString("base64");
   const policy = contentSecurityPolicy({ nonce, https, development: env().development });
   const forwarded = new Headers(request.headers);

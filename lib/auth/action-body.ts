@@ -1,0 +1,61 @@
+import { AppError } from "@/lib/errors";
+
+/** Largest body of a form or action, bytes; next.config.mjs has the same. */
+export const ACTION_LIMIT = 256 * 1024;
+
+const malformed = () => new AppError("malformed-form", "The form cannot be read. Reload the page and try again.", 400);
+
+/**
+ * Values that React's encoding may hold in what our own pages send: text (a leading $ is doubled), undefined,
+ * and a form ($K) whose fields are there. Everything else of that encoding makes the framework fail on decoding.
+ */
+function isPlain(value: unknown, form: FormData): boolean {
+  if (typeof value === "string" && value.startsWith("$") && !value.startsWith("$$") && value !== "$undefined") {
+    const id = /^\$K([0-9a-f]+)$/.exec(value)?.[1];
+    return id !== undefined && [...form.keys()].some((key) => key.startsWith(`${id}_`));
+  }
+  if (Array.isArray(value)) return value.every((item) => isPlain(item, form));
+  if (value !== null && typeof value === "object") return Object.values(value).every((item) => isPlain(item, form));
+  return true;
+}
+
+function parseJson(text: FormDataEntryValue | null): unknown {
+  if (typeof text !== "string") throw malformed();
+  try {
+    return JSON.parse(text) as unknown;
+  } catch {
+    throw malformed();
+  }
+}
+
+/** With JavaScript: field 0 holds the arguments, the form's own fields follow under a prefix. */
+function assertArguments(form: FormData): void {
+  const given = parseJson(form.get("0"));
+  if (!Array.isArray(given) || !isPlain(given, form)) throw malformed();
+}
+
+/** Without JavaScript: the page's hidden fields name the action and its bound state. */
+function assertHiddenFields(form: FormData): void {
+  for (const [key, value] of form.entries()) {
+    if (/^\$ACTION_\d+:\d+$/.test(key)) parseJson(value);
+  }
+}
+
+/**
+ * What a page takes is a form of its own, of a bearable size and well formed; checked before the framework
+ * decodes it, because what it cannot decode it answers with 500.
+ * @throws AppError method-not-allowed (405), length-required (411), body-too-large (413), malformed-form (400)
+ */
+export async function assertActionBody(request: Request): Promise<void> {
+  const type = request.headers.get("content-type") ?? "";
+  if (request.method !== "POST" || !type.startsWith("multipart/form-data")) throw new AppError("method-not-allowed", "This address only shows a page and takes its own forms.", 405);
+  const length = request.headers.get("content-length");
+  if (length === null) throw new AppError("length-required", "The request does not say how long it is.", 411);
+  if (Number(length) > ACTION_LIMIT) throw new AppError("body-too-large", "The form is larger than 256 KB.", 413);
+  const action = request.headers.get("next-action");
+  if (action !== null && !/^[0-9a-f]{42}$/.test(action)) throw malformed();
+  const form = await request.clone().formData().catch(() => null);
+  if (!form) throw malformed();
+  if (action !== null) assertArguments(form);
+  else assertHiddenFields(form);
+}
