@@ -1,5 +1,6 @@
 "use client";
 
+import type { KeyboardEventHandler, ReactNode, Ref } from "react";
 import { Button, ButtonLink, EmptyState, Notice } from "@/components/ui";
 import { chosenCount, type SearchChoice, toggled } from "@/lib/catalogue/search-params";
 import type { SearchResult } from "@/lib/catalogue/search-result";
@@ -32,6 +33,53 @@ function NothingFound({ choice, onClear }: { readonly choice: SearchChoice; read
   );
 }
 
+interface SearchFieldProps {
+  readonly q: string;
+  readonly ref: Ref<HTMLInputElement>;
+  readonly onKeyDown: KeyboardEventHandler;
+  readonly onText: (text: string) => void;
+}
+
+function SearchField({ q, ref, onKeyDown, onText }: SearchFieldProps) {
+  return (
+    <div className="lg:col-span-2">
+      <label htmlFor="catalogue-q" className="text-lg font-bold">Part number, name, wire colours or connector</label>
+      <div className="mt-1 flex gap-2">
+        <input
+          ref={ref} id="catalogue-q" name="q" type="search" value={q} maxLength={200} autoComplete="off" autoCapitalize="none" spellCheck={false} enterKeyHint="search"
+          aria-describedby="catalogue-keys" onKeyDown={onKeyDown} onChange={(event) => onText(event.target.value)} className="control min-h-14 text-xl"
+        />
+        <Button type="submit" tone="main" className="min-h-14!">Search</Button>
+      </div>
+      <p id="catalogue-keys" className="mt-1 text-quiet">As you remember it: “AMI 4-210”, “ladder angel”, “BN/BU/BK”. <span className="hidden md:inline">Keys: / to this field, arrows through the list, Enter opens.</span></p>
+    </div>
+  );
+}
+
+/** On a phone the facets open and close by a tick box of their own, so that they do without a script; on a desk they stand open. */
+function Narrowing({ filters, children }: { readonly filters: number; readonly children: ReactNode }) {
+  return (
+    <div>
+      <input type="checkbox" id="catalogue-narrow" className="peer sr-only lg:hidden" />
+      <label htmlFor="catalogue-narrow" className="tag-cut button button-plain min-h-touch w-full peer-focus-visible:outline-3 peer-focus-visible:outline-offset-3 peer-focus-visible:outline-bench lg:hidden">
+        Narrow down{filters > 0 ? ` (${filters} chosen)` : ""}
+      </label>
+      <div className="mt-4 hidden peer-checked:block lg:mt-0 lg:block">{children}</div>
+    </div>
+  );
+}
+
+function SearchFailed({ message, onRetry }: { readonly message: string; readonly onRetry: () => void }) {
+  return (
+    <div className="mb-4">
+      <Notice tone="stop" live="assertive" title="The search did not get through.">
+        <p>{message} What you see is the last answer.</p>
+        <Button className="mt-3" onClick={onRetry}>Try again</Button>
+      </Notice>
+    </div>
+  );
+}
+
 /** Search field, facets and results; a plain form until the script is there, search as you type from then on. */
 export function CatalogueSearch({ initial, initialChoice }: CatalogueSearchProps) {
   const { choice, setChoice, query, waiting } = useCatalogueSearch(initial, initialChoice);
@@ -45,41 +93,17 @@ export function CatalogueSearch({ initial, initialChoice }: CatalogueSearchProps
   };
   return (
     <form action="/catalogue" method="get" role="search" onSubmit={(event) => event.preventDefault()} className="grid gap-6 lg:grid-cols-[17rem_1fr] lg:gap-10">
-      <div className="lg:col-span-2">
-        <label htmlFor="catalogue-q" className="text-lg font-bold">Part number, name, wire colours or connector</label>
-        <div className="mt-1 flex gap-2">
-          <input
-            ref={field} id="catalogue-q" name="q" type="search" value={choice.q} maxLength={200} autoComplete="off" autoCapitalize="none" spellCheck={false} enterKeyHint="search"
-            aria-describedby="catalogue-keys" onKeyDown={onFieldKey} onChange={(event) => setChoice({ ...choice, q: event.target.value, page: 1 })}
-            className="control min-h-14 text-xl"
-          />
-          <Button type="submit" tone="main" className="min-h-14">Search</Button>
-        </div>
-        <p id="catalogue-keys" className="mt-1 text-quiet">As you remember it: “AMI 4-210”, “ladder angel”, “BN/BU/BK”. <span className="hidden md:inline">Keys: / to this field, arrows through the list, Enter opens.</span></p>
-      </div>
-      <div>
-        <input type="checkbox" id="catalogue-narrow" className="peer sr-only" />
-        <label htmlFor="catalogue-narrow" className="tag-cut button button-plain min-h-touch w-full peer-focus-visible:outline-3 peer-focus-visible:outline-offset-3 peer-focus-visible:outline-bench lg:hidden">
-          Narrow down{filters > 0 ? ` (${filters} chosen)` : ""}
-        </label>
-        <div className="mt-4 hidden peer-checked:block lg:mt-0 lg:block">
-          <FacetPanel groups={result.facets} isChosen={(facet, value) => choice[facet].includes(value)} onToggle={(facet, value) => setChoice(toggled(choice, facet, value))} />
-        </div>
-      </div>
+      <SearchField q={choice.q} ref={field} onKeyDown={onFieldKey} onText={(q) => setChoice({ ...choice, q, page: 1 })} />
+      <Narrowing filters={filters}>
+        <FacetPanel groups={result.facets} isChosen={(facet, value) => choice[facet].includes(value)} onToggle={(facet, value) => setChoice(toggled(choice, facet, value))} />
+      </Narrowing>
       <div className="min-w-0">
         <div className="mb-3 flex min-h-touch flex-wrap items-center justify-between gap-3">
           <h2 className="sr-only">Entries</h2>
           <ResultCount result={result} waiting={waiting} />
           {filters > 0 ? <Button onClick={clear}>Clear {filters === 1 ? "1 filter" : `${filters} filters`}</Button> : null}
         </div>
-        {query.isError ? (
-          <div className="mb-4">
-            <Notice tone="stop" live="assertive" title="The search did not get through.">
-              <p>{query.error.message} What you see is the last answer.</p>
-              <Button className="mt-3" onClick={() => query.refetch()}>Try again</Button>
-            </Notice>
-          </div>
-        ) : null}
+        {query.isError ? <SearchFailed message={query.error.message} onRetry={() => query.refetch()} /> : null}
         <ResultRemarks result={result} />
         {result.total === 0 && !waiting ? <NothingFound choice={choice} onClear={clear} /> : <ResultList hits={result.hits} busy={waiting} ref={list} onKeyDown={onListKey} />}
         <ResultPaging choice={choice} page={result.page} pages={result.pages} onPage={goTo} />

@@ -13,7 +13,7 @@ interface FacetPanelProps {
 /** One value to narrow down by: a tick box as wide as its words, 44 px high, with how many entries it leaves. */
 function Option({ group, option, chosen, onToggle }: { readonly group: FacetGroup; readonly option: FacetOption; readonly chosen: boolean; readonly onToggle: () => void }) {
   return (
-    <label className="flex min-h-touch cursor-pointer items-center gap-2 border-2 border-rule bg-sheet py-1 pr-3 pl-2 hover:bg-[var(--hover)] has-checked:bg-bench has-checked:font-bold has-checked:text-on-bench has-focus-visible:outline-3 has-focus-visible:outline-offset-3 has-focus-visible:outline-bench">
+    <label className="flex min-h-touch cursor-pointer items-center gap-2 border-2 border-rule bg-sheet py-1 pr-3 pl-2 lg:border-transparent lg:bg-transparent hover:bg-[var(--hover)] has-checked:border-bench has-checked:bg-bench has-checked:font-bold has-checked:text-on-bench lg:has-checked:border-bench lg:has-checked:bg-bench has-focus-visible:outline-3 has-focus-visible:outline-offset-3 has-focus-visible:outline-bench">
       <input type="checkbox" name={group.facet} value={option.value} checked={chosen} onChange={onToggle} className="size-5 shrink-0 accent-[var(--bench)]" />
       {group.facet === "colour" ? <WireSwatch letters={option.value} /> : null}
       <span>{option.label}</span>
@@ -29,7 +29,7 @@ export function FacetPanel({ groups, isChosen, onToggle }: FacetPanelProps) {
       {groups.filter((group) => group.options.length > 0).map((group) => (
         <fieldset key={group.facet}>
           <legend className="mb-2 text-lg font-bold">{group.title}</legend>
-          <div className="flex flex-wrap gap-2 lg:grid lg:grid-cols-1 lg:gap-1.5">
+          <div className="flex flex-wrap gap-2 lg:grid lg:grid-cols-1 lg:gap-0 lg:border-t-2 lg:border-rule lg:pt-1">
             {group.options.map((option) => (
               <Option key={option.value} group={group} option={option} chosen={isChosen(group.facet, option.value)} onToggle={() => onToggle(group.facet, option.value)} />
             ))}

@@ -11,9 +11,10 @@ export function PinStrip({ pins }: PinStripProps) {
   return (
     <ul aria-label="Pins by cavity" className="inline-flex border-2 border-rule bg-paper">
       {pins.map((pin) => (
-        <li key={pin.cavity} className="grid w-[4.75rem] justify-items-center border-r-2 border-rule py-1 last:border-r-0">
-          <span className="font-mono font-bold">
-            <span className="sr-only">Cavity </span>{pin.cavity} <span aria-hidden="true" className="font-normal text-quiet">·</span> {ROLE_TAG[pin.role]}<span className="sr-only"> {ROLE_WORDS[pin.role]}</span>
+        <li key={pin.cavity} className="grid w-[5.25rem] justify-items-center border-r-2 border-rule px-1 py-1 last:border-r-0">
+          <span className="inline-flex gap-2 font-mono">
+            <span><span className="sr-only">Cavity </span>{pin.cavity}</span>
+            <span className="font-bold">{ROLE_TAG[pin.role]}<span className="sr-only"> {ROLE_WORDS[pin.role]}</span></span>
           </span>
           <span className="inline-flex items-center gap-1.5 font-mono"><WireSwatch letters={pin.colour} />{pin.colour}</span>
         </li>

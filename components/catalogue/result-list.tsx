@@ -17,7 +17,7 @@ function ResultRow({ hit }: { readonly hit: SearchHit }) {
           <KindMark kind={hit.kind} />
           <span>{hit.senses}</span>
           <span className="whitespace-nowrap">{hit.supply}</span>
-          <span>{hit.connector}, {hit.gender}</span>
+          <span>{hit.connector} ({hit.gender})</span>
         </p>
       </div>
       <div><PinStrip pins={hit.pins} /></div>

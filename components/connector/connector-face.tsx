@@ -1,7 +1,7 @@
 import { useId } from "react";
 import type { ConnectorShape } from "@/lib/catalogue/entry-data";
 import type { Role } from "@/lib/diagnosis";
-import { type Box, FLAG, faceBox, LATCH, type LeadLanes, leadLanes, placeCavities, type Side } from "./face-geometry";
+import { type Box, FLAG, faceBox, LATCH, type LeadLanes, leadLanes, type PlacedCavity, placeCavities, type Side } from "./face-geometry";
 import { CavityMark, KeyingMark, Latch, Lead, LeadFlag, Outline } from "./face-parts";
 import { ROLE_TAG } from "./role-tag";
 
@@ -70,12 +70,28 @@ function AwayLeads({ leads, view }: { leads: FaceLeads; view: Box }) {
   });
 }
 
+type CavitiesProps = ConnectorFaceProps & { placed: readonly PlacedCavity[]; lanes: LeadLanes };
+
+function Cavities({ shape, pins, leads = {}, highlight = [], placed, lanes }: CavitiesProps) {
+  const touched = new Set([leads.red, leads.black, ...highlight]);
+  const fromBelow = (label: string) => (["red", "black"] as const).some((c) => leads[c] === label && lanes[c]?.side === "bottom");
+  return placed.map((cavity) => {
+    const pin = pins?.find((p) => p.cavity === cavity.label);
+    return (
+      <CavityMark
+        key={cavity.label} cavity={cavity} gender={shape.gender} used={!pins || Boolean(pin)} marked={touched.has(cavity.label)}
+        tag={pin?.tag ?? (pin?.role && ROLE_TAG[pin.role])} tagAside={fromBelow(cavity.label)}
+      />
+    );
+  });
+}
+
 /**
  * A connector's face, drawn from its data as seen from the mating side: cavities with labels and pin tags, keying, latch,
  * and where the red and the black lead go. Pure SVG, no script; text is 16 px or more at natural size.
  */
 export function ConnectorFace(props: ConnectorFaceProps) {
-  const { shape, pins, leads = {}, highlight = [], size, labelledBy } = props;
+  const { shape, leads = {}, size, labelledBy } = props;
   const id = useId();
   const placed = placeCavities(shape);
   const box = faceBox(shape, placed);
@@ -83,8 +99,6 @@ export function ConnectorFace(props: ConnectorFaceProps) {
   const away = [leads.red ? undefined : leads.redAway, leads.black ? undefined : leads.blackAway].filter((text) => text !== undefined);
   const view = viewBox(shape, box, lanes, away);
   const width = view.right - view.left;
-  const touched = new Set([leads.red, leads.black, ...highlight]);
-  const fromBelow = (label: string) => (["red", "black"] as const).some((c) => leads[c] === label && lanes[c]?.side === "bottom");
   return (
     <figure className="m-0">
       <svg
@@ -97,15 +111,7 @@ export function ConnectorFace(props: ConnectorFaceProps) {
         <Outline shape={shape} box={box} className="fill-sheet stroke-ink [stroke-width:4]" />
         {shape.gender === "receptacle" && <Outline shape={shape} box={box} inset={9} className="fill-none stroke-ink [stroke-width:2]" />}
         {shape.keying.map((mark) => <KeyingMark key={`${mark.side}${mark.at}`} shape={shape} box={box} mark={mark} />)}
-        {placed.map((cavity) => {
-          const pin = pins?.find((p) => p.cavity === cavity.label);
-          return (
-            <CavityMark
-              key={cavity.label} cavity={cavity} gender={shape.gender} used={!pins || Boolean(pin)} marked={touched.has(cavity.label)}
-              tag={pin?.tag ?? (pin?.role && ROLE_TAG[pin.role])} tagAside={fromBelow(cavity.label)}
-            />
-          );
-        })}
+        <Cavities {...props} placed={placed} lanes={lanes} />
         {lanes.black && <Lead colour="black" lane={lanes.black} />}
         {lanes.red && <Lead colour="red" lane={lanes.red} />}
         <AwayLeads leads={leads} view={view} />

@@ -2,7 +2,7 @@ import type { ConnectorShape, Keying } from "@/lib/catalogue/entry-data";
 
 /** Drawing units; one unit is one CSS pixel at natural size, so text of 16 units is 16 px. */
 export const PITCH = 84;
-export const PAD = 58;
+export const PAD = 64;
 export const HOLE = 21;
 export const LATCH = { length: 84, depth: 26 } as const;
 export const FLAG = { width: 92, height: 34, gap: 34 } as const;

@@ -34,7 +34,7 @@ export function MachineRegister({ q, machines }: MachineRegisterProps) {
         <label htmlFor="machines-q" className="text-lg font-bold">Fleet number, name, type or site</label>
         <div className="mt-1 flex max-w-2xl gap-2">
           <input id="machines-q" name="q" type="search" defaultValue={q} maxLength={200} autoComplete="off" enterKeyHint="search" className="control min-h-14 text-xl" />
-          <Button type="submit" tone="main" className="min-h-14">Search</Button>
+          <Button type="submit" tone="main" className="min-h-14!">Search</Button>
         </div>
       </form>
       <p role="status" className="mb-3 text-lg font-bold">{machines.length === 1 ? "1 machine" : `${machines.length} machines`}{q.trim() ? ` for “${q.trim()}”` : ""}</p>

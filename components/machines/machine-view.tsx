@@ -37,10 +37,10 @@ function CheckRow({ check }: { readonly check: MachineCheck }) {
   );
 }
 
-function History({ machine, history, mayCheck }: MachineViewProps) {
+function History({ machine, history }: Omit<MachineViewProps, "mayCheck">) {
   if (history.newest.length === 0) {
     return (
-      <EmptyState title="No check on this machine yet." action={mayCheck ? <ButtonLink href={`/checks/new?machine=${machine.id}`} tone="main">Start a check here</ButtonLink> : undefined}>
+      <EmptyState title="No check on this machine yet.">
         Checks that name this machine are listed here, newest first.
       </EmptyState>
     );
@@ -60,12 +60,12 @@ export function MachineView({ machine, history, mayCheck }: MachineViewProps) {
       <p className="mb-2 print:hidden"><Link href="/machines" className="link inline-flex min-h-touch items-center">Back to the machines</Link></p>
       <PageHeading
         title={`${machine.fleetNumber} ${machine.name}`} lead={`${machine.type}, ${machine.site}`}
-        actions={mayCheck && machine.retiredAt === null ? <ButtonLink href={`/checks/new?machine=${machine.id}`} tone="main" className="min-h-14 text-lg">Start a check here</ButtonLink> : undefined}
+        actions={mayCheck && machine.retiredAt === null ? <ButtonLink href={`/checks/new?machine=${machine.id}`} tone="main" className="min-h-14! text-lg">Start a check here</ButtonLink> : undefined}
       />
       {machine.retiredAt ? <div className="mb-6"><Notice tone="plain" title="Retired">This machine is out of service. Its history is kept.</Notice></div> : null}
       <div className="grid items-start gap-6 lg:grid-cols-[1fr_1.4fr]">
         <Sheet title="Facts"><Facts machine={machine} /></Sheet>
-        <Sheet title="Checks"><History machine={machine} history={history} mayCheck={mayCheck} /></Sheet>
+        <Sheet title="Checks"><History machine={machine} history={history} /></Sheet>
       </div>
     </>
   );

@@ -18,20 +18,20 @@ function potentiometerRows(data: EntryData): HealthyRow[] {
   if (totalOhms !== undefined) {
     const share = (tolerancePercent ?? 0) / 100;
     const limits = `${formatQuantity(totalOhms * (1 - share), "ohm")} to ${formatQuantity(totalOhms * (1 + share), "ohm")}`;
-    rows.push({ name: "Total resistance", value: `${formatQuantity(totalOhms, "ohm")} ± ${tolerancePercent ?? "?"}\u00a0% (${limits})`, how: `Ohms, ${supply} to ${ground}, connector parted` });
+    rows.push({ name: "Total resistance", value: `${formatQuantity(totalOhms, "ohm")} ± ${tolerancePercent ?? "?"}\u00a0% (${limits})`, how: `Ohms between ${supply} and ${ground} of the device; connector parted, power off` });
   }
   rows.push({
     name: "In series with the wiper", value: wiperSeriesOhms ? formatQuantity(wiperSeriesOhms, "ohm") : "none stated",
-    how: `Ohms, ${supply} to ${signal} plus ${signal} to ${ground}, less the total, halved`,
+    how: `Ohms between ${supply} and ${signal}, plus ${signal} and ${ground}, less the total, halved; parted, power off`,
   });
   const volts = (ratio: number) => (data.supply.type === "fixed" ? `, ${formatQuantity(ratio * data.supply.volts, "volt")}` : "");
-  if (signalRatio) rows.push(...spanRows("Signal", signalRatio, (ratio) => `${formatQuantity(ratio, "ratio")} of supply${volts(ratio)}`, `DC volts, ${signal} to ${ground}, mated, power on`));
+  if (signalRatio) rows.push(...spanRows("Signal", signalRatio, (ratio) => `${formatQuantity(ratio, "ratio")} of supply${volts(ratio)}`, `DC volts, red lead on ${signal}, black on ${ground}; mated, power on`));
   return rows;
 }
 
 function pwmRows(data: EntryData): HealthyRow[] {
   const { duty, frequencyHz, output, pullUpNeeded } = data.healthy;
-  const how = `${cavityOf(data, "signal")} to ${cavityOf(data, "ground")}, mated, power on`;
+  const how = `red lead on ${cavityOf(data, "signal")}, black on ${cavityOf(data, "ground")}; mated, power on`;
   const kind = output === "open-collector" ? "Open collector" : "Push-pull";
   return [
     { name: "Output", value: `${kind}, ${pullUpNeeded ? "needs a pull-up" : "no pull-up needed"}`, how: pullUpNeeded ? "The pull-up is in the controller: no signal when parted" : "Drives both ways by itself" },
@@ -41,13 +41,13 @@ function pwmRows(data: EntryData): HealthyRow[] {
 }
 
 function voltageRows(data: EntryData): HealthyRow[] {
-  const how = `DC volts, ${cavityOf(data, "signal")} to ${cavityOf(data, "ground")}, mated, power on`;
+  const how = `DC volts, red lead on ${cavityOf(data, "signal")}, black on ${cavityOf(data, "ground")}; mated, power on`;
   return data.healthy.signalVolts ? spanRows("Signal", data.healthy.signalVolts, (value) => formatQuantity(value, "volt"), how) : [];
 }
 
 /** Readings of a healthy device with units, and between which cavities each is taken; supply first. */
 export function healthyRows(data: EntryData): readonly HealthyRow[] {
-  const supply: HealthyRow = { name: "Supply", value: supplyWords(data.supply), how: `DC volts, ${cavityOf(data, "supply")} to ${cavityOf(data, "ground")}, power on` };
+  const supply: HealthyRow = { name: "Supply", value: supplyWords(data.supply), how: `DC volts, red lead on ${cavityOf(data, "supply")}, black on ${cavityOf(data, "ground")}; power on` };
   const rows = { potentiometer: potentiometerRows, pwm: pwmRows, voltage: voltageRows }[data.kind](data);
   return [supply, ...rows];
 }

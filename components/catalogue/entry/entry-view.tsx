@@ -27,8 +27,8 @@ function EntryHead({ entry, mayCheck }: EntryViewProps) {
           <p className="mt-1 text-quiet">{data.movement}.</p>
         </div>
         <div className="flex flex-wrap gap-3 print:hidden">
-          {mayCheck ? <ButtonLink href={`/checks/new?entry=${slug}`} tone="main" className="min-h-14 text-lg">Start a check</ButtonLink> : null}
-          <ButtonLink href={`/checks?entry=${entry.id}`} className="min-h-14">Checks on this entry</ButtonLink>
+          {mayCheck ? <ButtonLink href={`/checks/new?entry=${slug}`} tone="main" className="min-h-14! text-lg">Start a check</ButtonLink> : null}
+          <ButtonLink href={`/checks?entry=${entry.id}`} className="min-h-14!">Checks on this entry</ButtonLink>
         </div>
       </div>
     </header>
@@ -69,8 +69,7 @@ export function EntryView({ entry, mayCheck }: EntryViewProps) {
         <div className="lg:col-span-2"><Cautions cautions={data.cautions} /></div>
         <Sheet title="Healthy readings" className="lg:col-span-2"><HealthyReadings data={data} /></Sheet>
         <Sheet title="Signal and value" className="lg:col-span-2">
-          <ValueConverter table={data.transfer} />
-          <div className="mt-6 max-w-md"><TransferPoints table={data.transfer} /></div>
+          <ValueConverter table={data.transfer}><TransferPoints table={data.transfer} /></ValueConverter>
         </Sheet>
         <Sheet title="Where this comes from" className="lg:col-span-2"><EntryProvenance entry={entry} /></Sheet>
       </div>

@@ -4,7 +4,7 @@ import { tableSpan } from "@/lib/catalogue/transfer";
 import { formatQuantity } from "@/lib/units";
 
 const VIEW = { width: 358, height: 300 } as const;
-const PLOT = { left: 66, right: 346, top: 34, bottom: 244 } as const;
+const PLOT = { left: 66, right: 336, top: 34, bottom: 244 } as const;
 
 /** Tick numbers stand without their unit; the axis' title names it once. */
 function tickText(value: number, unit: string): string {

@@ -1,6 +1,3 @@
-import { mkdtempSync, rmSync } from "node:fs";
-import { tmpdir } from "node:os";
-import path from "node:path";
 import { closeDatabase, readDb, write, type Database } from "@/db/client";
 import { migrateDatabase } from "@/db/migrate";
 import { entries, entryVersions, people } from "@/db/schema";
@@ -11,7 +8,8 @@ import { versionColumns } from "../version-row";
 
 /**
  * Times the search on the demo catalogue and on 5,000 synthetic entries and prints the figures:
- *   npx tsx --conditions=react-server lib/catalogue/benchmark/search-benchmark.ts
+ *   DATABASE_URL=file:./data/search-benchmark.db npx tsx --conditions=react-server lib/catalogue/benchmark/search-benchmark.ts
+ * The database must be new: it is filled here, and refused when there is anything in it.
  * With --each every query's best time as well. Not a test: a busy machine must not turn it red.
  */
 const QUERIES = [
@@ -58,9 +56,8 @@ async function measure(title: string): Promise<void> {
   process.stdout.write(`${title}: ${times.length} queries, median ${at(0.5)} ms, p95 ${at(0.95)} ms, slowest ${slowest?.ms.toFixed(1)} ms ("${slowest?.q}")\n`);
 }
 
-const folder = mkdtempSync(path.join(tmpdir(), "search-benchmark-"));
-process.env.DATABASE_URL = `file:${path.join(folder, "bench.db")}`;
 await migrateDatabase();
+if ((await readDb().$count(people)) > 0) throw new Error("DATABASE_URL must name a new database.");
 await write(async (db) => {
   await db.insert(people).values({ id: "bench", email: "bench@canal-workshop.example", name: "Bench", passwordHash: "-", roles: [], createdAt: new Date(0) });
   await fill(db, seedEntries().length, 0);
@@ -69,4 +66,3 @@ await measure(`${seedEntries().length} entries`);
 await write((db) => fill(db, 5000, seedEntries().length));
 await measure("5,000 entries");
 await closeDatabase();
-rmSync(folder, { recursive: true });
