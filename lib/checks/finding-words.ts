@@ -1,4 +1,4 @@
-import type { Fault, FaultCode, Kind, PinAssignment, PinNumber, Role } from "@/lib/diagnosis";
+import { faultText, type Fault, type FaultCode, type Kind, type PinAssignment, type PinNumber, type Role } from "@/lib/diagnosis";
 import type { Labels } from "./check-name";
 
 /** Findings in a few words, for lists, filters and headings. */
@@ -80,16 +80,13 @@ export function findingClause(fault: Fault, labels: Labels, pins: PinAssignment 
   return places.length === 0 ? clause.noPlace : clause.one.replace("{at}", placeWords(places, labels, pins));
 }
 
-/** A finding with its place for headings and lists, e.g. "Open wire, cavity B". */
+/** A finding with its place for headings and lists, in the engine's words, e.g. "Wire to B open". */
 export function findingHeading(fault: Fault, labels: Labels): string {
-  const places = fault.pins ?? [];
-  if (places.length === 0) return FINDING_TITLES[fault.code];
-  return `${FINDING_TITLES[fault.code]}, ${places.length === 1 ? "cavity" : "cavities"} ${placeWords(places, labels, null)}`;
+  const words = faultText(fault, labels);
+  return words.charAt(0).toUpperCase() + words.slice(1);
 }
 
-/** The same after "if": "open wire, cavity B", "all is sound". */
+/** The same after "if": "wire to B open", "all is sound". */
 export function ifFinding(fault: Fault, labels: Labels): string {
-  if (fault.code === "none") return "all is sound";
-  const heading = findingHeading(fault, labels);
-  return heading.charAt(0).toLowerCase() + heading.slice(1);
+  return fault.code === "none" ? "all is sound" : faultText(fault, labels);
 }

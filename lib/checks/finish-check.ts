@@ -12,14 +12,9 @@ import { judge } from "./judge";
 import { finishCheckSchema } from "./schemas";
 import { standingDifference } from "./standing-difference";
 import type { Verdict } from "./verdict";
+import { verdictColumns } from "./verdict-columns";
 
 export interface Finished { readonly id: string; readonly verdict: Verdict }
-
-/** The columns that a verdict fills, for the log's filters. */
-export function verdictColumns(verdict: Verdict) {
-  const [finding] = verdict.faults;
-  return { verdict, sentence: verdict.sentence, kind: verdict.kinds[0]?.kind ?? null, findingCode: finding?.code ?? null, findingChance: finding?.p ?? null };
-}
 
 /** A difference is a defect of ours, not of the technician's: it is logged and kept, and the server's answer stands. */
 async function recordDifference(tx: Writer, person: Person, checkId: string, parts: readonly string[], now: Date): Promise<void> {

@@ -17,8 +17,8 @@ export interface DemoCheck {
   readonly recheckOf?: number;
   /** Stopped after so many readings, although more would have told more. */
   readonly stoppedAfter?: number;
-  /** A reading keyed in with its point one place too far right, by its place in the run. */
-  readonly slipAt?: number;
+  /** One number was keyed in with its point one place too far right: the readings contradict each other. */
+  readonly slipped?: true;
   readonly running?: true;
   readonly note?: string;
 }
@@ -40,15 +40,15 @@ export const DEMO_CHECKS: readonly DemoCheck[] = [
   { number: 12, person: "tilda", machine: "B-09", device: "throttle-lever-winch-tug", known: false, fault: { code: "pull-missing" }, at: "2026-10-14T07:25:00Z" },
   { number: 13, person: "joram", machine: "W-12", device: "rudder-angle-sensor-35", known: true, fault: { code: "short-to-ground", pins: [3] }, at: "2026-10-16T13:05:00Z" },
   { number: 14, person: "wim", machine: "W-14", device: "loading-conveyor-height", known: true, fault: { code: "wiper-open" }, at: "2026-10-19T08:35:00Z" },
-  { number: 15, person: "edda", machine: "T-05", device: "bank-mower-head-inclination", known: true, fault: { code: "wires-swapped", pins: [2, 3] }, at: "2026-10-21T10:10:00Z", note: "Head was rewired last week." },
+  { number: 15, person: "edda", machine: "T-05", device: "bank-mower-tilt-sensor-250", known: true, fault: { code: "wires-swapped", pins: [2, 3] }, at: "2026-10-21T10:10:00Z", note: "Head was rewired last week." },
   { number: 16, person: "tilda", machine: "D-01", device: "throttle-lever-dredger-pump", known: true, fault: { code: "output-dead" }, at: "2026-10-23T06:50:00Z" },
   { number: 17, person: "tomas", machine: "L-31", device: "gate-paddle-position", known: false, fault: none, at: "2026-10-27T09:20:00Z", note: "Shown to the new starters." },
   { number: 18, person: "tilda", machine: "W-14", device: "chain-tension-sensor", known: true, fault: { code: "wire-open", pins: [3] }, at: "2026-10-29T12:45:00Z" },
   { number: 19, person: "edda", machine: "B-09", device: "rope-tension-sensor-20", known: false, fault: { code: "short-to-battery", pins: [2] }, at: "2026-11-03T08:30:00Z" },
   { number: 20, person: "wim", machine: "D-02", device: "slew-angle-sensor-excavator", known: true, fault: none, at: "2026-11-06T07:15:00Z" },
   { number: 21, person: "tomas", machine: "L-32", device: "gate-paddle-position", known: true, fault: { code: "wires-shorted", pins: [2, 3] }, at: "2026-11-10T13:30:00Z" },
-  { number: 22, person: "joram", machine: "W-11", device: "throttle-lever-weed-cutting", known: true, fault: { code: "wire-open", pins: [1] }, at: "2026-11-13T15:10:00Z", stoppedAfter: 3, note: "Called away to the lock." },
-  { number: 23, person: "tilda", machine: "T-05", device: "accelerator-pedal", known: true, fault: none, at: "2026-11-18T09:00:00Z", slipAt: 1 },
+  { number: 22, person: "joram", machine: "W-11", device: "throttle-lever-weed-cutting", known: true, fault: { code: "wire-open", pins: [1] }, at: "2026-11-13T15:10:00Z", stoppedAfter: 1, note: "Called away to the lock." },
+  { number: 23, person: "tilda", machine: "T-05", device: "accelerator-pedal", known: true, fault: none, at: "2026-11-18T09:00:00Z", slipped: true },
   { number: 24, person: "wim", machine: null, device: "brake-air-pressure-sensor", known: false, fault: none, at: "2026-11-20T10:40:00Z", note: "Found in the stores without a label." },
   { number: 25, person: "tilda", machine: "W-12", device: "auxiliary-lever-cutter", known: false, fault: none, at: "2026-11-27T08:05:00Z", stoppedAfter: 4, running: true },
   { number: 26, person: "wim", machine: "D-01", device: "ladder-winch-rope-length", known: true, fault: { code: "wire-open", pins: [3] }, at: "2026-11-30T09:50:00Z", stoppedAfter: 2, running: true },
