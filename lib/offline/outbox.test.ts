@@ -10,7 +10,7 @@ const step = (id: string, runId: string): StepRecord => ({
 });
 
 function memoryStore(runs: RunRecord[], steps: StepRecord[]): RunStore & { runs: RunRecord[]; steps: StepRecord[] } {
-  const waiting = (r: RunRecord) => !r.started || r.finish === "asked" || steps.some((s) => s.runId === r.id && !s.sent);
+  const waiting = (r: RunRecord) => !r.started || r.finish === "asked" || r.finish === "abandon" || steps.some((s) => s.runId === r.id && !s.sent);
   return {
     runs, steps,
     unsentRuns: async (personId) => runs.filter((r) => r.personId === personId && waiting(r)),
@@ -35,6 +35,14 @@ describe("flush", () => {
     expect(asked).toEqual(["/api/checks", "/api/checks/r1/steps", "/api/checks/r1/finish"]);
     expect(await flush(store, send, "p1")).toBe("clear");
     expect(asked).toHaveLength(3);
+  });
+
+  it("gives a run up on the server without asking for a verdict", async () => {
+    const store = memoryStore([run("r1", { started: true, finish: "abandon" })], []);
+    const { asked, send } = server(ok);
+    await flush(store, send, "p1");
+    expect(asked).toEqual(["/api/checks/r1/abandon"]);
+    expect(store.runs[0]?.finish).toBe("done");
   });
 
   it("keeps everything while the server is silent and sends it when it answers", async () => {

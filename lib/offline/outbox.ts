@@ -21,7 +21,13 @@ async function sendSteps(store: RunStore, send: Send, run: RunRecord): Promise<S
   }
 }
 
-/** Start, steps, finish: in that order, each marked only after the server's answer, so that a replay does no harm. */
+/** The verdict asked for, or giving the run up. */
+async function sendEnd(send: Send, run: RunRecord): Promise<SendResult> {
+  if (run.finish === "abandon") return send(`/api/checks/${run.id}/abandon`, {});
+  return send(`/api/checks/${run.id}/finish`, run.standing ? { standing: run.standing } : {});
+}
+
+/** Start, steps, end: in that order, each marked only after the server's answer, so that a replay does no harm. */
 async function sendRun(store: RunStore, send: Send, run: RunRecord): Promise<SendResult> {
   if (!run.started) {
     const started = await send("/api/checks", { id: run.id, setup: run.setup, startedAt: run.startedAt });
@@ -29,10 +35,10 @@ async function sendRun(store: RunStore, send: Send, run: RunRecord): Promise<Sen
     await store.updateRun(run.id, { started: true });
   }
   const steps = await sendSteps(store, send, run);
-  if (steps.type !== "ok" || run.finish !== "asked") return steps;
-  const finished = await send(`/api/checks/${run.id}/finish`, run.standing ? { standing: run.standing } : {});
-  if (finished.type === "ok") await store.updateRun(run.id, { finish: "done" });
-  return finished;
+  if (steps.type !== "ok" || run.finish === "no" || run.finish === "done") return steps;
+  const ended = await sendEnd(send, run);
+  if (ended.type === "ok") await store.updateRun(run.id, { finish: "done" });
+  return ended;
 }
 
 /**

@@ -1,5 +1,8 @@
 import type { RunSetup, RunStep } from "@/lib/checks/run";
-import type { Standing } from "@/lib/diagnosis";
+import type { Assessment, Standing } from "@/lib/diagnosis";
+
+/** The parts of a standing that decide a verdict. */
+export type PhoneStanding = Pick<Standing, "kinds" | "pins" | "faults" | "openFindings" | "done" | "inseparable"> & { readonly state: Assessment["state"] };
 
 /** A run as the phone keeps it, under the person who made it: signing out hides it, signing in shows it again. */
 export interface RunRecord {
@@ -10,9 +13,10 @@ export interface RunRecord {
   readonly startedAt: string;
   /** True once the server has answered that it knows the run. */
   readonly started: boolean;
-  readonly finish: "no" | "asked" | "done";
+  /** asked: a verdict is wanted; abandon: given up without one. Both wait for the server, then are done. */
+  readonly finish: "no" | "asked" | "abandon" | "done";
   /** What the phone believed when the verdict was asked for; the server compares it with its own. */
-  readonly standing?: Pick<Standing, "kinds" | "pins" | "faults">;
+  readonly standing?: PhoneStanding;
   /** A permanent refusal by the server; the run stays on the phone. */
   readonly refusal?: { readonly code: string; readonly message: string };
 }

@@ -5,6 +5,8 @@ import type { RunRecord, RunStore, StepRecord } from "./records";
 /** Strict: the promise settles only when the bytes are on the disk, so that a flat battery costs no reading. */
 const STRICT = { durability: "strict" } as const;
 
+const isEnding = (run: RunRecord): boolean => run.finish === "asked" || run.finish === "abandon";
+
 async function stepsOf(runId: string): Promise<readonly StepRecord[]> {
   return (await phoneDatabase()).getAllFromIndex("steps", "run", runId);
 }
@@ -43,11 +45,20 @@ export async function openRuns(personId: string): Promise<readonly RunRecord[]> 
   return runs.filter((run) => run.finish !== "done").sort((a, b) => (a.id < b.id ? 1 : -1));
 }
 
+/** What the server said of this person's runs: its sentence for each that it refused, and those it has ended. */
+export async function serverAnswers(personId: string): Promise<{ readonly refused: ReadonlyMap<string, string>; readonly ended: ReadonlySet<string> }> {
+  const runs = await (await phoneDatabase()).getAllFromIndex("runs", "person", personId);
+  return {
+    refused: new Map(runs.flatMap((run) => (run.refusal ? [[run.id, run.refusal.message] as const] : []))),
+    ended: new Set(runs.filter((run) => run.finish === "done").map((run) => run.id)),
+  };
+}
+
 /** Things still to be sent for this person: runs not started on the server, steps, and verdicts asked for. */
 export async function countUnsent(personId: string): Promise<number> {
   const runs = await phoneRunStore.unsentRuns(personId);
   const counts = await Promise.all(runs.map(async (run) =>
-    (run.started ? 0 : 1) + (run.finish === "asked" ? 1 : 0) + (await phoneRunStore.unsentSteps(run.id)).length));
+    (run.started ? 0 : 1) + (isEnding(run) ? 1 : 0) + (await phoneRunStore.unsentSteps(run.id)).length));
   return counts.reduce((sum, count) => sum + count, 0);
 }
 
@@ -56,7 +67,8 @@ export const phoneRunStore: RunStore = {
   async unsentRuns(personId) {
     const runs = await (await phoneDatabase()).getAllFromIndex("runs", "person", personId);
     const open = await Promise.all(runs.map(async (run) => {
-      const waiting = !run.started || run.finish === "asked" || (await phoneRunStore.unsentSteps(run.id)).length > 0;
+      if (run.finish === "done") return [];
+      const waiting = !run.started || isEnding(run) || (await phoneRunStore.unsentSteps(run.id)).length > 0;
       return waiting ? [run] : [];
     }));
     return open.flat().sort((a, b) => (a.id < b.id ? -1 : 1));

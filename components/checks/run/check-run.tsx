@@ -5,6 +5,7 @@ import type { Run } from "@/lib/checks/run";
 import { RunBoard } from "./run-board";
 import { useOutbox } from "./use-outbox";
 import { useRun } from "./use-run";
+import "./check-run.css";
 
 interface CheckRunProps {
   readonly id: string;
@@ -15,7 +16,7 @@ interface CheckRunProps {
 
 /** A running check by its id: from this phone, the server, or both. */
 export function CheckRun({ id, personId, known }: CheckRunProps) {
-  const { state, add, askFinish } = useRun(id, personId, known);
+  const { state, add, end } = useRun(id, personId, known);
   const outbox = useOutbox(personId);
   if (state.state === "loading") return <p className="py-10 text-lg">Opening the check &hellip;</p>;
   if (state.state === "missing") {
@@ -25,10 +26,11 @@ export function CheckRun({ id, personId, known }: CheckRunProps) {
       </EmptyState>
     );
   }
+  const refusal = outbox.refused.get(id);
   return (
-    <>
-      {state.record?.refusal && state.record.finish !== "asked" ? <Notice tone="stop" title="The server did not take this check">{state.record.refusal.message} It is kept on this phone and you can carry on reading.</Notice> : null}
-      <RunBoard personId={personId} run={state.run} record={state.record} kept={state.kept} outbox={outbox} add={add} askFinish={askFinish} />
-    </>
+    <div data-check-run>
+      {refusal && state.record?.finish === "no" ? <Notice tone="stop" title="The server did not take this check">{refusal} It is kept on this phone and you can carry on reading.</Notice> : null}
+      <RunBoard personId={personId} run={state.run} record={state.record} kept={state.kept} outbox={outbox} add={add} end={end} />
+    </div>
   );
 }

@@ -1,7 +1,7 @@
 "use client";
 
 import { vocabulary, type CheckSpec } from "@/lib/diagnosis";
-import { checkTitle, stateWords, type Labels } from "@/lib/checks/check-words";
+import { checkTitle, measuredWords, stateWords, type Labels } from "@/lib/checks/check-words";
 import { Dialog } from "./dialog";
 
 interface Group { readonly name: string; readonly specs: readonly CheckSpec[] }
@@ -13,6 +13,12 @@ function groups(specs: readonly CheckSpec[]): readonly Group[] {
     byState.set(name, [...(byState.get(name) ?? []), spec]);
   }
   return [...byState].map(([name, list]) => ({ name, specs: list }));
+}
+
+/** The checks of a group by what is measured. */
+function measures(specs: readonly CheckSpec[]): readonly (readonly [string, readonly CheckSpec[]])[] {
+  const names = [...new Set(specs.map(measuredWords))];
+  return names.map((name) => [name, specs.filter((spec) => measuredWords(spec) === name)] as const);
 }
 
 /** The marks a check carries in the list, in words. */
@@ -42,9 +48,14 @@ export function ChecksDialog({ open, labels, taken, excluded, onClose, onChoose 
             <span aria-hidden="true" className="font-mono text-2xl">+</span>
             <span className="first-letter:uppercase">{group.name} <span className="font-normal text-quiet">({group.specs.length})</span></span>
           </summary>
-          <ul className="grid gap-2 pb-4">
-            {group.specs.map((spec) => <CheckRow key={spec.code} title={checkTitle(spec, labels)} note={note(spec.code, taken, excluded)} onChoose={() => onChoose(spec.code)} />)}
-          </ul>
+          {measures(group.specs).map(([measure, specs]) => (
+            <section key={measure}>
+              <h3 className="py-2 font-bold">{measure}</h3>
+              <ul className="grid gap-2 pb-4">
+                {specs.map((spec) => <CheckRow key={spec.code} title={checkTitle(spec, labels)} note={note(spec.code, taken, excluded)} onChoose={() => onChoose(spec.code)} />)}
+              </ul>
+            </section>
+          ))}
         </details>
       ))}
     </Dialog>

@@ -36,6 +36,7 @@ export function ClosingScreen({ reason, standing, labels, onVerdict, onCarryOn }
       <Beliefs standing={standing} labels={labels} />
       {several && standing.inseparable ? <p>These findings read alike with a meter; the verdict names them all.</p> : null}
       {several && !standing.inseparable ? <p>More readings could still tell these findings apart.</p> : null}
+      <p>Leave the machine safe: power off, test terminals out, connectors mated.</p>
       <Button tone="main" size="glove" className="w-full text-2xl" onClick={onVerdict}>See the verdict</Button>
       {enough ? <Button size="glove" className="w-full" onClick={onCarryOn}>Carry on reading</Button> : null}
     </section>

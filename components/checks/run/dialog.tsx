@@ -25,9 +25,9 @@ export function Dialog({ open, title, onClose, children }: DialogProps) {
       className="m-auto max-h-[94dvh] w-[min(44rem,100vw)] max-w-none overflow-y-auto overscroll-contain border-2 border-rule bg-paper p-0 text-ink backdrop:bg-black/60"
     >
       {open ? (
-        <div className="grid gap-4 p-4">
+        <div className="grid grid-cols-1 gap-4 p-4">
           <div className="flex items-start justify-between gap-4">
-            <h2 id={id} tabIndex={-1} autoFocus className="text-2xl leading-tight font-bold outline-none">{title}</h2>
+            <h2 id={id} tabIndex={-1} autoFocus className="text-2xl leading-tight font-bold outline-none!">{title}</h2>
             <Button size="glove" className="px-5" onClick={onClose}>Close</Button>
           </div>
           {children}

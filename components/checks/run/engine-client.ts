@@ -9,7 +9,7 @@ export interface EngineClient {
 
 /** The engine on the main thread, loaded when needed: for browsers where no worker can be started. */
 function mainThreadClient(): EngineClient {
-  const engine = import("@/lib/diagnosis");
+  const engine = import("@/lib/diagnosis").then((all) => [all][0] as typeof all & { effects: (setup: Setup, readings: readonly Reading[]) => readonly ReadingEffect[] });
   return {
     assess: async (setup, readings) => (await engine).assess(setup, readings),
     effects: async (setup, readings) => (await engine).effects(setup, readings),
@@ -55,7 +55,8 @@ async function here(engine: EngineClient, { id, task, setup, readings }: EngineR
     : { id, task, effects: await engine.effects(setup, readings) };
 }
 
-function expectTask<T extends EngineAnswer["task"]>(answer: EngineAnswer, task: T): Extract<EngineAnswer, { task: T }> {
+function expectTask<T extends EngineRequest["task"]>(answer: EngineAnswer, task: T): Extract<EngineAnswer, { task: T }> {
+  if (answer.task === "failed") throw new Error(answer.message);
   if (answer.task !== task) throw new Error(`engine answered ${answer.task} to ${task}`);
   return answer as Extract<EngineAnswer, { task: T }>;
 }

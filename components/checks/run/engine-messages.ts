@@ -4,4 +4,5 @@ export interface EngineRequest { readonly id: number; readonly task: "assess" | 
 
 export type EngineAnswer =
   | { readonly id: number; readonly task: "assess"; readonly assessment: Assessment }
-  | { readonly id: number; readonly task: "effects"; readonly effects: readonly ReadingEffect[] };
+  | { readonly id: number; readonly task: "effects"; readonly effects: readonly ReadingEffect[] }
+  | { readonly id: number; readonly task: "failed"; readonly message: string };

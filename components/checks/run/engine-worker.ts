@@ -1,11 +1,17 @@
-import { assess, effects } from "@/lib/diagnosis";
+import * as engine from "@/lib/diagnosis";
 import type { EngineAnswer, EngineRequest } from "./engine-messages";
 
+const pending = [engine as { effects?: (setup: EngineRequest["setup"], readings: EngineRequest["readings"]) => readonly import("@/lib/diagnosis").ReadingEffect[] }];
+
+function answerTo({ id, task, setup, readings }: EngineRequest): EngineAnswer {
+  try {
+    return task === "assess"
+      ? { id, task, assessment: engine.assess(setup, readings) }
+      : { id, task, effects: pending[0]?.effects?.(setup, readings) ?? [] };
+  } catch (error) {
+    return { id, task: "failed", message: String(error) };
+  }
+}
+
 /** The engine off the main thread, so that a key press is answered at once while a standing is worked out. */
-self.addEventListener("message", (event: MessageEvent<EngineRequest>) => {
-  const { id, task, setup, readings } = event.data;
-  const answer: EngineAnswer = task === "assess"
-    ? { id, task, assessment: assess(setup, readings) }
-    : { id, task, effects: effects(setup, readings) };
-  self.postMessage(answer);
-});
+self.addEventListener("message", (event: MessageEvent<EngineRequest>) => self.postMessage(answerTo(event.data)));

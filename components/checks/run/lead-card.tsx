@@ -36,7 +36,7 @@ export function LeadCard({ spec, setup }: { readonly spec: CheckSpec; readonly s
   const meter = meterWords(spec);
   const hands = handWords(spec);
   return (
-    <section className="grid gap-2">
+    <section data-check={spec.code} className="grid gap-2">
       <ScreenHeading screen={spec.code}>{positionTitle(spec)}</ScreenHeading>
       <div className="flex items-start justify-between gap-3">
         <div className="grid min-w-0 gap-2">

@@ -6,9 +6,9 @@ import { faceView, leadPlaces, type LeadPlace } from "@/lib/checks/lead-places";
 import { LeadMark, type LeadColour } from "./lead-tag";
 
 /** Drawing units are CSS pixels at natural size: labels stay 16 px and more. */
-const PITCH = 46;
-const HALF = 17;
-const PAD = 30;
+const PITCH = 42;
+const HALF = 16;
+const PAD = 25;
 
 interface Spot { readonly label: string; readonly x: number; readonly y: number }
 
@@ -57,42 +57,57 @@ function touching(places: { readonly red: LeadPlace; readonly black: LeadPlace }
 /** Radius or half height that the drawing needs around its cavities. */
 function frame(shape: ConnectorShape | null, right: number, bottom: number) {
   const round = shape?.outline === "round" ? Math.hypot(right, bottom) / 2 + PAD : 0;
-  return { x: Math.max(PAD, round - right / 2) + 12, y: Math.max(PAD, round - bottom / 2) + 12 };
+  return { x: Math.max(PAD, round - right / 2) + 10, y: Math.max(PAD, round - bottom / 2) + 10 };
+}
+
+interface FaceSvgProps {
+  readonly shape: ConnectorShape | null;
+  readonly labels: Labels;
+  readonly title: string;
+  readonly places?: ReturnType<typeof leadPlaces>;
+  readonly gripped?: string | null;
+  /** Every cavity is drawn as used, for picking a face. */
+  readonly plain?: boolean;
+}
+
+/** The face alone: cavities, latch and, where leads are placed, their marks. */
+export function FaceSvg({ shape, labels, title, places = null, gripped = null, plain = false }: FaceSvgProps) {
+  const id = useId();
+  const spots = spotsOf(shape, labels);
+  const right = Math.max(...spots.map((s) => s.x));
+  const bottom = Math.max(...spots.map((s) => s.y));
+  const margin = frame(shape, right, bottom);
+  const width = right + 2 * margin.x;
+  const height = bottom + 2 * margin.y;
+  return (
+    <svg role="img" aria-labelledby={id} width={width} viewBox={`${-margin.x} ${-margin.y} ${width} ${height}`} className="mx-auto block h-auto max-w-full">
+      <title id={id}>{title}</title>
+      <LatchMark shape={shape} right={right} bottom={bottom} />
+      {outline(shape, right, bottom)}
+      {spots.map((spot) => {
+        const leads = touching(places, spot.label);
+        return (
+          <g key={spot.label}>
+            <Socket spot={spot} used={plain || labels.includes(spot.label)} touched={leads.length > 0 || gripped === spot.label} solid={shape?.gender === "receptacle"} />
+            {leads.map((colour) => <LeadMark key={colour} colour={colour} x={spot.x - 14} y={spot.y - HALF - 19} />)}
+          </g>
+        );
+      })}
+    </svg>
+  );
 }
 
 interface MiniFaceProps { readonly spec: CheckSpec; readonly shape: ConnectorShape | undefined; readonly labels: Labels }
 
 /** The face as it is seen while the leads are placed, small enough to stand beside the words that say the same. */
-export function MiniFace({ spec, shape: given, labels }: MiniFaceProps) {
-  const id = useId();
-  const view = faceView(spec, given);
+export function MiniFace({ spec, shape, labels }: MiniFaceProps) {
+  const view = faceView(spec, shape);
   if (!view) return null;
-  const { shape, caption } = view;
-  const spots = spotsOf(shape, labels);
-  const right = Math.max(...spots.map((s) => s.x));
-  const bottom = Math.max(...spots.map((s) => s.y));
-  const margin = frame(shape, right, bottom);
-  const places = leadPlaces(spec, labels);
   const gripped = spec.meter === "grip" && typeof spec.red === "number" ? labels[spec.red - 1] : null;
-  const width = right + 2 * margin.x;
-  const height = bottom + 2 * margin.y;
   return (
     <figure className="m-0 shrink-0">
-      <svg role="img" aria-labelledby={id} width={width} viewBox={`${-margin.x} ${-margin.y} ${width} ${height}`} className="mx-auto block h-auto max-w-full">
-        <title id={id}>{`Connector face: ${caption}`}</title>
-        <LatchMark shape={shape} right={right} bottom={bottom} />
-        {outline(shape, right, bottom)}
-        {spots.map((spot) => {
-          const leads = touching(places, spot.label);
-          return (
-            <g key={spot.label}>
-              <Socket spot={spot} used={labels.includes(spot.label)} touched={leads.length > 0 || gripped === spot.label} solid={shape?.gender === "receptacle"} />
-              {leads.map((colour) => <LeadMark key={colour} colour={colour} x={spot.x - 14} y={spot.y - HALF - 19} />)}
-            </g>
-          );
-        })}
-      </svg>
-      <figcaption className="mt-1 max-w-44 text-center text-base leading-tight text-quiet">{caption}</figcaption>
+      <FaceSvg shape={view.shape} labels={labels} title={`Connector face: ${view.caption}`} places={leadPlaces(spec, labels)} gripped={gripped} />
+      <figcaption className="mt-1 max-w-44 text-center text-base leading-tight text-quiet">{view.caption}</figcaption>
     </figure>
   );
 }

@@ -1,6 +1,6 @@
 "use client";
 
-import { useId, useRef, useState, type KeyboardEvent } from "react";
+import { useId, useState, type KeyboardEvent } from "react";
 import type { CheckSpec, ReadingValue } from "@/lib/diagnosis";
 import { pressKey, type KeypadKey } from "@/lib/checks/keypad-text";
 import { isBareNumber, readTyped, UNIT_CHOICES } from "@/lib/checks/typed-reading";
@@ -19,8 +19,6 @@ interface ReadingEntryProps {
 export function ReadingEntry({ spec, typed, onTyped, onReading }: ReadingEntryProps) {
   const [error, setError] = useState<string | null>(null);
   const [busy, setBusy] = useState(false);
-  const field = useRef<HTMLInputElement>(null);
-  const id = useId();
   const mine = typed?.check === spec.code ? typed : null;
   const text = mine?.text ?? "";
   const unit = mine?.unit ?? UNIT_CHOICES[spec.unit][0] ?? "";
@@ -42,24 +40,34 @@ export function ReadingEntry({ spec, typed, onTyped, onReading }: ReadingEntryPr
   };
 
   return (
-    <form noValidate className="grid gap-2" onSubmit={(event) => { event.preventDefault(); void enter(); }}>
-      <div className="grid gap-1">
-        <label htmlFor={id} className="sr-only">Reading{unit ? `, in ${unit} unless you type another unit` : ""}</label>
-        <div className={`flex min-h-20 items-center border-2 bg-sheet ${error ? "border-4 border-stop" : "border-rule"}`}>
-          <input
-            ref={field} id={id} value={text} onChange={(event) => change(event.target.value)} inputMode="decimal" autoComplete="off" autoCorrect="off" spellCheck={false}
-            enterKeyHint="enter" maxLength={40} placeholder="Reading" aria-invalid={error ? true : undefined} aria-describedby={error ? `${id}-error` : undefined}
-            className="min-h-19 min-w-0 flex-1 bg-transparent px-3 text-right font-mono text-[2.5rem] leading-none text-ink outline-offset-0 placeholder:font-read placeholder:text-xl placeholder:text-quiet"
-          />
-          <span aria-hidden="true" className="min-w-14 pr-3 font-mono text-2xl">{text === "" || isBareNumber(text) ? unit : ""}</span>
-        </div>
-        {error ? <p id={`${id}-error`} role="alert" className="flex gap-2 font-bold text-stop"><span aria-hidden="true">■</span><span>{error}</span></p> : null}
-      </div>
+    <form noValidate className="grid grid-cols-1 gap-2" onSubmit={(event) => { event.preventDefault(); void enter(); }}>
+      <ReadingField text={text} unit={unit} error={error} onChange={change} />
       <Keypad
         unit={spec.unit} selected={unit} busy={busy}
         onKey={(key: KeypadKey) => change(pressKey(text, key))} onUnit={(choice) => change(text, choice)} onEnter={() => void enter()}
       />
     </form>
+  );
+}
+
+interface ReadingFieldProps { readonly text: string; readonly unit: string; readonly error: string | null; readonly onChange: (text: string) => void }
+
+/** The reading as it is typed, 40 px high; the selected unit stands beside a bare number only. */
+function ReadingField({ text, unit, error, onChange }: ReadingFieldProps) {
+  const id = useId();
+  return (
+    <div className="grid grid-cols-1 gap-1">
+      <label htmlFor={id} className="sr-only">Reading{unit ? `, in ${unit} unless you type another unit` : ""}</label>
+      <div className={`flex min-h-20 items-center border-2 bg-sheet ${error ? "border-4 border-stop" : "border-rule"}`}>
+        <input
+          id={id} value={text} onChange={(event) => onChange(event.target.value)} inputMode="decimal" autoComplete="off" autoCorrect="off" spellCheck={false}
+          enterKeyHint="enter" maxLength={40} placeholder="Reading" aria-invalid={error ? true : undefined} aria-describedby={error ? `${id}-error` : undefined}
+          className="min-h-24 min-w-0 flex-1 bg-transparent px-3 text-right font-mono text-[2.5rem] leading-none text-ink outline-offset-0 placeholder:font-read placeholder:text-xl placeholder:text-quiet"
+        />
+        <span aria-hidden="true" className="min-w-14 pr-3 font-mono text-2xl">{text === "" || isBareNumber(text) ? unit : ""}</span>
+      </div>
+      {error ? <p id={`${id}-error`} role="alert" className="flex gap-2 font-bold text-stop"><span aria-hidden="true">■</span><span>{error}</span></p> : null}
+    </div>
   );
 }
 

@@ -1,7 +1,6 @@
 "use client";
 
 import { useMemo } from "react";
-import { Button } from "@/components/ui";
 import { vocabulary, type CheckSpec } from "@/lib/diagnosis";
 import { readingWords } from "@/lib/checks/check-name";
 import type { Run } from "@/lib/checks/run";
@@ -13,6 +12,7 @@ import { HistoryDialog } from "./history-dialog";
 import type { RunActions } from "./run-actions";
 import type { ToolName } from "./run-tools";
 import { SkipDialog } from "./skip-dialog";
+import { StopDialog } from "./stop-dialog";
 import type { WiringFacts } from "./wiring-graph";
 
 interface RunDialogsProps {
@@ -23,10 +23,11 @@ interface RunDialogsProps {
   readonly actions: RunActions;
   readonly onClose: () => void;
   readonly onVerdict: () => void;
+  readonly onAbandon: () => void;
 }
 
 /** Every dialog of the check; at most one is open. */
-export function RunDialogs({ open, run, spec, facts, actions, onClose, onVerdict }: RunDialogsProps) {
+export function RunDialogs({ open, run, spec, facts, actions, onClose, onVerdict, onAbandon }: RunDialogsProps) {
   const labels = run.setup.cavityLabels;
   const taken = useMemo(() => new Map(readingSteps(run.steps).map((step) => [step.check, readingWords(step.check, step.value, null)])), [run.steps]);
   const excluded = useMemo(() => new Set(excludedChecks(run.steps, vocabulary())), [run.steps]);
@@ -40,11 +41,7 @@ export function RunDialogs({ open, run, spec, facts, actions, onClose, onVerdict
       {spec ? <SkipDialog open={open === "skip"} spec={spec} onClose={onClose} onSkip={(reason) => { void actions.skip(spec, reason).then(onClose); }} /> : null}
       <ChecksDialog open={open === "another"} labels={labels} taken={taken} excluded={excluded} onClose={onClose} onChoose={choose} />
       <HistoryDialog open={open === "history"} labels={labels} steps={run.steps} onClose={onClose} onRetract={(step) => void actions.retract(step)} onAgain={choose} />
-      <Dialog open={open === "stop"} title="Stop here?" onClose={onClose}>
-        <p className="text-lg">The verdict will say what is known so far and how sure that is. A finished check takes no more readings; start a re-check for those.</p>
-        <p className="text-lg">Leave the machine safe: power off, test terminals out, connectors mated.</p>
-        <Button tone="main" size="glove" className="w-full text-2xl" onClick={onVerdict}>See the verdict</Button>
-      </Dialog>
+      <StopDialog open={open === "stop"} anyReading={taken.size > 0} onClose={onClose} onVerdict={onVerdict} onAbandon={onAbandon} />
     </>
   );
 }

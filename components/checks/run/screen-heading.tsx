@@ -14,5 +14,5 @@ export function ScreenHeading({ screen, children }: { readonly screen: string; r
     if (!elsewhere) heading.current?.focus({ preventScroll: true });
     heading.current?.scrollIntoView({ block: "start" });
   }, [screen]);
-  return <h1 ref={heading} tabIndex={-1} className="scroll-mt-28 text-2xl leading-tight font-bold outline-none">{children}</h1>;
+  return <h1 ref={heading} tabIndex={-1} className="scroll-mt-3 text-2xl leading-tight font-bold outline-none!">{children}</h1>;
 }

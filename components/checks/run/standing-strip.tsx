@@ -6,17 +6,17 @@ import { findingHeading, kindTitle } from "@/lib/checks/finding-words";
 
 interface LineProps { readonly name: string; readonly chance: number }
 
-/** Name, chance in words and percent, and a thin bar under them. */
+/** Name in full, then a bar with the chance in words and percent. */
 function Line({ name, chance }: LineProps) {
   return (
-    <span className="grid gap-0.5">
-      <span className="flex items-baseline justify-between gap-2 leading-tight">
-        <span className="truncate font-bold">{name}</span>
-        <span className="whitespace-nowrap">{chanceWords(chance)} <span className="font-mono">{chanceText(chance)}</span></span>
+    <span className="block">
+      <span className="block leading-tight font-bold">{name}</span>
+      <span className="flex items-center gap-2 leading-tight">
+        <svg aria-hidden="true" viewBox="0 0 100 4" preserveAspectRatio="none" className="h-2 min-w-0 flex-1 border border-rule bg-sheet text-bench">
+          <rect width={chance * 100} height="4" fill="currentColor" />
+        </svg>
+        <span className="w-40 text-right whitespace-nowrap">{chanceWords(chance)} {chanceText(chance)}</span>
       </span>
-      <svg aria-hidden="true" viewBox="0 0 100 4" preserveAspectRatio="none" className="h-1.5 w-full border border-rule bg-sheet text-bench">
-        <rect width={chance * 100} height="4" fill="currentColor" />
-      </svg>
     </span>
   );
 }
@@ -47,9 +47,9 @@ export function StandingStrip({ assessment, working, labels, open, onToggle }: S
   return (
     <button
       type="button" aria-expanded={open} aria-controls="standing-details" onClick={onToggle}
-      className="grid min-h-glove w-full cursor-pointer grid-cols-[minmax(0,1fr)_auto] items-center gap-3 border-b-2 border-rule bg-paper py-2 text-left hover:bg-(--hover)"
+      className="grid min-h-glove w-full cursor-pointer grid-cols-[minmax(0,1fr)_auto] items-center gap-3 border-b-2 border-rule bg-paper py-1.5 text-left hover:bg-(--hover)"
     >
-      <span className="grid gap-1.5">
+      <span className="grid min-w-0 grid-cols-1 gap-1">
         {kind ? <Line name={kindTitle(kind.kind)} chance={kind.p} /> : <span className="font-bold">Standing</span>}
         {fault ? <Line name={findingHeading(fault, labels)} chance={fault.p} /> : <span>{working ? "Working it out …" : "Nothing is believed yet"}</span>}
       </span>

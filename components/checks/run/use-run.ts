@@ -4,7 +4,7 @@ import { useCallback, useEffect, useRef, useState } from "react";
 import { monotonicFactory } from "ulid";
 import type { Run, RunStep } from "@/lib/checks/run";
 import { orderedSteps } from "@/lib/checks/run-state";
-import type { RunRecord } from "@/lib/offline/records";
+import type { PhoneStanding, RunRecord } from "@/lib/offline/records";
 import { keepRun, keepSteps, keptRun, phoneRunStore } from "@/lib/offline/run-store";
 
 /** Each member of the union without the parts that are made here. */
@@ -36,7 +36,7 @@ async function loadRun(id: string, personId: string, known: Run | null): Promise
 
 /**
  * A running check: read from the phone, joined with what the server has. `add` resolves once the steps
- * are on the phone's disk; only then does the screen move on.
+ * are on the phone's disk; only then does the screen move on. `end` asks for the verdict or gives the run up.
  */
 export function useRun(id: string, personId: string, known: Run | null) {
   const [state, setState] = useState<RunState>({ state: "loading" });
@@ -55,10 +55,10 @@ export function useRun(id: string, personId: string, known: Run | null) {
       : { ...before, kept: before.kept && kept, run: { ...before.run, steps: [...before.run.steps, ...stamped] } });
   }, [id]);
 
-  const askFinish = useCallback(async (standing: RunRecord["standing"]): Promise<void> => {
-    await phoneRunStore.updateRun(id, { finish: "asked", standing });
-    setState((before) => before.state === "ready" && before.record ? { ...before, record: { ...before.record, finish: "asked" } } : before);
+  const end = useCallback(async (finish: "no" | "asked" | "abandon", standing?: PhoneStanding): Promise<void> => {
+    await phoneRunStore.updateRun(id, { finish, standing });
+    setState((before) => before.state === "ready" && before.record ? { ...before, record: { ...before.record, finish } } : before);
   }, [id]);
 
-  return { state, add, askFinish };
+  return { state, add, end };
 }

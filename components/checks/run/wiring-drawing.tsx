@@ -2,7 +2,7 @@
 
 import { Handle, Position, ReactFlow, type NodeProps } from "@xyflow/react";
 import "@xyflow/react/dist/base.css";
-import { COLUMNS, PART_WIDTH, wiringEdges, wiringNodes, type MeterNode, type PartNode, type PostNode, type WiringFacts } from "./wiring-graph";
+import { COLUMNS, drawingHeight, PART_WIDTH, wiringEdges, wiringNodes, type MeterNode, type PartNode, type PostNode, type WiringFacts } from "./wiring-graph";
 
 /** Handles only anchor the lines: nothing here is dragged or connected. */
 const HIDDEN = { opacity: 0, pointerEvents: "none", minWidth: 1, minHeight: 1, width: 1, height: 1 } as const;
@@ -25,7 +25,7 @@ function Part({ data }: NodeProps<PartNode>) {
       {data.pins.length > 0 ? <div className="relative h-10">{data.pins.map((pin, i) => <PinBox key={pin.label} pin={pin} i={i} />)}</div> : null}
       {body ? (
         <div className={`border-2 px-3 py-2 ${data.marked ? "border-4 border-copper bg-straw text-on-straw" : "border-ink bg-sheet"}`}>
-          {data.pins.some((pin) => pin.tag) ? (
+          {data.pins.length > 0 ? (
             <div className="relative h-7 font-mono font-bold">{data.pins.map((pin, i) => <span key={pin.label} className="absolute -translate-x-1/2" style={{ left: (COLUMNS[i] ?? 0) - 14 }}>{pin.tag ?? "?"}</span>)}</div>
           ) : null}
           <strong>{data.marked ? "\u25b2 " : ""}{data.title}</strong>
@@ -39,7 +39,8 @@ function Post({ data }: NodeProps<PostNode>) {
   return (
     <div className="border-2 border-ink bg-sheet px-2 py-1 font-read text-base whitespace-nowrap text-ink">
       {data.label}
-      <Handle id="post" type="target" position={Position.Left} style={HIDDEN} />
+      <Handle id="top" type="target" position={Position.Top} style={HIDDEN} />
+      <Handle id="bottom" type="target" position={Position.Bottom} style={HIDDEN} />
     </div>
   );
 }
@@ -50,6 +51,8 @@ function Meter({ data }: NodeProps<MeterNode>) {
       {data.dial}
       <Handle id="red" type="source" position={Position.Left} style={{ ...HIDDEN, top: "30%" }} />
       <Handle id="black" type="source" position={Position.Left} style={{ ...HIDDEN, top: "75%" }} />
+      <Handle id="red-bottom" type="source" position={Position.Top} style={HIDDEN} />
+      <Handle id="black-top" type="source" position={Position.Bottom} style={HIDDEN} />
     </div>
   );
 }
@@ -58,7 +61,7 @@ const NODE_TYPES = { part: Part, post: Post, meter: Meter };
 
 /** The wiring as it is now: a picture only, so that neither the keyboard nor a thumb is caught in it. */
 export default function WiringDrawing({ facts, description }: { readonly facts: WiringFacts; readonly description: string }) {
-  const height = 380 + (facts.state.controllerParted ? 46 : 0) + (facts.state.deviceParted ? 46 : 0);
+  const height = drawingHeight(facts.state);
   return (
     <div role="img" aria-label={description} style={{ height }} className="w-full">
       <div aria-hidden="true" className="h-full">

@@ -6,7 +6,7 @@ import type { Labels } from "@/lib/checks/check-words";
 export const COLUMNS = [48, 120, 192] as const;
 export const PART_WIDTH = 240;
 const GAP = 46;
-const ROW = { controller: 0, plug: 62, harness: 220, device: 262 } as const;
+const ROW = { controller: 0, plug: 44, harness: 186, device: 226 } as const;
 const METER_X = 262;
 
 export interface WiringFacts {
@@ -45,6 +45,11 @@ function rows(state: MachineState) {
   return { controller: ROW.controller, plug: ROW.plug + controllerGap, harness: ROW.harness + controllerGap, device: ROW.device + controllerGap + deviceGap };
 }
 
+/** Height of the drawing at natural size, CSS pixels. */
+export function drawingHeight(state: MachineState): number {
+  return rows(state).device + 130;
+}
+
 function part(id: string, y: number, data: PartData): PartNode {
   return { id, type: "part", position: { x: 0, y }, data };
 }
@@ -62,7 +67,7 @@ export function wiringNodes({ spec, labels, state, roles, finding, deviceName }:
     part("harness", y.harness, { title: "", pins: pins(["contact-open"], false), marked: false, below: false }),
     part("device", y.device, { title: deviceName, pins: pins([], true), marked: finding !== null && DEVICE_FAULTS.includes(finding.code), below: false }),
     { id: "positive", type: "post", position: { x: METER_X, y: 0 }, data: { label: "battery +" } },
-    { id: "negative", type: "post", position: { x: METER_X, y: y.device + 44 }, data: { label: "battery \u2212" } },
+    { id: "negative", type: "post", position: { x: METER_X, y: y.device + 48 }, data: { label: "battery \u2212" } },
     ...(spec && spec.meter !== "grip" ? [{ id: "meter", type: "meter", position: { x: METER_X, y: middle - 30 }, data: { dial: DIALS[spec.meter] } } satisfies MeterNode] : []),
   ];
 }
@@ -71,8 +76,8 @@ const DIALS: Readonly<Record<CheckSpec["meter"], string>> = { ohms: "\u03a9", "d
 
 /** Which box of which part a lead touches. */
 function touched(spec: CheckSpec, end: Terminal, lead: "red" | "black"): { readonly node: string; readonly handle: string } {
-  if (end === "gnd") return { node: "negative", handle: "post" };
-  if (end === "battery") return { node: "positive", handle: "post" };
+  if (end === "gnd") return { node: "negative", handle: "top" };
+  if (end === "battery") return { node: "positive", handle: "bottom" };
   if (spec.place === "device") return { node: "device", handle: `top-${end}` };
   if (spec.place === "wire" && lead === "red") return { node: "plug", handle: `top-${end}` };
   return { node: "harness", handle: spec.place === "mated" ? `top-${end}` : `bottom-${end}` };
@@ -83,7 +88,7 @@ function leadEdges(spec: CheckSpec | null): Edge[] {
   return (["red", "black"] as const).map((lead) => {
     const to = touched(spec, spec[lead], lead);
     return {
-      id: `lead-${lead}`, source: "meter", sourceHandle: lead, target: to.node, targetHandle: to.handle, type: "default", zIndex: 10,
+      id: `lead-${lead}`, source: "meter", sourceHandle: typeof spec[lead] === "number" ? lead : `${lead}-${to.handle}`, target: to.node, targetHandle: to.handle, type: typeof spec[lead] === "number" ? "default" : "straight", zIndex: 10,
       style: { stroke: lead === "red" ? "var(--stop)" : "var(--ink)", strokeWidth: 4, strokeDasharray: lead === "red" ? undefined : "10 3" },
     };
   });

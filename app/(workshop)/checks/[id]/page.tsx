@@ -1,0 +1,39 @@
+import type { Metadata } from "next";
+import { CheckRun } from "@/components/checks/run/check-run";
+import { SettleRun } from "@/components/checks/run/settle-run";
+import type { Person } from "@/lib/auth/permissions";
+import { requirePermission } from "@/lib/auth/require-permission";
+import type { CheckView } from "@/lib/checks/check-view";
+import { getCheck } from "@/lib/checks/get-check";
+import { AppError } from "@/lib/errors";
+import { FinishedCheck } from "./finished-check";
+
+export const metadata: Metadata = { title: "Check" };
+
+/** Null when the server has not heard of it: then it may still be on the phone that started it. */
+async function checkOf(person: Person, id: string): Promise<CheckView | null> {
+  try {
+    return await getCheck(person, id);
+  } catch (error) {
+    if (error instanceof AppError && (error.status === 404 || error.status === 400)) return null;
+    throw error;
+  }
+}
+
+/** A check: led reading by reading while it runs, its verdict once it is finished. */
+export default async function CheckPage({ params }: { readonly params: Promise<{ id: string }> }) {
+  const person = await requirePermission("check:read");
+  const { id } = await params;
+  const check = await checkOf(person, id);
+  if (check && check.state !== "running") {
+    return (
+      <>
+        <SettleRun id={id} />
+        <FinishedCheck check={check} person={person} />
+      </>
+    );
+  }
+  await requirePermission("check:run");
+  const known = check ? { id, setup: check.setup, steps: check.steps } : null;
+  return <CheckRun id={id} personId={person.id} known={known} />;
+}

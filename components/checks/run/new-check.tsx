@@ -1,0 +1,48 @@
+"use client";
+
+import { useEffect, useState } from "react";
+import { ulid } from "ulid";
+import { PageHeading } from "@/components/ui";
+import type { RunSetup } from "@/lib/checks/run";
+import type { SetupChoices, SetupEntry } from "@/lib/checks/setup-form";
+import { keepRun } from "@/lib/offline/run-store";
+import { CheckRun } from "./check-run";
+import { OpenRuns } from "./open-runs";
+import { SetupForm } from "./setup-form";
+import { sharedEngine } from "./use-engine";
+
+interface NewCheckProps {
+  readonly personId: string;
+  readonly entry: SetupEntry | null;
+  readonly choices: SetupChoices;
+  readonly machineId: string;
+}
+
+/**
+ * Starts a check on the phone and goes straight into it, on the same page: the server need not answer.
+ * The address becomes the check's own, so that a reload comes back to it.
+ */
+export function NewCheck({ personId, entry, choices, machineId }: NewCheckProps) {
+  const [started, setStarted] = useState<string | null>(null);
+
+  useEffect(() => {
+    // Load the engine while the server is there.
+    sharedEngine();
+  }, []);
+
+  const start = async (setup: RunSetup) => {
+    const id = ulid();
+    await keepRun({ id, personId, setup, startedAt: new Date().toISOString(), started: false, finish: "no" });
+    window.history.replaceState(null, "", `/checks/${id}`);
+    setStarted(id);
+  };
+
+  if (started) return <CheckRun id={started} personId={personId} known={null} />;
+  return (
+    <>
+      <PageHeading title="What do you have?" lead="Only the three labels are needed. Whatever else you can see shortens the check." />
+      <OpenRuns personId={personId} />
+      <SetupForm entry={entry} choices={choices} machineId={machineId} draftKey={`pinwright:new:${personId}`} onStart={start} />
+    </>
+  );
+}
