@@ -22,7 +22,8 @@ export const FAMILY_SHARE: Readonly<Record<Family, number>> = { potentiometer: 1
 
 /** How the controller holds the signal input when nothing drives it. An open collector needs a pull-up to work at all. */
 export const PULL_SHARE: Readonly<Record<Family, Readonly<Record<Pull, number>>>> = {
-  potentiometer: { down: 0.7, up: 0.3 }, voltage: { down: 0.7, up: 0.3 }, "push-pull": { down: 0.9, up: 0.1 }, "open-collector": { down: 0, up: 1 },
+  potentiometer: { down: 0.7, up: 0.08, "up-to-supply": 0.22 }, voltage: { down: 0.7, up: 0.08, "up-to-supply": 0.22 },
+  "push-pull": { down: 0.9, up: 0.06, "up-to-supply": 0.04 }, "open-collector": { down: 0, up: 0.65, "up-to-supply": 0.35 },
 };
 
 /** Chance that the device fitted is the one a catalogue entry names, pins included. */

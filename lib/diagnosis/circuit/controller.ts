@@ -18,6 +18,11 @@ export function supplyVolts(c: Candidate, x: Float64Array): number {
   return c.suppliedByBattery ? x[P.battery]! : x[P.supply]!;
 }
 
+/** Volts that the signal input is pulled to; 0 where it is pulled down. */
+function railVolts(c: Candidate, x: Float64Array): number {
+  return c.pull === "down" ? 0 : c.pull === "up" ? x[P.rail]! : supplyVolts(c, x);
+}
+
 /** The controller's terminal of a role, without the wire. */
 function terminal(c: Candidate, x: Float64Array, role: number, on: boolean, t: Thevenin): void {
   if (role === GROUND) return set(t, 0, 0);
@@ -26,9 +31,9 @@ function terminal(c: Candidate, x: Float64Array, role: number, on: boolean, t: T
     return set(t, supplyVolts(c, x), x[P.supplySource]!);
   }
   if (c.code === "pull-missing") return set(t, 0, INPUT_LEAK);
-  const pull = x[P.pull]! + (c.pull === "up" && !on ? x[P.railOff]! : 0);
+  const pull = x[P.pull]! + (c.pull !== "down" && !on ? x[P.railOff]! : 0);
   const share = INPUT_LEAK / (INPUT_LEAK + pull);
-  set(t, c.pull === "up" && on ? x[P.rail]! * share : 0, pull * share);
+  set(t, on ? railVolts(c, x) * share : 0, pull * share);
 }
 
 /** Which controller terminal reaches the cavity of a role: another one where two wires are exchanged. */

@@ -2,24 +2,23 @@ import { THERMAL_VOLTS } from "../network/solve";
 import { GROUND, SIGNAL, SUPPLY, type Candidate } from "./candidate";
 import { P } from "./parameters";
 
-/** An ohms function: a source behind a range resistor; the lowest range that holds the reading is shown. */
+/** An ohms function: a source behind a resistor as large as the range; the lowest range that holds the reading is shown. */
 const SOURCE_VOLTS = 2.5;
 const LOWEST_RANGE = 600, RANGES = 6;
-/** Range resistor over full range, ohms per ohm. */
-const RANGE_RESISTOR = 1000 / 600;
+/** Emission coefficient of small-signal silicon junctions (common practice: 1.7 to 2). */
+export const EMISSION = 1.75;
 /** Forward drops are stated at this current, amperes. */
 export const DROP_AMPERES = 2e-6;
 
 /**
  * What an autoranging ohms function shows across a resistance in series with diode drops, ohms.
- * `drop` is their sum at 2 microamperes, `junctions` how many there are (each rises 60 mV a decade of current).
+ * `drop` is their sum at 2 microamperes, `junctions` how many there are (each rises 60 mV times its emission coefficient a decade of current).
  */
 export function ohmsThroughDiodes(ohms: number, drop: number, junctions: number): number {
   let full = LOWEST_RANGE;
   for (let k = 0; k < RANGES; k++, full *= 10) {
-    const range = full * RANGE_RESISTOR;
-    const amperes = currentThrough(range + ohms, drop, junctions);
-    const shown = SOURCE_VOLTS / amperes - range;
+    const amperes = currentThrough(full + ohms, drop, junctions);
+    const shown = SOURCE_VOLTS / amperes - full;
     if (shown < full || k === RANGES - 1) return shown;
   }
   return Infinity;
@@ -29,7 +28,7 @@ export function ohmsThroughDiodes(ohms: number, drop: number, junctions: number)
 function currentThrough(series: number, drop: number, junctions: number): number {
   let amperes = (SOURCE_VOLTS - drop) / series;
   for (let k = 0; k < 4; k++) {
-    const volts = drop + junctions * THERMAL_VOLTS * Math.log(amperes / DROP_AMPERES);
+    const volts = drop + junctions * EMISSION * THERMAL_VOLTS * Math.log(amperes / DROP_AMPERES);
     amperes = Math.max(SOURCE_VOLTS - volts, 0.05) / series;
   }
   return amperes;
@@ -55,14 +54,11 @@ export function clampShare(share: number): number {
   return Math.min(0.998, Math.max(0.002, share));
 }
 
-/** Series resistance of the clamp diode from ground to signal, ohms (common practice). */
-const CLAMP_OHMS = 60;
-
 function electronicOhms(c: Candidate, x: Float64Array, red: number, black: number): number {
-  const internal = x[P.internal]!, dropIn = x[P.dropSupply]!, dropSig = x[P.dropSignal]!;
-  if (red === SUPPLY) return black === GROUND ? ohmsThroughDiodes(internal, dropIn, 1) : ohmsThroughDiodes(internal + CLAMP_OHMS, dropIn + dropSig, 2);
+  const internal = x[P.internal]!, dropIn = x[P.dropSupply]!, dropSig = x[P.dropSignal]!, clamp = x[P.clamp]!;
+  if (red === SUPPLY) return black === GROUND ? ohmsThroughDiodes(internal, dropIn, 1) : ohmsThroughDiodes(internal + clamp, dropIn + dropSig, 2);
   if (black === SUPPLY) return Infinity;
-  if (red === GROUND) return ohmsThroughDiodes(CLAMP_OHMS, dropSig, 1);
+  if (red === GROUND) return ohmsThroughDiodes(clamp, dropSig, 1);
   const leak = x[P.leak]!;
   if (c.family === "open-collector") return leak;
   // A driven output also conducts back through its upper switch into the device's internal supply.

@@ -1,7 +1,7 @@
 import { NodalNetwork, THERMAL_VOLTS } from "../network/solve";
 import { GROUND, SIGNAL, SUPPLY, type Candidate } from "./candidate";
 import { cavity, supplyVolts, type Thevenin } from "./controller";
-import { clampShare, DROP_AMPERES } from "./device-ohms";
+import { clampShare, DROP_AMPERES, EMISSION } from "./device-ohms";
 import { P } from "./parameters";
 
 /** Input resistance of a voltmeter, ohms (hand-held meters: 10 megohm). */
@@ -12,7 +12,7 @@ const LOW_VOLTS = 0.05;
 /** Volts across the device below which it stops, and the share of a low supply (common practice). */
 const RUN_VOLTS = 4.3;
 const MIN_SUPPLY_SHARE = 0.85;
-const INNER = 4, PARTED_PIN = 5;
+const INNER = 4, PARTED_PIN = 5, CLAMPED = 6;
 
 /** Mated and powered: mean volts of each role's cavity, and the swing where the signal pulses; per position. */
 export interface MatedVolts {
@@ -33,7 +33,7 @@ const scratch: Thevenin = { volts: 0, ohms: 0 };
 const pinNode = (c: Candidate, role: number) => (c.code === "contact-open" && c.at === role ? PARTED_PIN : role + 1);
 
 function stampHarness(c: Candidate, x: Float64Array): void {
-  net.reset(PARTED_PIN);
+  net.reset(c.family === "potentiometer" ? PARTED_PIN : CLAMPED);
   for (let role = 0; role < 3; role++) {
     cavity(c, x, role, true, scratch);
     net.source(role + 1, 0, scratch.volts, scratch.ohms);
@@ -68,15 +68,16 @@ function solvePotentiometer(c: Candidate, x: Float64Array, out: MatedVolts): voi
   }
 }
 
-const saturation = (drop: number) => DROP_AMPERES * Math.exp(-drop / THERMAL_VOLTS);
+const saturation = (drop: number) => DROP_AMPERES * Math.exp(-drop / (EMISSION * THERMAL_VOLTS));
 
 /** The parts of an electronic device that conduct whether it runs or not. */
 function stampPassive(c: Candidate, x: Float64Array): void {
   const supply = pinNode(c, SUPPLY), ground = pinNode(c, GROUND), signal = pinNode(c, SIGNAL);
-  net.diode(supply, INNER, saturation(x[P.dropSupply]!));
+  net.diode(supply, INNER, saturation(x[P.dropSupply]!), EMISSION);
   net.resistor(INNER, ground, x[P.internal]!);
-  net.diode(ground, signal, saturation(x[P.dropSignal]!));
-  if (c.family !== "open-collector") net.diode(signal, INNER, saturation(x[P.dropSignal]!));
+  net.diode(ground, CLAMPED, saturation(x[P.dropSignal]!), EMISSION);
+  net.resistor(CLAMPED, signal, x[P.clamp]!);
+  if (c.family !== "open-collector") net.diode(signal, INNER, saturation(x[P.dropSignal]!), EMISSION);
   net.resistor(signal, ground, x[P.leak]!);
 }
 

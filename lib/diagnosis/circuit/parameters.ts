@@ -2,18 +2,19 @@ import type { Expect, FaultCode } from "../types";
 
 /** What is not known of device, wires and controller: places in the parameter vector. */
 export const P = {
-  battery: 0, supply: 1, supplySource: 2, supplyBleed: 3, rail: 4, pull: 5, railOff: 6, fault: 7, batteryOff: 18,
+  battery: 0, supply: 1, supplySource: 2, supplyBleed: 3, rail: 4, pull: 5, railOff: 6, fault: 7, batteryOff: 18, clamp: 19,
   rest: 8, full: 9,
   // potentiometer
   track: 10, wiper: 11,
   // electronic devices
   internal: 10, leak: 11, load: 12, driveLow: 13, high: 14, frequency: 15, dropSupply: 16, dropSignal: 17,
 } as const;
-export const PARAMETER_COUNT = 19;
+export const PARAMETER_COUNT = 20;
 
 /** How a device's output works; the potentiometer is its own. */
 export type Family = "potentiometer" | "open-collector" | "push-pull" | "voltage";
-export type Pull = "up" | "down";
+/** How a controller holds its signal input: down to ground, up to a rail of its own, or up to the supply it gives. */
+export type Pull = "up" | "up-to-supply" | "down";
 
 /** Gaussian ranges in the logarithm (ratio scale) or straight; `mean` and `sd` are of that scale. */
 export interface Ranges { readonly mean: Float64Array; readonly sd: Float64Array; readonly log: Uint8Array }
@@ -74,7 +75,7 @@ function potentiometerRanges(r: RangeBuilder, expect?: Expect): void {
 function electronicRanges(r: RangeBuilder, family: Exclude<Family, "potentiometer">, expect?: Expect): void {
   r.ratio(P.internal, 50_000, 2.6).ratio(P.leak, family === "open-collector" ? 1.6e6 : 5e6, 1.9);
   r.ratio(P.load, 0.006, 1.5).ratio(P.driveLow, 45, 1.6).ratio(P.high, 5.2, 1.25).ratio(P.frequency, expect?.frequencyHz ?? 430, expect?.frequencyHz ? 1.035 : 2.2);
-  r.straight(P.dropSupply, 0.28, 0.06).straight(P.dropSignal, 0.4, 0.09);
+  r.straight(P.dropSupply, 0.3, 0.05).straight(P.dropSignal, 0.5, 0.12).ratio(P.clamp, 60, 2.5);
   if (family === "voltage") signalSpan(r, expect?.signalVolts, 2.5, 1.7, 0.035);
   else signalSpan(r, expect?.duty, 0.5, 0.36, 0.008);
 }

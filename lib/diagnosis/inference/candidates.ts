@@ -3,7 +3,7 @@ import type { Family, Pull } from "../circuit/parameters";
 import { FAMILY_SHARE, FAULT_WEIGHTS, KIND_WEIGHTS, PULL_SHARE } from "../priors";
 import { KINDS, type Expect, type Kind, type PinAssignment } from "../types";
 
-const PULLS: readonly Pull[] = ["down", "up"];
+const PULLS: readonly Pull[] = ["down", "up", "up-to-supply"];
 
 /** Log-weights of a family's findings, normalised; the places of one finding share its weight. */
 function faultLogWeights(family: Family): readonly { place: FaultPlace; log: number }[] {

@@ -16,7 +16,7 @@ export function movedBy(c: Candidate, groups: number): readonly number[] {
 function listFor(c: Candidate, groups: number): readonly number[] {
   const set = new Set<number>();
   const add = (...places: number[]) => places.forEach((p) => set.add(p));
-  if (groups & GROUP.cold) add(P.supplyBleed, P.pull, ...(c.pull === "up" ? [P.railOff] : []));
+  if (groups & GROUP.cold) add(P.supplyBleed, P.pull, ...(c.pull === "down" ? [] : [P.railOff]));
   if (groups & (GROUP.live | GROUP.mated)) {
     add(P.battery, P.supply, P.supplySource, P.pull);
     if (c.pull === "up") add(P.rail);
@@ -50,7 +50,7 @@ export function reachOf(c: Candidate, parameter: number, idle: boolean): number 
 
 function deviceUnknowns(c: Candidate): readonly number[] {
   if (c.family === "potentiometer") return [P.track, P.wiper, P.rest, P.full];
-  return [P.internal, P.leak, P.dropSupply, P.dropSignal];
+  return [P.internal, P.leak, P.dropSupply, P.dropSignal, P.clamp];
 }
 
 function runningUnknowns(c: Candidate): readonly number[] {

@@ -10,7 +10,7 @@ export const THERMAL_VOLTS = 0.025864;
 const MIN_SIEMENS = 1e-12;
 const MAX_STEPS = 120;
 
-interface Diode { anode: number; cathode: number; saturation: number; limitVolts: number; volts: number }
+interface Diode { anode: number; cathode: number; saturation: number; thermal: number; limitVolts: number; volts: number }
 
 export class NodalNetwork {
   private readonly matrix: Float64Array;
@@ -54,12 +54,12 @@ export class NodalNetwork {
     this.inject(this.currents, plus, minus, volts * g);
   }
 
-  /** A diode from anode to cathode; `saturation` is its saturation current in amperes, emission coefficient 1. */
-  diode(anode: number, cathode: number, saturation: number): void {
-    const limitVolts = THERMAL_VOLTS * Math.log(THERMAL_VOLTS / (Math.SQRT2 * saturation));
+  /** A diode from anode to cathode; `saturation` is its saturation current in amperes, `emission` its emission coefficient (1 to 2 for silicon). */
+  diode(anode: number, cathode: number, saturation: number, emission = 1): void {
+    const thermal = emission * THERMAL_VOLTS, limitVolts = thermal * Math.log(thermal / (Math.SQRT2 * saturation));
     const slot = this.diodes[this.diodeCount];
-    if (slot) Object.assign(slot, { anode, cathode, saturation, limitVolts, volts: 0 });
-    else this.diodes.push({ anode, cathode, saturation, limitVolts, volts: 0 });
+    if (slot) Object.assign(slot, { anode, cathode, saturation, thermal, limitVolts, volts: 0 });
+    else this.diodes.push({ anode, cathode, saturation, thermal, limitVolts, volts: 0 });
     this.diodeCount++;
   }
 
@@ -82,8 +82,8 @@ export class NodalNetwork {
     const rhs = this.currentsCopy();
     for (let k = 0; k < this.diodeCount; k++) {
       const d = this.diodes[k]!;
-      const e = Math.exp(Math.min(d.volts / THERMAL_VOLTS, 80));
-      const g = Math.max(d.saturation * e / THERMAL_VOLTS, MIN_SIEMENS);
+      const e = Math.exp(Math.min(d.volts / d.thermal, 80));
+      const g = Math.max(d.saturation * e / d.thermal, MIN_SIEMENS);
       const i = d.saturation * (e - 1) + MIN_SIEMENS * d.volts;
       this.conductance(this.work, d.anode, d.cathode, g);
       this.inject(rhs, d.anode, d.cathode, g * d.volts - i);
@@ -92,7 +92,7 @@ export class NodalNetwork {
     let settled = true;
     for (let k = 0; k < this.diodeCount; k++) {
       const d = this.diodes[k]!;
-      const next = limitJunction(this.volts[d.anode]! - this.volts[d.cathode]!, d.volts, d.limitVolts);
+      const next = limitJunction(this.volts[d.anode]! - this.volts[d.cathode]!, d.volts, d);
       if (Math.abs(next - d.volts) > 1e-9) settled = false;
       d.volts = next;
     }
@@ -132,9 +132,9 @@ export class NodalNetwork {
 }
 
 /** Keeps one Newton step of a junction within the reach of its exponential. */
-function limitJunction(next: number, last: number, limit: number): number {
-  if (next <= limit || Math.abs(next - last) <= 2 * THERMAL_VOLTS) return next;
-  if (last <= 0) return THERMAL_VOLTS * Math.log(Math.max(next / THERMAL_VOLTS, Math.E));
-  const grow = 1 + (next - last) / THERMAL_VOLTS;
-  return grow > 0 ? last + THERMAL_VOLTS * Math.log(grow) : limit;
+function limitJunction(next: number, last: number, { thermal, limitVolts }: Diode): number {
+  if (next <= limitVolts || Math.abs(next - last) <= 2 * thermal) return next;
+  if (last <= 0) return thermal * Math.log(Math.max(next / thermal, Math.E));
+  const grow = 1 + (next - last) / thermal;
+  return grow > 0 ? last + thermal * Math.log(grow) : limitVolts;
 }
