@@ -1,9 +1,9 @@
-import type { Fault, FaultCode, Kind, PinAssignment } from "@/lib/diagnosis";
+import type { Fault, FaultCode, Kind } from "@/lib/diagnosis";
 import type { Labels } from "./check-name";
 import { placeWords } from "./finding-words";
 
 /**
- * What to do about a finding and how to prove the repair. {at} is the cavity or the two cavities, {kind} the device.
+ * What to do about a finding and how to prove the repair. {at} is the cavity or the two cavities of the finding.
  * Source of every line: common practice of the trade (repair at the joint, prove with the reading that found it,
  * then under load and in movement); the limits come from the check itself.
  */
@@ -92,7 +92,7 @@ export const ADVICE: Readonly<Record<FaultCode, AdviceLines>> = {
       "Check the controller's own supply, ground and fuse by the maker's instructions.",
       "Only when those are good is the controller's supply output in question. Never bridge it to battery.",
     ],
-    prove: ["Connector parted, power on: the supply at cavity {at} reads what the entry says, and holds with the device mated.", CLEAR_CODE],
+    prove: ["Connector parted, power on: the supply cavity reads what the entry says, and holds with the device mated.", CLEAR_CODE],
   },
   "pull-missing": {
     next: [
@@ -133,18 +133,12 @@ export const ADVICE: Readonly<Record<FaultCode, AdviceLines>> = {
 
 const NEEDS_DEFERRAL: ReadonlySet<FaultCode> = new Set<FaultCode>(["short-to-ground", "short-to-battery", "supply-missing", "pull-missing", "wires-swapped"]);
 
-function fill(line: string, fault: Fault, labels: Labels, pins: PinAssignment | null): string {
-  const places = fault.pins ?? [];
-  const at = places.length > 0 ? placeWords(places, labels, null) : fault.code === "supply-missing" && pins ? placeWords([pins.supply], labels, null) : "";
-  return at === "" ? line.replace(/ (of|at|on|to)? ?(cavity|cavities|wire|contact) \{at\}/, "") : line.replaceAll("{at}", at);
-}
-
-/** Steps for one finding at its place. `pins` is null while the pins are not settled. */
-export function adviceFor(fault: Fault, labels: Labels, pins: PinAssignment | null): { next: string[]; prove: string[] } {
+/** Steps for one finding at its place; lines that name a cavity belong to findings that have one. */
+export function adviceFor(fault: Fault, labels: Labels): { next: string[]; prove: string[] } {
   const lines = ADVICE[fault.code];
-  const next = lines.next.map((line) => fill(line, fault, labels, pins));
-  if (NEEDS_DEFERRAL.has(fault.code)) next.push(DEFERRAL);
-  return { next, prove: lines.prove.map((line) => fill(line, fault, labels, pins)) };
+  const place = placeWords(fault.pins ?? [], labels, null);
+  const fill = (line: string) => line.replaceAll("{at}", place);
+  return { next: [...lines.next.map(fill), ...(NEEDS_DEFERRAL.has(fault.code) ? [DEFERRAL] : [])], prove: lines.prove.map(fill) };
 }
 
 /** Cautions that go with any work after a check, and those of the kind of device. */

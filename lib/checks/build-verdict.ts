@@ -2,7 +2,7 @@ import type { Assessment, EvidenceRow, Fault, FaultChance, Standing } from "@/li
 import { adviceFor, cautionsFor } from "./advice";
 import type { Labels } from "./check-name";
 import type { FindingAdvice, Verdict } from "./verdict";
-import { settledPins, SURE, verdictSentence } from "./verdict-sentence";
+import { SURE, verdictSentence } from "./verdict-sentence";
 
 /** More findings than this are listed with their chances but get no advice of their own. */
 const MAX_ADVICE = 4;
@@ -25,9 +25,8 @@ export function evidenceFindingOf(standing: Pick<Standing, "faults">): Fault | n
   return best.pins ? { code: best.code, pins: best.pins } : { code: best.code };
 }
 
-function adviceOf(open: readonly FaultChance[], standing: Standing, labels: Labels): FindingAdvice[] {
-  const pins = settledPins(standing.pins);
-  return open.slice(0, MAX_ADVICE).map((finding) => ({ finding, ...adviceFor(finding, labels, pins) }));
+function adviceOf(open: readonly FaultChance[], labels: Labels): FindingAdvice[] {
+  return open.slice(0, MAX_ADVICE).map((finding) => ({ finding, ...adviceFor(finding, labels) }));
 }
 
 /**
@@ -53,7 +52,7 @@ export function buildVerdict({ labels, assessment, evidence, engineVersion }: Ve
     tellApart: separable || contradictory ? assessment.next.slice(0, MAX_TELL_APART).map(({ check, why }) => ({ check, why })) : [],
     evidence,
     evidenceFinding: evidenceFindingOf(assessment),
-    advice: contradictory ? [] : adviceOf(open, assessment, labels),
+    advice: contradictory ? [] : adviceOf(open, labels),
     cautions: cautionsFor(settledKind),
     engineVersion,
   };
