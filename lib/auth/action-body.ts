@@ -3,6 +3,8 @@ import { AppError } from "@/lib/errors";
 /** Largest body of a form or action, bytes; next.config.mjs has the same. */
 export const ACTION_LIMIT = 256 * 1024;
 
+const ACTION_ID = /^[0-9a-f]{42}$/;
+
 const malformed = () => new AppError("malformed-form", "The form cannot be read. Reload the page and try again.", 400);
 
 /**
@@ -34,11 +36,22 @@ function assertArguments(form: FormData): void {
   if (!Array.isArray(given) || !isPlain(given, form)) throw malformed();
 }
 
-/** Without JavaScript: the page's hidden fields name the action and its bound state. */
+/** Without JavaScript: the page's hidden fields name the action and point at its bound state. */
 function assertHiddenFields(form: FormData): void {
   for (const [key, value] of form.entries()) {
-    if (/^\$ACTION_\d+:\d+$/.test(key)) parseJson(value);
+    const [, group, part] = /^\$ACTION_(\d+):(\d+)$/.exec(key) ?? [];
+    if (group === undefined) continue;
+    const given = parseJson(value);
+    if (part === "0" ? !isReference(given, group, form) : !isPlain(given, form)) throw malformed();
   }
+}
+
+function isReference(given: unknown, group: string, form: FormData): boolean {
+  if (given === null || typeof given !== "object" || !("id" in given) || !("bound" in given)) return false;
+  const { id, bound } = given;
+  if (typeof id !== "string" || !ACTION_ID.test(id)) return false;
+  const part = typeof bound === "string" ? /^\$@(\d+)$/.exec(bound)?.[1] : undefined;
+  return bound === null || (part !== undefined && form.has(`$ACTION_${group}:${part}`));
 }
 
 /**
@@ -53,7 +66,7 @@ export async function assertActionBody(request: Request): Promise<void> {
   if (length === null) throw new AppError("length-required", "The request does not say how long it is.", 411);
   if (Number(length) > ACTION_LIMIT) throw new AppError("body-too-large", "The form is larger than 256 KB.", 413);
   const action = request.headers.get("next-action");
-  if (action !== null && !/^[0-9a-f]{42}$/.test(action)) throw malformed();
+  if (action !== null && !ACTION_ID.test(action)) throw malformed();
   const form = await request.clone().formData().catch(() => null);
   if (!form) throw malformed();
   if (action !== null) assertArguments(form);
