@@ -2,7 +2,8 @@ import type { ConnectorShape, Keying } from "@/lib/catalogue/entry-data";
 
 /** Drawing units; one unit is one CSS pixel at natural size, so text of 16 units is 16 px. */
 export const PITCH = 84;
-export const PAD = 64;
+/** From the outer cavities' middles to the shell: room for a tag below, and beside it just enough that four fit a phone. */
+const PAD = { x: 50, y: 64, round: 60, apex: 58 } as const;
 export const HOLE = 21;
 export const LATCH = { length: 84, depth: 26 } as const;
 export const FLAG = { width: 92, height: 34, gap: 34 } as const;
@@ -25,9 +26,9 @@ export function placeCavities(shape: ConnectorShape): readonly PlacedCavity[] {
 export function faceBox(shape: ConnectorShape, placed: readonly PlacedCavity[]): Box {
   const right = Math.max(...placed.map((c) => c.x));
   const bottom = Math.max(...placed.map((c) => c.y));
-  if (shape.outline !== "round") return { left: -PAD, top: -PAD, right: right + PAD, bottom: bottom + PAD };
+  if (shape.outline !== "round") return { left: -PAD.x, top: -PAD.y, right: right + PAD.x, bottom: bottom + PAD.y };
   const centre = { x: right / 2, y: bottom / 2 };
-  const radius = Math.max(...placed.map((c) => Math.hypot(c.x - centre.x, c.y - centre.y))) + PAD;
+  const radius = Math.max(...placed.map((c) => Math.hypot(c.x - centre.x, c.y - centre.y))) + PAD.round;
   return { left: centre.x - radius, top: centre.y - radius, right: centre.x + radius, bottom: centre.y + radius };
 }
 
@@ -36,7 +37,7 @@ export function trianglePoints(box: Box): readonly Point[] {
   const middle = (box.left + box.right) / 2;
   const shoulder = box.top + (box.bottom - box.top) * 0.52;
   return [
-    { x: middle - PAD, y: box.top }, { x: middle + PAD, y: box.top }, { x: box.right, y: shoulder },
+    { x: middle - PAD.apex, y: box.top }, { x: middle + PAD.apex, y: box.top }, { x: box.right, y: shoulder },
     { x: box.right, y: box.bottom }, { x: box.left, y: box.bottom }, { x: box.left, y: shoulder },
   ];
 }
@@ -53,7 +54,7 @@ export function keyingPlace(shape: ConnectorShape, box: Box, key: Keying): Point
     return { x: centre.x + radius * Math.cos(angle), y: centre.y + radius * Math.sin(angle), turn };
   }
   if (key.side === "top" || key.side === "bottom") {
-    const span = shape.outline === "triangle" && key.side === "top" ? { from: centre.x - PAD, to: centre.x + PAD } : { from: box.left, to: box.right };
+    const span = shape.outline === "triangle" && key.side === "top" ? { from: centre.x - PAD.apex, to: centre.x + PAD.apex } : { from: box.left, to: box.right };
     return { x: span.from + (span.to - span.from) * key.at, y: box[key.side], turn: base };
   }
   return { x: box[key.side], y: box.top + (box.bottom - box.top) * key.at, turn: base };

@@ -58,10 +58,13 @@ async function nearWords(db: Reader, word: string): Promise<readonly string[]> {
   return near.filter((match) => (match.score ?? 1) <= best + 0.5 / word.length).map((match) => match.item);
 }
 
-/** Last resort for words run together or badly spelled: entries that share most trigrams. */
-function alike(db: Reader, word: string): Promise<string[]> {
-  const grams = Array.from({ length: word.length - 2 }, (_, i) => quoted(word.slice(i, i + 3)));
-  return idsOf(db.all<{ id: string }>(sql`SELECT entry_id AS id FROM entry_grams WHERE entry_grams MATCH ${grams.join(" OR ")} ORDER BY rank LIMIT ${MOST_ALIKE}`));
+/** Last resort for words run together or badly spelled: entries that share at least half of the word's trigrams. */
+async function alike(db: Reader, word: string): Promise<string[]> {
+  const grams = Array.from({ length: word.length - 2 }, (_, i) => word.slice(i, i + 3));
+  const rows = await db.all<{ id: string; words: string }>(
+    sql`SELECT entry_id AS id, words FROM entry_grams WHERE entry_grams MATCH ${grams.map(quoted).join(" OR ")} ORDER BY rank LIMIT ${MOST_ALIKE}`,
+  );
+  return rows.filter(({ words }) => grams.filter((gram) => words.includes(gram)).length * 2 >= grams.length).map(({ id }) => id);
 }
 
 async function find(db: Reader, word: string): Promise<Found> {
