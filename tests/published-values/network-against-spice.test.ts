@@ -5,12 +5,12 @@ import { operatingPoint } from "../support/spice";
 
 /**
  * The engine's network solver against a general-purpose circuit simulator (SPICE in WebAssembly, default temperature 27 °C,
- * default junction conductance, diodes with emission coefficient 1). Networks are drawn with a fixed seed.
+ * default junction conductance, emission coefficients from 1 to 2). Networks are drawn with a fixed seed.
  */
 type Part =
   | { readonly type: "resistor"; readonly a: number; readonly b: number; readonly ohms: number }
   | { readonly type: "source"; readonly a: number; readonly b: number; readonly volts: number; readonly ohms: number }
-  | { readonly type: "diode"; readonly a: number; readonly b: number; readonly saturation: number };
+  | { readonly type: "diode"; readonly a: number; readonly b: number; readonly saturation: number; readonly emission: number };
 interface Network { readonly nodes: number; readonly parts: readonly Part[] }
 
 const NETWORKS = 260;
@@ -33,7 +33,7 @@ function drawNetwork(index: number): Network {
   const more = Array.from({ length: whole(0, 4) }, (): Part => ({ type: "resistor", ...pair(nodes), ohms: decades(0.05, 10e6) }));
   const sources = Array.from({ length: whole(1, 3) }, (): Part => ({ type: "source", ...pair(nodes), volts: 32 * draw() - 4, ohms: decades(0.02, 50e3) }));
   // Every third network is linear; saturation currents from a power diode's to a band-gap drop of several junctions.
-  const diodes = Array.from({ length: index % 3 === 0 ? 0 : whole(1, 4) }, (): Part => ({ type: "diode", ...pair(nodes), saturation: decades(1e-18, 1e-8) }));
+  const diodes = Array.from({ length: index % 3 === 0 ? 0 : whole(1, 4) }, (): Part => ({ type: "diode", ...pair(nodes), saturation: decades(1e-18, 1e-8), emission: 1 + draw() }));
   return { nodes, parts: [...tree, ...more, ...sources, ...diodes] };
 }
 
@@ -43,7 +43,7 @@ function solveOurs(network: Network): { settled: boolean; volts: number[] } {
   for (const part of network.parts) {
     if (part.type === "resistor") net.resistor(part.a, part.b, part.ohms);
     else if (part.type === "source") net.source(part.a, part.b, part.volts, part.ohms);
-    else net.diode(part.a, part.b, part.saturation);
+    else net.diode(part.a, part.b, part.saturation, part.emission);
   }
   return { settled: net.solve(), volts: Array.from(net.volts.subarray(1, network.nodes + 1)) };
 }
@@ -54,7 +54,7 @@ function netlist(network: Network, index: number): string[] {
     const id = `${index}_${k}`;
     if (part.type === "resistor") return [`R${id} ${node(part.a)} ${node(part.b)} ${part.ohms}`];
     if (part.type === "source") return [`V${id} s${id} ${node(part.b)} ${part.volts}`, `R${id} s${id} ${node(part.a)} ${part.ohms}`];
-    return [`.model m${id} D(IS=${part.saturation} N=1)`, `D${id} ${node(part.a)} ${node(part.b)} m${id}`];
+    return [`.model m${id} D(IS=${part.saturation} N=${part.emission})`, `D${id} ${node(part.a)} ${node(part.b)} m${id}`];
   });
 }
 
