@@ -4,4 +4,5 @@ export { parseCheck, vocabulary } from "./checks";
 export { DEFAULT_METER, meterLimit, standardUncertainty } from "./meter";
 export { assess } from "./assess";
 export { answerRequest, type Answer, type Refusal } from "./answer";
+export { effects, evidence, predict, tellApart } from "./explain";
 export { faultText, whyText } from "./words";
