@@ -1,8 +1,9 @@
 import { closeDatabase, readDb, write, type Database } from "@/db/client";
 import { migrateDatabase } from "@/db/migrate";
-import { entries, machines, people } from "@/db/schema";
+import { checks, entries, machines, people } from "@/db/schema";
 import { env } from "@/lib/env";
 import { seedCatalogue } from "./catalogue";
+import { seedChecks } from "./checks";
 import { seedMachines } from "./machines";
 import { DEMO_PASSWORD, DEMO_PEOPLE, seedPeople } from "./people";
 
@@ -13,6 +14,7 @@ const PARTS: readonly Part[] = [
   { name: "people", isEmpty: async () => (await readDb().$count(people)) === 0, seed: seedPeople },
   { name: "machines and meters", isEmpty: async () => (await readDb().$count(machines)) === 0, seed: seedMachines },
   { name: "catalogue", isEmpty: async () => (await readDb().$count(entries)) === 0, seed: seedCatalogue },
+  { name: "checks", isEmpty: async () => (await readDb().$count(checks)) === 0, seed: seedChecks },
 ];
 
 /** Fill what is empty with the demo workshop; what holds anything is left alone. */

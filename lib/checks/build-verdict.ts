@@ -1,4 +1,4 @@
-import type { Assessment, EvidenceRow, Fault, FaultChance, Standing } from "@/lib/diagnosis";
+import type { Assessment, EvidenceRow, Fault, FaultChance, NextCheck, Standing } from "@/lib/diagnosis";
 import { adviceFor, cautionsFor } from "./advice";
 import type { Labels } from "./check-name";
 import type { FindingAdvice, Verdict } from "./verdict";
@@ -15,6 +15,8 @@ export interface VerdictInput {
   readonly assessment: Exclude<Assessment, { state: "invalid-input" }>;
   /** Rows for `evidenceFindingOf(assessment)`. */
   readonly evidence: readonly EvidenceRow[];
+  /** Checks of the whole vocabulary, skipped ones too, that would tell the open findings apart; best first. */
+  readonly tellApart: readonly Pick<NextCheck, "check" | "why">[];
   readonly engineVersion: string;
 }
 
@@ -33,23 +35,24 @@ function adviceOf(open: readonly FaultChance[], labels: Labels): FindingAdvice[]
  * Turns an assessment into what is shown, printed and stored. Pure: no clock, no chance.
  * A contradictory set of readings gets no advice on repairs, only the readings to take again.
  */
-export function buildVerdict({ labels, assessment, evidence, engineVersion }: VerdictInput): Verdict {
+export function buildVerdict({ labels, assessment, evidence, tellApart, engineVersion }: VerdictInput): Verdict {
   const contradictory = assessment.state === "contradictory";
   const suspects = contradictory ? assessment.suspects : [];
   const open = assessment.openFindings;
   const settledKind = assessment.kinds[0] && assessment.kinds[0].p >= SURE ? assessment.kinds[0].kind : null;
-  const separable = open.length > 1 && !assessment.inseparable;
+  // By the whole vocabulary: a check that could not be made here would still tell them apart elsewhere.
+  const inseparable = open.length > 1 && tellApart.length === 0;
   return {
-    sentence: verdictSentence(assessment, labels, contradictory ? suspects : null),
+    sentence: verdictSentence({ ...assessment, inseparable }, labels, contradictory ? suspects : null),
     state: assessment.state,
     kinds: assessment.kinds,
     pins: assessment.pins,
     faults: assessment.faults,
     openFindings: open,
-    inseparable: assessment.inseparable,
+    inseparable,
     contradictory,
     suspects,
-    tellApart: separable || contradictory ? assessment.next.slice(0, MAX_TELL_APART).map(({ check, why }) => ({ check, why })) : [],
+    tellApart: open.length > 1 ? tellApart.slice(0, MAX_TELL_APART).map(({ check, why }) => ({ check, why })) : [],
     evidence,
     evidenceFinding: evidenceFindingOf(assessment),
     advice: contradictory ? [] : adviceOf(open, labels),

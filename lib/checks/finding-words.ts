@@ -41,11 +41,8 @@ const CLAUSES: Readonly<Record<FaultCode, { readonly one: string; readonly noPla
   "output-stuck-low": { one: "the device's output is stuck low", noPlace: "the device's output is stuck low" },
 };
 
-export const KIND_WORDS: Readonly<Record<Kind, string>> = {
-  potentiometer: "potentiometer",
-  pwm: "powered device with a PWM output",
-  voltage: "powered device with an analogue voltage output",
-};
+/** With their article, for sentences. */
+export const KIND_WORDS: Readonly<Record<Kind, string>> = { potentiometer: "a potentiometer", pwm: "a PWM device", voltage: "an analogue voltage device" };
 
 /** For lists and filters. */
 export const KIND_TITLES: Readonly<Record<Kind, string>> = { potentiometer: "Potentiometer", pwm: "PWM", voltage: "Analogue voltage" };

@@ -1,4 +1,4 @@
-import { assess, evidence, vocabulary, type Assessment } from "@/lib/diagnosis";
+import { assess, evidence, tellApart, vocabulary, type Assessment } from "@/lib/diagnosis";
 import { AppError } from "@/lib/errors";
 import { buildVerdict, evidenceFindingOf } from "./build-verdict";
 import type { Run } from "./run";
@@ -20,9 +20,11 @@ export function judge(run: Pick<Run, "setup" | "steps">): Judgement {
   if (readings.length === 0) throw new AppError("no-readings", "Take at least one reading before you finish.", 409);
   const assessment = assess(setup, readings);
   if (assessment.state === "invalid-input") throw new AppError(assessment.code, assessment.message, 422, assessment.where);
-  const finding = evidenceFindingOf(assessment) ?? { code: "none" as const };
+  const open = assessment.openFindings;
   const verdict = buildVerdict({
-    labels: run.setup.cavityLabels, assessment, evidence: evidence(setup, readings, finding), engineVersion: ENGINE_VERSION,
+    labels: run.setup.cavityLabels, assessment, engineVersion: ENGINE_VERSION,
+    evidence: evidence(setup, readings, evidenceFindingOf(assessment) ?? { code: "none" }),
+    tellApart: open.length > 1 ? tellApart({ ...setup, excluded: undefined }, readings, open) : [],
   });
   return { assessment, verdict };
 }

@@ -10,9 +10,9 @@ export const LIKELY = 0.6;
 function kindPart(kinds: readonly KindChance[]): string {
   const [best, second] = kinds;
   if (!best) return "The kind of device is not settled";
-  if (best.p >= SURE) return `It is a ${KIND_WORDS[best.kind]}`;
-  if (best.p >= LIKELY || !second) return `Most likely it is a ${KIND_WORDS[best.kind]}`;
-  return `The kind of device is not settled (a ${KIND_WORDS[best.kind]} or a ${KIND_WORDS[second.kind]})`;
+  if (best.p >= SURE) return `It is ${KIND_WORDS[best.kind]}`;
+  if (best.p >= LIKELY || !second) return `Most likely it is ${KIND_WORDS[best.kind]}`;
+  return `The kind of device is not settled (${KIND_WORDS[best.kind]} or ${KIND_WORDS[second.kind]})`;
 }
 
 function pinsPart(pins: readonly PinsChance[], labels: Labels): string {

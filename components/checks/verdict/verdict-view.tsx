@@ -70,7 +70,7 @@ function TellApart({ verdict, labels }: { verdict: Verdict; labels: Labels }) {
   if (verdict.tellApart.length === 0) {
     return (
       <Notice tone="ask" title="No reading with a meter will tell the rest apart">
-        <p>{verdict.inseparable ? "They read alike at every check. Go on with the steps below, the likeliest first, and check again after each." : "Nothing that can be read here separates them further. Go on with the steps below, the likeliest first."}</p>
+        <p>They read alike at every check. Go on with the steps below, the likeliest first, and check again after each.</p>
       </Notice>
     );
   }
