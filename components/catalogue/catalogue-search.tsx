@@ -82,9 +82,8 @@ function SearchFailed({ message, onRetry }: { readonly message: string; readonly
 
 /** Search field, facets and results; a plain form until the script is there, search as you type from then on. */
 export function CatalogueSearch({ initial, initialChoice }: CatalogueSearchProps) {
-  const { choice, setChoice, query, waiting } = useCatalogueSearch(initial, initialChoice);
+  const { choice, setChoice, query, result, waiting } = useCatalogueSearch(initial, initialChoice);
   const { field, list, onFieldKey, onListKey } = useResultKeys();
-  const result = query.data ?? initial;
   const filters = chosenCount(choice);
   const clear = () => setChoice({ ...choice, ...NOTHING_CHOSEN });
   const goTo = (page: number) => {

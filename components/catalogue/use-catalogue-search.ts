@@ -50,5 +50,8 @@ export function useCatalogueSearch(initial: SearchResult, initialChoice: SearchC
     initialData: params === initialParams ? initial : undefined,
     placeholderData: keepPreviousData,
   });
-  return { choice, setChoice, query, waiting: query.isFetching && (query.isPlaceholderData || query.isError) };
+  // After a failure there is no data under the new key: what was answered last stays on screen.
+  const [result, setResult] = useState(initial);
+  if (query.data && query.data !== result) setResult(query.data);
+  return { choice, setChoice, query, result, waiting: query.isFetching && (query.isPlaceholderData || query.isError) };
 }
