@@ -22,6 +22,11 @@ export interface Candidate {
   /** Whether the electronics run: known beforehand, or to be found from the volts across the device. */
   readonly running: Running;
   readonly ranges: Ranges;
+  /** Middle of every range in physical units: where an unknown stands that no reading speaks of. */
+  readonly middle: Float64Array;
+  /** Candidates with the same key are alike as seen on the parted device, or on the parted harness. */
+  readonly deviceKey: string;
+  readonly harnessKey: string;
   readonly logPrior: number;
 }
 
@@ -56,15 +61,22 @@ export const FAULT_PLACES: Readonly<Record<Family, readonly FaultPlace[]>> = {
 
 interface Parts { family: Family; kind: Kind; pins: PinAssignment; place: FaultPlace; pull: Pull; breakEnd: 0 | 1; running: Running; logPrior: number; expect?: Expect }
 
+/** Findings that show on the parted device, and those that leave the parted harness sound. */
+const DEVICE_FAULTS = new Set<FaultCode>(["wiper-open", "track-open"]);
+const HARNESS_SOUND = new Set<FaultCode>(["none", "wiper-open", "track-open", "track-worn", "output-dead", "output-stuck-high", "output-stuck-low"]);
+
 /** Builds one candidate; two candidates with the same `hypothesis.id` differ only in what nobody asks about. */
 export function makeCandidate(p: Parts): Candidate {
   const pinOf = ROLE_ORDER.map((role) => p.pins[role]) as [PinNumber, PinNumber, PinNumber];
-  const fault = faultOf(p.place, pinOf);
+  const fault = faultOf(p.place, pinOf), ranges = rangesFor(p.family, p.pull, p.place.code, p.expect);
+  const { code, at, at2 } = p.place;
   return {
     hypothesis: { id: hypothesisId(p.kind, pinOf, fault), kind: p.kind, pins: p.pins, fault },
-    family: p.family, pull: p.pull, code: p.place.code, at: p.place.at, at2: p.place.at2, breakEnd: p.breakEnd, running: p.running, pinOf,
+    family: p.family, pull: p.pull, code, at, at2, breakEnd: p.breakEnd, running: p.running, pinOf,
     suppliedByBattery: p.expect?.supplyVolts === "battery",
-    ranges: rangesFor(p.family, p.pull, p.place.code, p.expect), logPrior: p.logPrior,
+    ranges, middle: ranges.mean.map((m, i) => (ranges.log[i] ? Math.exp(m) : m)), logPrior: p.logPrior,
+    deviceKey: `${p.family}|${pinOf}|${DEVICE_FAULTS.has(code) ? code + p.breakEnd : ""}|${p.expect ? "entry" : ""}`,
+    harnessKey: `${p.family}|${p.pull}|${pinOf}|${HARNESS_SOUND.has(code) ? "" : `${code}${at}${at2}`}|${p.expect ? "entry" : ""}`,
   };
 }
 

@@ -12,7 +12,9 @@ const LOW_VOLTS = 0.05;
 /** Volts across the device below which it stops, and the share of a low supply (common practice). */
 const RUN_VOLTS = 4.3;
 const MIN_SUPPLY_SHARE = 0.85;
-const INNER = 4, PARTED_PIN = 5, CLAMPED = 6;
+/** Nodes: 1 to 3 the cavities by role, then the device's pin behind an open contact, then what is inside the device. */
+const PARTED_PIN = 4;
+const firstInside = (c: Candidate) => (c.code === "contact-open" ? 5 : 4);
 
 /** Mated and powered: mean volts of each role's cavity, and the swing where the signal pulses; per position. */
 export interface MatedVolts {
@@ -32,8 +34,9 @@ const scratch: Thevenin = { volts: 0, ohms: 0 };
 /** Node of the device's own pin: the cavity's node, unless that contact is open. */
 const pinNode = (c: Candidate, role: number) => (c.code === "contact-open" && c.at === role ? PARTED_PIN : role + 1);
 
-function stampHarness(c: Candidate, x: Float64Array): void {
-  net.reset(c.family === "potentiometer" ? PARTED_PIN : CLAMPED);
+/** Starts a network with the harness and room for `inside` nodes of the device. */
+function stampHarness(c: Candidate, x: Float64Array, inside: number): void {
+  net.reset(firstInside(c) - 1 + inside);
   for (let role = 0; role < 3; role++) {
     cavity(c, x, role, true, scratch);
     net.source(role + 1, 0, scratch.volts, scratch.ohms);
@@ -58,11 +61,12 @@ function solvePotentiometer(c: Candidate, x: Float64Array, out: MatedVolts): voi
   const track = x[P.track]!;
   for (let position = 0; position < 2; position++) {
     const share = clampShare(x[position === 0 ? P.rest : P.full]!);
-    stampHarness(c, x);
+    stampHarness(c, x, 1);
+    const wiper = firstInside(c);
     const broken = c.code === "track-open" ? c.breakEnd : -1;
-    if (broken !== SUPPLY) net.resistor(pinNode(c, SUPPLY), INNER, track * (1 - share));
-    if (broken !== GROUND) net.resistor(INNER, pinNode(c, GROUND), track * share);
-    if (c.code !== "wiper-open") net.resistor(INNER, pinNode(c, SIGNAL), x[P.wiper]!);
+    if (broken !== SUPPLY) net.resistor(pinNode(c, SUPPLY), wiper, track * (1 - share));
+    if (broken !== GROUND) net.resistor(wiper, pinNode(c, GROUND), track * share);
+    if (c.code !== "wiper-open") net.resistor(wiper, pinNode(c, SIGNAL), x[P.wiper]!);
     net.solve();
     keep(out, position);
   }
@@ -70,16 +74,27 @@ function solvePotentiometer(c: Candidate, x: Float64Array, out: MatedVolts): voi
 
 const saturation = (drop: number) => DROP_AMPERES * Math.exp(-drop / (EMISSION * THERMAL_VOLTS));
 
-/** The parts of an electronic device that conduct whether it runs or not. */
-function stampPassive(c: Candidate, x: Float64Array): void {
-  const supply = pinNode(c, SUPPLY), ground = pinNode(c, GROUND), signal = pinNode(c, SIGNAL);
-  net.diode(supply, INNER, saturation(x[P.dropSupply]!), EMISSION);
-  net.resistor(INNER, ground, x[P.internal]!);
-  net.diode(ground, CLAMPED, saturation(x[P.dropSignal]!), EMISSION);
-  net.resistor(CLAMPED, signal, x[P.clamp]!);
-  if (c.family !== "open-collector") net.diode(signal, INNER, saturation(x[P.dropSignal]!), EMISSION);
+/** Junction voltage from which the solution is sought, volts: near where a conducting junction ends up. */
+const GUESS_VOLTS = 0.45;
+
+/** The parts of an electronic device that conduct when it does not run: junctions into its inner supply, and leakage. */
+function stampIdle(c: Candidate, x: Float64Array): void {
+  const ground = pinNode(c, GROUND), signal = pinNode(c, SIGNAL), inner = firstInside(c);
+  net.diode(pinNode(c, SUPPLY), inner, saturation(x[P.dropSupply]!), EMISSION, GUESS_VOLTS);
+  net.resistor(inner, ground, x[P.internal]!);
+  if (c.family !== "open-collector") net.diode(signal, inner, saturation(x[P.dropSignal]!), EMISSION);
+  stampClamp(c, x, inner + 1);
   net.resistor(signal, ground, x[P.leak]!);
 }
+
+/** The clamp from ground to signal; it conducts only where ground stands above the signal. */
+function stampClamp(c: Candidate, x: Float64Array, node: number): void {
+  net.diode(pinNode(c, GROUND), node, saturation(x[P.dropSignal]!), EMISSION, GUESS_VOLTS);
+  net.resistor(node, pinNode(c, SIGNAL), x[P.clamp]!);
+}
+
+/** Below this forward voltage a clamp carries next to nothing, volts. */
+const CLAMP_FROM_VOLTS = 0.25;
 
 type Drive = "released" | "low" | "high" | "rest" | "full";
 
@@ -87,16 +102,28 @@ function stampRunning(c: Candidate, x: Float64Array, drive: Drive): void {
   const supply = pinNode(c, SUPPLY), ground = pinNode(c, GROUND), signal = pinNode(c, SIGNAL);
   const fed = supplyVolts(c, x);
   net.resistor(supply, ground, fed / x[P.load]!);
+  net.resistor(signal, ground, x[P.leak]!);
   if (drive === "released") return;
   if (c.family === "open-collector") { if (drive === "low") net.resistor(signal, ground, x[P.driveLow]!); return; }
   const level = drive === "low" ? LOW_VOLTS : drive === "high" ? Math.min(x[P.high]!, fed) - 0.1 : x[drive === "rest" ? P.rest : P.full]!;
   net.source(signal, ground, level, OUTPUT_OHMS);
 }
 
-function solveDrive(c: Candidate, x: Float64Array, drive: Drive | null): void {
-  stampHarness(c, x);
-  stampPassive(c, x);
-  if (drive) stampRunning(c, x, drive);
+function solveIdle(c: Candidate, x: Float64Array): void {
+  stampHarness(c, x, 2);
+  stampIdle(c, x);
+  net.solve();
+}
+
+/** A running device: its load hides the junctions to its inner supply, so the network is linear unless the clamp conducts. */
+function solveDrive(c: Candidate, x: Float64Array, drive: Drive): void {
+  stampHarness(c, x, 0);
+  stampRunning(c, x, drive);
+  net.solve();
+  if (net.volts[pinNode(c, GROUND)]! - net.volts[pinNode(c, SIGNAL)]! < CLAMP_FROM_VOLTS) return;
+  stampHarness(c, x, 1);
+  stampRunning(c, x, drive);
+  stampClamp(c, x, firstInside(c));
   net.solve();
 }
 
@@ -104,10 +131,9 @@ const acrossDevice = (c: Candidate) => net.volts[pinNode(c, SUPPLY)]! - net.volt
 
 function solveElectronic(c: Candidate, x: Float64Array, out: MatedVolts): void {
   const drives = drivesOf(c);
-  solveDrive(c, x, c.running === "no" ? null : drives[0]);
-  out.running = c.running === "no" ? 0 : chanceOfRunning(acrossDevice(c), supplyVolts(c, x));
-  if (c.running === "by-volts" && out.running < 0.5) solveDrive(c, x, null);
-  if (c.running !== "yes" && out.running < 0.5) { keep(out, 0); keep(out, 1); out.running = 0; return; }
+  if (c.running === "no") out.running = 0;
+  else { solveDrive(c, x, drives[0]); out.running = chanceOfRunning(acrossDevice(c), supplyVolts(c, x)); }
+  if (c.running !== "yes" && out.running < 0.5) { solveIdle(c, x); keep(out, 0); keep(out, 1); out.running = 0; return; }
   keep(out, 0);
   solveDrive(c, x, drives[1]);
   keep(out, 1);

@@ -58,7 +58,8 @@ function physicalAt(c: Candidate, i: number, z: number): number {
 
 /** Physical values at z, written into `out`. */
 export function physical(c: Candidate, z: Float64Array, out: Float64Array): Float64Array {
-  for (let i = 0; i < PARAMETER_COUNT; i++) out[i] = physicalAt(c, i, z[i]!);
+  out.set(c.middle);
+  for (let i = 0; i < PARAMETER_COUNT; i++) if (z[i] !== 0) out[i] = physicalAt(c, i, z[i]!);
   return out;
 }
 

@@ -3,13 +3,14 @@ import { P } from "../circuit/parameters";
 import { GROUP } from "../circuit/predict";
 
 const HAS_FAULT_OHMS = new Set(["wire-resistive", "short-to-ground", "short-to-battery", "wires-shorted"]);
-const cache = new Map<string, readonly number[]>();
+const cache = new WeakMap<Candidate, Map<number, readonly number[]>>();
 
 /** Which unknowns the given groups of checks can speak of, for this candidate; ascending places. */
 export function movedBy(c: Candidate, groups: number): readonly number[] {
-  const key = `${c.family}|${c.pull}|${c.code}|${c.suppliedByBattery}|${groups}`;
-  let list = cache.get(key);
-  if (!list) cache.set(key, list = listFor(c, groups));
+  let lists = cache.get(c);
+  if (!lists) cache.set(c, lists = new Map());
+  let list = lists.get(groups);
+  if (!list) lists.set(groups, list = listFor(c, groups));
   return list;
 }
 

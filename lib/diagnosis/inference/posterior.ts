@@ -49,8 +49,8 @@ export function believe(candidates: readonly Candidate[], obs: readonly Observat
 function blocksOf(candidates: readonly Candidate[], parts: Parts): Block[] {
   const byKey = new Map<string, Candidate[]>();
   for (const c of candidates) {
-    const list = byKey.get(deviceKey(c));
-    if (list) list.push(c); else byKey.set(deviceKey(c), [c]);
+    const list = byKey.get(c.deviceKey);
+    if (list) list.push(c); else byKey.set(c.deviceKey, [c]);
   }
   const blocks = [...byKey.values()].map((members) => {
     const device = parts.device.observations.length === 0 ? NO_FIT : fitCandidate(members[0]!, parts.device, ZERO);
@@ -80,16 +80,11 @@ function blockBelief(block: Block, parts: Parts, harnessFits: Map<string, Fit>, 
 
 function harnessFit(cache: Map<string, Fit>, c: Candidate, evidence: Evidence, toBeat: number): Fit {
   if (evidence.observations.length === 0) return NO_FIT;
-  const key = harnessKey(c);
-  let fit = cache.get(key);
-  if (!fit) cache.set(key, fit = fitCandidate(c, evidence, ZERO, toBeat));
+  let fit = cache.get(c.harnessKey);
+  if (!fit) cache.set(c.harnessKey, fit = fitCandidate(c, evidence, ZERO, toBeat));
   return fit;
 }
 
-const DEVICE_FAULTS = new Set(["wiper-open", "track-open"]);
-const deviceKey = (c: Candidate) => `${c.family}|${c.pinOf}|${DEVICE_FAULTS.has(c.code) ? c.code + c.breakEnd : ""}`;
-const HARNESS_SOUND = new Set(["none", "wiper-open", "track-open", "track-worn", "output-dead", "output-stuck-high", "output-stuck-low"]);
-const harnessKey = (c: Candidate) => `${c.family}|${c.pull}|${c.pinOf}|${HARNESS_SOUND.has(c.code) ? "" : `${c.code}${c.at}${c.at2}`}`;
 const byId = (a: Candidate, b: Candidate) => (a.hypothesis.id < b.hypothesis.id ? -1 : 1);
 
 function startOf(...fits: readonly Fit[]): Float64Array {

@@ -54,12 +54,15 @@ export class NodalNetwork {
     this.inject(this.currents, plus, minus, volts * g);
   }
 
-  /** A diode from anode to cathode; `saturation` is its saturation current in amperes, `emission` its emission coefficient (1 to 2 for silicon). */
-  diode(anode: number, cathode: number, saturation: number, emission = 1): void {
+  /**
+   * A diode from anode to cathode; `saturation` is its saturation current in amperes, `emission` its emission coefficient (1 to 2 for
+   * silicon), `guess` the junction voltage to start from, volts. The guess changes how soon, not where, the solution is found.
+   */
+  diode(anode: number, cathode: number, saturation: number, emission = 1, guess = 0): void {
     const thermal = emission * THERMAL_VOLTS, limitVolts = thermal * Math.log(thermal / (Math.SQRT2 * saturation));
     const slot = this.diodes[this.diodeCount];
-    if (slot) Object.assign(slot, { anode, cathode, saturation, thermal, limitVolts, volts: 0 });
-    else this.diodes.push({ anode, cathode, saturation, thermal, limitVolts, volts: 0 });
+    if (slot) Object.assign(slot, { anode, cathode, saturation, thermal, limitVolts, volts: guess });
+    else this.diodes.push({ anode, cathode, saturation, thermal, limitVolts, volts: guess });
     this.diodeCount++;
   }
 
