@@ -18,12 +18,12 @@ const plain = (reference: string, bound: Readonly<Record<string, string>> = {}) 
 
 describe("the body of an action sent by a page's script", () => {
   it("passes as our own pages send it", async () => {
-    expect(await scripted('[{"email":"","note":"$$ 5"},"$K1"]', { "1_email": "x", "1_password": "$F9 as typed" })).toBe("passes");
+    expect(await scripted('[{"email":"","note":"$$ 5"},"$K1"]', { "_1_email": "x", "_1_password": "$F9 as typed", "_1_$ACTION_1:0": "" })).toBe("passes");
     expect(await scripted("[]")).toBe("passes");
-    expect(await scripted('["$undefined",null,7,true]')).toBe("passes");
+    expect(await scripted('["$undefined",null,7,true,"$NaN","$D2026-12-01T00:00:00.000Z"]')).toBe("passes");
   });
 
-  it.each(["", "garbage", "{}", '"text"', '["$F1"]', '["$K1"]', '[{"deep":[["$@1"]]}]', '["$Q2","$W3","$B4","$1"]'])("is refused as malformed: %s", async (args) => {
+  it.each(["", "garbage", "{}", '"text"', '["$F1"]', '["$Kz"]', '[{"deep":[["$@1"]]}]', '["$Q2","$W3","$B4","$1"]'])("is refused as malformed: %s", async (args) => {
     expect(await scripted(args)).toBe("malformed-form");
   });
 

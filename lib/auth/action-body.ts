@@ -7,17 +7,14 @@ const ACTION_ID = /^[0-9a-f]{42}$/;
 
 const malformed = () => new AppError("malformed-form", "The form cannot be read. Reload the page and try again.", 400);
 
-/**
- * Values that React's encoding may hold in what our own pages send: text (a leading $ is doubled), undefined,
- * and a form ($K) whose fields are there. Everything else of that encoding makes the framework fail on decoding.
- */
-function isPlain(value: unknown, form: FormData): boolean {
-  if (typeof value === "string" && value.startsWith("$") && !value.startsWith("$$") && value !== "$undefined") {
-    const id = /^\$K([0-9a-f]+)$/.exec(value)?.[1];
-    return id !== undefined && [...form.keys()].some((key) => key.startsWith(`${id}_`));
-  }
-  if (Array.isArray(value)) return value.every((item) => isPlain(item, form));
-  if (value !== null && typeof value === "object") return Object.values(value).every((item) => isPlain(item, form));
+/** Of React's encoding, what decodes whatever it says: undefined, numbers JSON lacks, dates, and a form, whose fields follow as _1_name. */
+const HARMLESS = /^\$(undefined|NaN|-?Infinity|-0|D[^$]*|K[0-9a-f]+)$/;
+
+/** Values that our own pages send; in text a leading $ is doubled. Everything else of the encoding can fail on decoding. */
+function isPlain(value: unknown): boolean {
+  if (typeof value === "string") return !value.startsWith("$") || value.startsWith("$$") || HARMLESS.test(value);
+  if (Array.isArray(value)) return value.every(isPlain);
+  if (value !== null && typeof value === "object") return Object.values(value).every(isPlain);
   return true;
 }
 
@@ -33,7 +30,7 @@ function parseJson(text: FormDataEntryValue | null): unknown {
 /** With JavaScript: field 0 holds the arguments, the form's own fields follow under a prefix. */
 function assertArguments(form: FormData): void {
   const given = parseJson(form.get("0"));
-  if (!Array.isArray(given) || !isPlain(given, form)) throw malformed();
+  if (!Array.isArray(given) || !isPlain(given)) throw malformed();
 }
 
 /** Without JavaScript: the page's hidden fields name the action and point at its bound state. */
@@ -42,7 +39,7 @@ function assertHiddenFields(form: FormData): void {
     const [, group, part] = /^\$ACTION_(\d+):(\d+)$/.exec(key) ?? [];
     if (group === undefined) continue;
     const given = parseJson(value);
-    if (part === "0" ? !isReference(given, group, form) : !isPlain(given, form)) throw malformed();
+    if (part === "0" ? !isReference(given, group, form) : !isPlain(given)) throw malformed();
   }
 }
 
