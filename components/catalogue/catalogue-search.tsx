@@ -1,6 +1,6 @@
 "use client";
 
-import type { KeyboardEventHandler, ReactNode, Ref } from "react";
+import type { KeyboardEventHandler, ReactNode, Ref, SubmitEvent } from "react";
 import { Button, ButtonLink, EmptyState, Notice } from "@/components/ui";
 import { chosenCount, type SearchChoice, toggled } from "@/lib/catalogue/search-params";
 import type { SearchResult } from "@/lib/catalogue/search-result";
@@ -51,20 +51,23 @@ function SearchField({ q, ref, onKeyDown, onText }: SearchFieldProps) {
         />
         <Button type="submit" tone="main" className="min-h-14!">Search</Button>
       </div>
-      <p id="catalogue-keys" className="mt-1 text-quiet">As you remember it: “AMI 4-210”, “ladder angel”, “BN/BU/BK”. <span className="hidden md:inline">Keys: / to this field, arrows through the list, Enter opens.</span></p>
+      <p id="catalogue-keys" className="mt-1 text-quiet">As you remember it: “AMI 4-210”, “ladder angel”, “BN/BU/BK”. <span className="hidden md:inline">Keys: / to this field, Enter or arrows to the list.</span></p>
     </div>
   );
 }
 
 /** On a phone the facets open and close by a tick box of their own, so that they do without a script; on a desk they stand open. */
-function Narrowing({ filters, children }: { readonly filters: number; readonly children: ReactNode }) {
+function Narrowing({ filters, total, children }: { readonly filters: number; readonly total: number; readonly children: ReactNode }) {
   return (
     <div>
       <input type="checkbox" id="catalogue-narrow" className="peer sr-only lg:hidden" />
       <label htmlFor="catalogue-narrow" className="tag-cut button button-plain min-h-touch w-full peer-focus-visible:outline-3 peer-focus-visible:outline-offset-3 peer-focus-visible:outline-bench lg:hidden">
         Narrow down{filters > 0 ? ` (${filters} chosen)` : ""}
       </label>
-      <div className="mt-4 hidden peer-checked:block lg:mt-0 lg:block">{children}</div>
+      <div className="mt-4 hidden peer-checked:block lg:mt-0 lg:block">
+        {children}
+        <label htmlFor="catalogue-narrow" className="tag-cut button button-main mt-5 min-h-touch w-full lg:hidden">Show {total === 1 ? "1 entry" : `${total} entries`}</label>
+      </div>
     </div>
   );
 }
@@ -83,17 +86,22 @@ function SearchFailed({ message, onRetry }: { readonly message: string; readonly
 /** Search field, facets and results; a plain form until the script is there, search as you type from then on. */
 export function CatalogueSearch({ initial, initialChoice }: CatalogueSearchProps) {
   const { choice, setChoice, query, result, waiting } = useCatalogueSearch(initial, initialChoice);
-  const { field, list, onFieldKey, onListKey } = useResultKeys();
+  const { field, list, toFirst, onFieldKey, onListKey } = useResultKeys();
   const filters = chosenCount(choice);
   const clear = () => setChoice({ ...choice, ...NOTHING_CHOSEN });
+  const onSubmit = (event: SubmitEvent) => {
+    event.preventDefault();
+    // While the answer to what was typed is still under way, the first row is that of another question.
+    if (result.q.trim() === choice.q.trim()) toFirst();
+  };
   const goTo = (page: number) => {
     setChoice({ ...choice, page });
     list.current?.scrollIntoView({ block: "start" });
   };
   return (
-    <form action="/catalogue" method="get" role="search" onSubmit={(event) => event.preventDefault()} className="grid gap-6 lg:grid-cols-[17rem_1fr] lg:gap-10">
+    <form action="/catalogue" method="get" role="search" onSubmit={onSubmit} className="grid gap-6 lg:grid-cols-[17rem_1fr] lg:gap-10">
       <SearchField q={choice.q} ref={field} onKeyDown={onFieldKey} onText={(q) => setChoice({ ...choice, q, page: 1 })} />
-      <Narrowing filters={filters}>
+      <Narrowing filters={filters} total={result.total}>
         <FacetPanel groups={result.facets} isChosen={(facet, value) => choice[facet].includes(value)} onToggle={(facet, value) => setChoice(toggled(choice, facet, value))} />
       </Narrowing>
       <div className="min-w-0">

@@ -9,7 +9,8 @@ function isTyping(target: EventTarget | null): boolean {
 
 /**
  * Keys of a search: "/" goes to the field, arrow down from the field to the first result, arrows up and down through the
- * results, up from the first one and Escape back to the field. Enter follows the link, as everywhere.
+ * results, up from the first one and Escape back to the field. Enter follows the link, as everywhere; in the field the
+ * form's owner sends it to the first result, which also puts a phone's keyboard away.
  */
 export function useResultKeys() {
   const field = useRef<HTMLInputElement>(null);
@@ -28,10 +29,12 @@ export function useResultKeys() {
 
   const links = () => [...(list.current?.querySelectorAll<HTMLAnchorElement>("a[data-result]") ?? [])];
 
+  const toFirst = () => links()[0]?.focus();
+
   const onFieldKey = (event: KeyboardEvent) => {
     if (event.key !== "ArrowDown") return;
     event.preventDefault();
-    links()[0]?.focus();
+    toFirst();
   };
 
   const onListKey = (event: KeyboardEvent) => {
@@ -44,5 +47,5 @@ export function useResultKeys() {
     event.preventDefault();
   };
 
-  return { field, list, onFieldKey, onListKey };
+  return { field, list, toFirst, onFieldKey, onListKey };
 }

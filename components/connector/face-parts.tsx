@@ -20,8 +20,8 @@ export function KeyingMark({ shape, box, mark }: { shape: ConnectorShape; box: B
   const rib = mark.type === "rib";
   return (
     <g transform={`translate(${place.x} ${place.y}) rotate(${place.turn})`}>
-      <rect x={-width / 2} y={rib ? -11 : -2} width={width} height={rib ? 12 : 14} className={rib ? "fill-ink stroke-ink" : "fill-paper stroke-ink"} strokeWidth={3} />
-      {!rib && <line x1={-width / 2 + 2} x2={width / 2 - 2} y1={-2} y2={-2} className="stroke-paper" strokeWidth={4} />}
+      <rect x={-width / 2} y={rib ? -11 : -2} width={width} height={rib ? 12 : 14} className={rib ? "fill-ink stroke-ink" : "fill-sheet stroke-ink"} strokeWidth={3} />
+      {!rib && <line x1={-width / 2 + 2} x2={width / 2 - 2} y1={-2} y2={-2} className="stroke-sheet" strokeWidth={4} />}
     </g>
   );
 }
