@@ -20,18 +20,15 @@ const MOST_ALIKE = 60;
 
 const quoted = (word: string) => `"${word}"`;
 
-async function idsOf(rows: Promise<readonly { id: string }[]>): Promise<string[]> {
-  return (await rows).map((row) => row.id);
+/** Ids of one full-text question, as one JSON text: a common word has thousands, and row by row they take far longer. */
+async function idsOf(db: Reader, table: "entry_words" | "entry_grams", match: string): Promise<string[]> {
+  const [answer] = await db.all<{ ids: string }>(sql`SELECT json_group_array(entry_id) AS ids FROM ${sql.raw(table)} WHERE ${sql.raw(table)} MATCH ${match}`);
+  return JSON.parse(answer?.ids ?? "[]") as string[];
 }
 
-const withPrefix = (db: Reader, word: string) =>
-  idsOf(db.all<{ id: string }>(sql`SELECT entry_id AS id FROM entry_words WHERE entry_words MATCH ${`${quoted(word)}*`}`));
-
-const withPart = (db: Reader, word: string) =>
-  idsOf(db.all<{ id: string }>(sql`SELECT entry_id AS id FROM entry_grams WHERE entry_grams MATCH ${quoted(word)}`));
-
-const withAnyWord = (db: Reader, words: readonly string[]) =>
-  idsOf(db.all<{ id: string }>(sql`SELECT entry_id AS id FROM entry_words WHERE entry_words MATCH ${words.map(quoted).join(" OR ")}`));
+const withPrefix = (db: Reader, word: string) => idsOf(db, "entry_words", `${quoted(word)}*`);
+const withPart = (db: Reader, word: string) => idsOf(db, "entry_grams", quoted(word));
+const withAnyWord = (db: Reader, words: readonly string[]) => idsOf(db, "entry_words", words.map(quoted).join(" OR "));
 
 /** Letters of a misspelling that may be wrong: none in a short word, where everything is near everything. */
 function errorsAllowed(word: string): number {
@@ -39,23 +36,30 @@ function errorsAllowed(word: string): number {
 }
 
 /**
- * Words of the catalogue that a misspelling may stand for. Letters are compared with words, and what has a digit only with part
- * numbers of the same first character, or a large catalogue's part numbers would outweigh its words a hundred to one.
+ * Words of the catalogue that a misspelling may stand for, by length. Letters are compared with words, and what has a digit with part
+ * numbers, or a large catalogue's part numbers would outweigh its words a hundred to one.
  */
-function vocabulary(db: Reader, word: string, errors: number): Promise<{ term: string }[]> {
-  const alike = /[0-9]/.test(word) ? sql`term GLOB ${`${word.slice(0, 1)}*[0-9]*`}` : sql`term NOT GLOB '*[0-9]*'`;
-  return db.all<{ term: string }>(sql`SELECT term FROM entry_terms WHERE length(term) BETWEEN ${word.length - errors} AND ${word.length + errors} AND ${alike}`);
+async function vocabulary(db: Reader, word: string, errors: number, initial: boolean): Promise<readonly string[]> {
+  // The range is answered from the index; without it every word of the catalogue is looked at.
+  const range = initial ? sql`term >= ${word.slice(0, 1)} AND term < ${word.slice(0, 1) + "\uffff"} AND` : sql``;
+  const digits = /[0-9]/.test(word) ? sql`term GLOB '*[0-9]*'` : sql`term NOT GLOB '*[0-9]*'`;
+  const rows = await db.all<{ term: string }>(sql`SELECT term FROM entry_terms WHERE ${range} length(term) BETWEEN ${word.length - errors} AND ${word.length + errors} AND ${digits}`);
+  return rows.map((row) => row.term);
 }
 
-/** Words of the catalogue within the errors allowed, nearest first. */
-async function nearWords(db: Reader, word: string): Promise<readonly string[]> {
-  const errors = errorsAllowed(word);
-  if (errors === 0) return [];
-  const terms = await vocabulary(db, word, errors);
-  const fuse = new Fuse(terms.map((row) => row.term), { includeScore: true, ignoreLocation: true, ignoreFieldNorm: true, threshold: errors / word.length + 0.001 });
+function nearest(terms: readonly string[], word: string, errors: number): readonly string[] {
+  const fuse = new Fuse(terms, { includeScore: true, ignoreLocation: true, ignoreFieldNorm: true, threshold: errors / word.length + 0.001 });
   const near = fuse.search(word, { limit: MOST_NEAR_WORDS });
   const best = near[0]?.score ?? 0;
   return near.filter((match) => (match.score ?? 1) <= best + 0.5 / word.length).map((match) => match.item);
+}
+
+/** Words of the catalogue within the errors allowed, nearest first: those with the same first letter, and only without any of them all others. */
+async function nearWords(db: Reader, word: string): Promise<readonly string[]> {
+  const errors = errorsAllowed(word);
+  if (errors === 0) return [];
+  const sameStart = nearest(await vocabulary(db, word, errors, true), word, errors);
+  return sameStart.length > 0 ? sameStart : nearest(await vocabulary(db, word, errors, false), word, errors);
 }
 
 /** Last resort for words run together or badly spelled: entries that share at least half of the word's trigrams. */

@@ -24,10 +24,12 @@ const shown = and(eq(entryVersions.id, entries.currentVersionId), isNull(entries
 /** Rows of the entries shown; only those with the given ids when there are any to go by. */
 export async function searchRows(db: Reader, ids: ReadonlySet<string> | null): Promise<readonly SearchRow[]> {
   const wanted = ids ? sql`AND e.id IN (SELECT value FROM json_each(${JSON.stringify([...ids])}))` : sql``;
-  // Plain SQL: mapping five thousand rows column by column through the query builder takes longer than reading them.
-  return db.all<SearchRow>(sql`
-    SELECT e.id, e.slug, v.name, v.kind, v.maker, v.quantity, v.connector_shape AS connector, v.supply, v.colours
+  // As one JSON text: five thousand rows handed over one by one take four times as long.
+  const [answer] = await db.all<{ rows: string }>(sql`
+    SELECT json_group_array(json_object('id', e.id, 'slug', e.slug, 'name', v.name, 'kind', v.kind, 'maker', v.maker,
+      'quantity', v.quantity, 'connector', v.connector_shape, 'supply', v.supply, 'colours', v.colours)) AS rows
     FROM entries e JOIN entry_versions v ON v.id = e.current_version_id WHERE e.retired_at IS NULL ${wanted}`);
+  return JSON.parse(answer?.rows ?? "[]") as SearchRow[];
 }
 
 /** Part numbers by entry id, for the rows that are ranked: they stand in the data, which a whole catalogue would read in vain. */

@@ -44,6 +44,7 @@ describe("search as typed", () => {
     ["tarctor throtle", "Hand throttle lever, tractor"],
     ["hydralic presure 250", "Hydraulic pressure sensor, 250 bar"],
     ["weed cuter boom", "Weed-cutter boom height sensor"],
+    ["hweed cutter boom", "Weed-cutter boom height sensor"],
     ["boomheight", "Weed-cutter boom height sensor"],
     ["ladder angel stern", "Stern-ladder angle sensor"],
   ])("%s", async (q, first) => {
