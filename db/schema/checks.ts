@@ -24,6 +24,7 @@ export const checks = sqliteTable("checks", {
   kind: text("kind"),
   findingCode: text("finding_code"),
   findingChance: real("finding_chance"),
+  /** The verdict in a few words, for lists. */
   sentence: text("sentence"),
 }, (t) => [
   // The log pages by (startedAt, id), newest first, whichever filter is on.

@@ -2,7 +2,7 @@ import type { Assessment, EvidenceRow, Fault, FaultChance, NextCheck, Standing }
 import { adviceFor, cautionsFor } from "./advice";
 import type { Labels } from "./check-name";
 import type { FindingAdvice, Verdict } from "./verdict";
-import { SURE, verdictSentence } from "./verdict-sentence";
+import { shortVerdict, SURE, verdictSentence } from "./verdict-sentence";
 
 /** More findings than this are listed with their chances but get no advice of their own. */
 const MAX_ADVICE = 4;
@@ -44,6 +44,7 @@ export function buildVerdict({ labels, assessment, evidence, tellApart, engineVe
   const inseparable = open.length > 1 && tellApart.length === 0;
   return {
     sentence: verdictSentence({ ...assessment, inseparable }, labels, contradictory ? suspects : null),
+    short: shortVerdict(open, labels, contradictory),
     state: assessment.state,
     kinds: assessment.kinds,
     pins: assessment.pins,

@@ -11,8 +11,11 @@ export function checkName(code: string, labels: Labels): string {
   return spec ? checkTitle(spec, labels) : code;
 }
 
-/** A reading with its unit, no more digits than the limit of error allows; words as they are ("none" as "no signal"). */
-export function readingWords(code: string, value: ReadingValue, limit: number | null): string {
+/**
+ * A reading with its unit as the meter showed it, four digits at most; words as they are ("none" as "no signal").
+ * With a limit of error, no digit that lies below it.
+ */
+export function readingWords(code: string, value: ReadingValue, limit: number | null = null): string {
   const unit = parseCheck(code)?.unit;
   if (typeof value === "string") return value === "none" ? "no signal" : value;
   if (!unit || unit === "word") return String(value);

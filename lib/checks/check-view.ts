@@ -25,6 +25,7 @@ export interface CheckRow {
   readonly state: CheckStateName;
   readonly startedAt: string;
   readonly finishedAt: string | null;
+  /** The verdict in a few words. */
   readonly sentence: string | null;
   readonly kind: string | null;
   readonly findingCode: string | null;

@@ -8,6 +8,9 @@ function wordText(word: string): string {
   return word === "none" ? "no signal" : word;
 }
 
+/** From this ratio of its ends a band counts as wide. */
+const WIDE = 3;
+
 /**
  * What a hypothesis expects of a reading, e.g. "4.9 V to 5.1 V", "OL", "smooth or jumps".
  * The number is the band that holds 95 %; its digits stop where the band's own width makes them idle.
@@ -17,8 +20,9 @@ export function expectedWords(prediction: Prediction): string {
   const words = prediction.words.filter((w) => w.p >= WORD_FLOOR).map((w) => wordText(w.word));
   if (!prediction.number || !unit || unit === "word") return words.length > 0 ? words.join(" or ") : "anything";
   const { low, high } = prediction.number;
-  const limit = (high - low) / 4;
-  const [from, to] = [formatQuantity(low, unit, { limit }), formatQuantity(high, unit, { limit })];
+  // A band over decades is said in two digits at each end; a narrow one as finely as its width makes sense of.
+  const limitAt = (end: number) => (low > 0 && high > WIDE * low ? end / 10 : (high - low) / 4);
+  const [from, to] = [formatQuantity(low, unit, { limit: limitAt(low) }), formatQuantity(high, unit, { limit: limitAt(high) })];
   const band = from === to ? from : `${from} to ${to}`;
   return words.length > 0 ? `${band}, or ${words.join(" or ")}` : band;
 }
@@ -55,7 +59,7 @@ export const BEARING_WORDS: Readonly<Record<Bearing, string>> = {
 /** Meter's limit of error at a reading, e.g. "± 0.029 V"; words have none. */
 export function limitWords(row: Pick<EvidenceRow, "check" | "value" | "limit">): string {
   const unit = parseCheck(row.check)?.unit;
-  if (row.limit === null || !unit || unit === "word" || typeof row.value === "string") return "none: a word";
+  if (row.limit === null || !unit || unit === "word" || typeof row.value === "string") return "none";
   // Two digits of the limit itself; its own size stands in for its uncertainty.
   return `\u00b1\u00a0${formatQuantity(row.limit, unit, { limit: row.limit / 9 })}`;
 }

@@ -1,4 +1,4 @@
-import type { FaultChance, KindChance, PinsChance, Standing } from "@/lib/diagnosis";
+import { faultText, type FaultChance, type KindChance, type PinsChance, type Standing } from "@/lib/diagnosis";
 import { checkName, type Labels } from "./check-name";
 import { findingClause, KIND_WORDS } from "./finding-words";
 
@@ -59,4 +59,18 @@ export function verdictSentence(standing: Standing, labels: Labels, suspects: re
   const pins = settledPins(standing.pins);
   const finding = findingPart(standing.openFindings, standing.inseparable, (fault) => findingClause(fault, labels, pins));
   return `${kindPart(standing.kinds)}${pinsPart(standing.pins, labels)}, ${finding}.`;
+}
+
+const sentenceCase = (text: string): string => `${text.charAt(0).toUpperCase()}${text.slice(1)}.`;
+
+/** The finding alone, in a few words for lists, with the same hedges as the whole sentence. */
+export function shortVerdict(open: readonly FaultChance[], labels: Labels, contradictory: boolean): string {
+  const [best, second] = open;
+  if (contradictory) return "Readings contradict each other.";
+  if (!best) return "Nothing settled.";
+  const words = faultText(best, labels);
+  if (!second && best.p >= SURE) return sentenceCase(words);
+  if (best.p >= LIKELY) return sentenceCase(`most likely ${words}`);
+  if (open.length === 2 && second) return sentenceCase(`${words}, or ${faultText(second, labels)}`);
+  return sentenceCase(`not settled: ${words}, or one of ${open.length - 1} more`);
 }

@@ -13,6 +13,8 @@ export interface FindingAdvice {
 export interface Verdict {
   /** One sentence a colleague would say, never surer than the evidence. */
   readonly sentence: string;
+  /** The finding alone, in a few words for lists. */
+  readonly short: string;
   readonly state: "ranked" | "needs-reading" | "contradictory";
   readonly kinds: readonly KindChance[];
   readonly pins: readonly PinsChance[];

@@ -24,13 +24,12 @@ function Part({ title, children }: { readonly title: string; readonly children: 
 
 function headFacts({ check, verdict }: ReportProps): readonly (readonly [string, string])[] {
   const { setup, machine, entry } = check;
-  const limits = setup.meter ? `, ${setup.meter.counts} counts` : "";
   return [
     ["Machine", machine ? `${machine.fleetNumber} ${machine.name}` : "not attached"],
     ["Checked by", check.person.name],
     ["Started", momentWords(check.startedAt)],
     ["Finished", check.finishedAt ? momentWords(check.finishedAt) : "not finished"],
-    ["Meter", check.meterName ? `${check.meterName}${limits}` : "a common 6000-count meter, assumed"],
+    ["Meter", check.meterName ?? "a common 6000-count meter, assumed"],
     ["Entry", entry ? `${entry.name}, version ${entry.version}` : "unknown device"],
     ["Cavities", setup.cavityLabels.join(", ")],
     ["Connector", setup.connector ? `${setup.connector.name}, ${setup.connector.gender}` : "not noted"],
@@ -91,7 +90,7 @@ function Open({ check, verdict }: ReportProps) {
 export function CheckReport({ check, verdict }: ReportProps) {
   const labels = check.setup.cavityLabels;
   return (
-    <article className="report mx-auto max-w-[50rem]">
+    <article className="mx-auto max-w-[50rem] print:text-[10.5pt]">
       <Head check={check} verdict={verdict} />
       <Part title="Verdict">
         <p className="mb-3 text-xl leading-snug font-bold print:text-lg">{verdict.sentence}</p>

@@ -8,7 +8,7 @@ import { expectedWords, fits } from "@/lib/checks/evidence-words";
 
 const CHANGES: Readonly<Record<Change, { readonly word: string; readonly shape: string }>> = {
   changed: { word: "Changed", shape: "M12 3 21 12 12 21 3 12Z" },
-  same: { word: "Same within the meter's limits", shape: "M4 9H20M4 15H20" },
+  same: { word: "Same, within limits of error", shape: "M4 9H20M4 15H20" },
   "only-one": { word: "Taken once only", shape: "M4 12H10M14 12H20" },
 };
 
@@ -24,29 +24,29 @@ function Run({ title, check }: { readonly title: string; readonly check: CheckVi
 function ChangeMark({ change }: { readonly change: Change }) {
   const { word, shape } = CHANGES[change];
   return (
-    <p className={`inline-flex items-start gap-2 ${change === "changed" ? "bg-straw px-2 font-bold text-on-straw" : ""}`}>
+    <p className={`inline-flex items-start gap-2 self-start justify-self-start ${change === "changed" ? "bg-straw px-2 font-bold text-on-straw" : ""}`}>
       <svg viewBox="0 0 24 24" aria-hidden="true" className="mt-1 size-4 shrink-0 fill-none stroke-current [stroke-width:3]"><path d={shape} /></svg>
       {word}
     </p>
   );
 }
 
-function soundWords(row: CompareRow): string {
-  if (!row.ifSound) return "not predicted";
-  if (row.after === null) return expectedWords(row.ifSound);
-  return `${expectedWords(row.ifSound)}${fits(row.ifSound, row.after, row.afterLimit) ? ": it fits" : ": it does not fit"}`;
+function Sound({ row }: { readonly row: CompareRow }) {
+  if (!row.ifSound) return <dd>not predicted</dd>;
+  const verdict = row.after === null ? null : fits(row.ifSound, row.after, row.afterLimit) ? "it fits" : "it does not fit";
+  return <dd><span className="font-mono">{expectedWords(row.ifSound)}</span>{verdict ? <span className="block">{verdict}</span> : null}</dd>;
 }
 
 function Reading({ row, labels }: { readonly row: CompareRow; readonly labels: Labels }) {
-  const shown = (value: CompareRow["before"], limit: number | null) => (value === null ? "not taken" : readingWords(row.check, value, limit));
+  const shown = (value: CompareRow["before"]) => (value === null ? "not taken" : readingWords(row.check, value));
   return (
     <li className="grid gap-2 border-t border-quiet py-3 first:border-t-2 first:border-rule lg:grid-cols-[minmax(0,1.3fr)_minmax(0,3fr)] lg:gap-6 print:break-inside-avoid">
       <h3 className="font-bold">{checkName(row.check, labels)}</h3>
-      <div className="grid gap-2 sm:grid-cols-[minmax(0,3fr)_minmax(0,1.2fr)] sm:gap-6">
-        <dl className="grid grid-cols-2 gap-x-4 gap-y-2 sm:grid-cols-3">
-          <div><dt className="text-quiet">Before</dt><dd className="font-mono font-bold">{shown(row.before, row.beforeLimit)}</dd></div>
-          <div><dt className="text-quiet">After</dt><dd className="font-mono font-bold text-copper">{shown(row.after, row.afterLimit)}</dd></div>
-          <div className="col-span-2 sm:col-span-1"><dt className="text-quiet">If sound</dt><dd className="font-mono">{soundWords(row)}</dd></div>
+      <div className="grid gap-2 sm:grid-cols-[minmax(0,3fr)_minmax(0,1fr)] sm:gap-6">
+        <dl className="grid grid-cols-2 gap-x-4 gap-y-2 sm:grid-cols-[1fr_1fr_1.6fr]">
+          <div><dt className="text-quiet">Before</dt><dd className="font-mono font-bold">{shown(row.before)}</dd></div>
+          <div><dt className="text-quiet">After</dt><dd className="font-mono font-bold text-copper">{shown(row.after)}</dd></div>
+          <div className="col-span-2 sm:col-span-1"><dt className="text-quiet">If sound</dt><Sound row={row} /></div>
         </dl>
         <ChangeMark change={row.change} />
       </div>

@@ -22,7 +22,7 @@ export function ReportReadings({ check, verdict }: { readonly check: CheckView; 
   const finding = verdict.evidenceFinding;
   return (
     <div role="region" aria-label="Readings and evidence" tabIndex={0} className="overflow-x-auto print:overflow-visible">
-      <table className="w-full min-w-[44rem] border-collapse print:min-w-0">
+      <table className="w-full min-w-[44rem] border-collapse print:min-w-0 print:text-[9.5pt]">
         <thead>
           <tr className="border-b-2 border-ink">
             <th scope="col" className={TH}>Reading</th><th scope="col" className={TH}>Taken</th><th scope="col" className={TH}>Limit of error</th><th scope="col" className={TH}>If sound</th>
@@ -33,7 +33,7 @@ export function ReportReadings({ check, verdict }: { readonly check: CheckView; 
           {rows.map((row) => (
             <tr key={row.check} className="break-inside-avoid border-b border-quiet">
               <th scope="row" className={`${TD} text-left font-normal`}>{checkName(row.check, labels)}</th>
-              <td className={`${TD} font-mono font-bold`}>{readingWords(row.check, row.value, row.limit)}</td>
+              <td className={`${TD} font-mono font-bold`}>{readingWords(row.check, row.value)}</td>
               <td className={`${TD} font-mono`}>{limitWords(row)}</td>
               <td className={`${TD} font-mono`}>{expectedWords(row.ifSound)}</td>
               {finding ? <><td className={`${TD} font-mono`}>{expectedWords(row.ifFinding)}</td><td className={TD}>{BEARING_WORDS[bearing(row)]}</td></> : null}

@@ -5,7 +5,7 @@ import type { FindingAdvice } from "@/lib/checks/verdict";
 import { MarkLetter } from "./chances";
 
 function Steps({ lines }: { lines: readonly string[] }) {
-  return <ol className="list-decimal space-y-1.5 pl-6 marker:font-mono">{lines.map((line) => <li key={line}>{line}</li>)}</ol>;
+  return <ol className="list-decimal space-y-1.5 pl-7 marker:font-mono">{lines.map((line) => <li key={line}>{line}</li>)}</ol>;
 }
 
 interface AdviceListProps { readonly advice: readonly FindingAdvice[]; readonly labels: Labels; readonly part: "next" | "prove" }

@@ -22,7 +22,7 @@ interface Cell { readonly label: string; readonly text: React.ReactNode; readonl
 
 function cellsOf(row: EvidenceRow, findingTitle: string | null): readonly Cell[] {
   return [
-    { label: "Reading", text: readingWords(row.check, row.value, row.limit), strong: true },
+    { label: "Reading", text: readingWords(row.check, row.value), strong: true },
     { label: "If sound", text: expectedWords(row.ifSound) },
     ...(findingTitle ? [{ label: `If ${findingTitle}`, text: expectedWords(row.ifFinding) }] : []),
     { label: "Limit of error", text: limitWords(row) },
@@ -41,21 +41,37 @@ interface EvidenceTableProps {
 export function EvidenceTable({ rows, labels, finding }: EvidenceTableProps) {
   if (rows.length === 0) return <p>No reading was taken.</p>;
   const title = finding ? ifFinding(finding, labels) : null;
+  const [first] = rows;
   return (
-    <ol className="grid">
-      {rows.map((row) => (
-        <li key={row.check} className="grid gap-1 border-t border-quiet py-3 first:border-t-2 first:border-rule lg:grid-cols-[minmax(0,1.2fr)_minmax(0,3fr)] lg:gap-6 print:grid-cols-[minmax(0,1.2fr)_minmax(0,3fr)] print:gap-4 print:break-inside-avoid">
-          <h3 className="font-bold">{checkName(row.check, labels)}</h3>
-          <dl className="grid grid-cols-2 gap-x-4 gap-y-2 sm:grid-cols-3 lg:grid-cols-5 print:grid-cols-5">
-            {cellsOf(row, title).map((cell) => (
-              <div key={cell.label} className="min-w-0">
-                <dt className="text-quiet">{cell.label}</dt>
-                <dd className={cell.label === "Bearing" ? "" : `font-mono ${cell.strong ? "font-bold text-copper" : ""}`}>{cell.text}</dd>
-              </div>
-            ))}
-          </dl>
-        </li>
-      ))}
-    </ol>
+    <div>
+      {first ? <DeskHeader labels={cellsOf(first, title).map((cell) => cell.label)} /> : null}
+      <ol className="grid">{rows.map((row) => <EvidenceItem key={row.check} row={row} labels={labels} title={title} />)}</ol>
+    </div>
+  );
+}
+
+function EvidenceItem({ row, labels, title }: { row: EvidenceRow; labels: Labels; title: string | null }) {
+  return (
+    <li className="grid gap-1 border-t border-quiet py-3 first:border-t-2 first:border-rule lg:grid-cols-[minmax(0,1.2fr)_minmax(0,3fr)] lg:gap-6">
+      <h3 className="font-bold">{checkName(row.check, labels)}</h3>
+      <dl className="grid grid-cols-2 gap-x-4 gap-y-2 sm:grid-cols-3 lg:grid-cols-5">
+        {cellsOf(row, title).map((cell) => (
+          <div key={cell.label} className="min-w-0">
+            <dt className="text-quiet lg:sr-only">{cell.label}</dt>
+            <dd className={cell.label === "Bearing" ? "" : `font-mono ${cell.strong ? "font-bold text-copper" : ""}`}>{cell.text}</dd>
+          </div>
+        ))}
+      </dl>
+    </li>
+  );
+}
+
+/** On a desk the terms stand once, at the top; each row still carries its own for screen readers. */
+function DeskHeader({ labels }: { labels: readonly string[] }) {
+  return (
+    <div aria-hidden="true" className="hidden gap-6 pb-2 font-bold lg:grid lg:grid-cols-[minmax(0,1.2fr)_minmax(0,3fr)]">
+      <span>Check</span>
+      <div className="grid grid-cols-5 gap-x-4">{labels.map((label) => <span key={label} className="self-end">{label}</span>)}</div>
+    </div>
   );
 }

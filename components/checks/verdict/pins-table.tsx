@@ -9,7 +9,9 @@ const PINS: readonly PinNumber[] = [1, 2, 3];
 
 /** Chance that a pin has a role, over all assignments. */
 function roleChance(pins: readonly PinsChance[], pin: PinNumber, role: ReturnType<typeof roleOf>): number {
-  return pins.reduce((sum, assignment) => (roleOf(assignment, pin) === role ? sum + assignment.p : sum), 0);
+  const sum = pins.reduce((chance, assignment) => (roleOf(assignment, pin) === role ? chance + assignment.p : chance), 0);
+  // Sums of binary fractions may end a hair above one.
+  return Math.min(1, sum);
 }
 
 interface PinsTableProps { readonly verdict: Verdict; readonly setup: RunSetup; readonly captionHidden?: boolean }

@@ -42,13 +42,16 @@ export function findingPoint(fault: Fault, pins: PinAssignment | null): Point | 
   }
 }
 
+/** Least distance of two marks on one wire. */
+const MARK_PITCH = 36;
+
 /** Marks that would cover each other are moved apart along the wire, in order. */
 export function spread(points: readonly (Point | null)[]): readonly (Point | null)[] {
   const placed: Point[] = [];
   return points.map((point) => {
     if (!point) return null;
     let { x } = point;
-    while (placed.some((other) => other.y === point.y && Math.abs(other.x - x) < 30)) x -= 30;
+    while (placed.some((other) => other.y === point.y && Math.abs(other.x - x) < MARK_PITCH)) x -= MARK_PITCH;
     const free = { x, y: point.y };
     placed.push(free);
     return free;

@@ -11,7 +11,7 @@ const PINS: readonly PinNumber[] = [1, 2, 3];
 function wirePath(pin: PinNumber, fault: Fault): string {
   const y = wireY(pin);
   const here = fault.pins?.includes(pin) ?? false;
-  if (here && fault.code === "wire-open") return `M${FROM} ${y}H${MID - 20}M${MID + 20} ${y}H${TO}`;
+  if (here && fault.code === "wire-open") return `M${FROM} ${y}H${MID - 24}m0 -5v10M${MID + 24} ${y}m0 -5v10M${MID + 24} ${y}H${TO}`;
   if (here && fault.code === "wire-resistive") {
     return `M${FROM} ${y}H${MID - 40}l5 -8l10 16l10 -16l5 8M${MID + 10} ${y}l5 -8l10 16l10 -16l5 8H${TO}M${MID - 10} ${y}H${MID + 10}`;
   }
@@ -23,7 +23,7 @@ function wirePath(pin: PinNumber, fault: Fault): string {
 function contactPath(pin: PinNumber, fault: Fault): string {
   const y = wireY(pin);
   const parted = fault.code === "contact-open" && (fault.pins?.includes(pin) ?? false);
-  return parted ? `M${TO} ${y}H${SKETCH.gap - 18}M${SKETCH.gap + 18} ${y}H${device.left}` : `M${TO} ${y}H${device.left}`;
+  return parted ? `M${TO} ${y}H${SKETCH.gap - 22}m0 -5v10M${SKETCH.gap + 22} ${y}m0 -5v10M${SKETCH.gap + 22} ${y}H${device.left}` : `M${TO} ${y}H${device.left}`;
 }
 
 function Ground({ x, y }: { x: number; y: number }) {

@@ -97,8 +97,6 @@ export function VerdictView({ check, actions }: VerdictViewProps) {
           <PinsTable verdict={verdict} setup={check.setup} />
           {check.setup.connector ? <div className="mt-5"><VerdictFace shape={check.setup.connector} labels={labels} pins={settledPins(verdict.pins)} findings={verdict.openFindings} /></div> : null}
         </Sheet>
-        <Sheet title="Findings still in play"><FindingChances verdict={verdict} labels={labels} /></Sheet>
-        <Sheet title="Kind of device"><KindChances kinds={verdict.kinds} /></Sheet>
       </div>
       {verdict.advice.length > 0 ? (
         <div className="grid items-start gap-6 lg:grid-cols-2">
@@ -106,6 +104,10 @@ export function VerdictView({ check, actions }: VerdictViewProps) {
           <Sheet title="How to prove the repair"><AdviceList advice={verdict.advice} labels={labels} part="prove" /></Sheet>
         </div>
       ) : null}
+      <div className="grid items-start gap-6 lg:grid-cols-2">
+        <Sheet title="Findings and their chances"><FindingChances verdict={verdict} labels={labels} /></Sheet>
+        <Sheet title="Kind of device"><KindChances kinds={verdict.kinds} /></Sheet>
+      </div>
       <Sheet title="Evidence"><EvidenceTable rows={verdict.evidence} labels={labels} finding={verdict.evidenceFinding} /></Sheet>
       <Cautions lines={verdict.cautions} />
     </div>

@@ -71,7 +71,7 @@ export function WiringSketch({ labels, pins, findings, wireColours }: WiringSket
   const words = shown.map((fault, index) => `${markLetter(index)}: ${findingHeading(fault, labels)}`).join("; ");
   return (
     <svg
-      role="img" aria-labelledby={`${id}-title`} aria-describedby={`${id}-desc`} viewBox={`0 0 ${SKETCH.width} ${SKETCH.height}`}
+      role="img" aria-labelledby={`${id}-title`} aria-describedby={`${id}-desc`} viewBox={`0 0 ${SKETCH.width} ${only.code === "short-to-ground" ? SKETCH.height : SKETCH.bottom + 4}`}
       className="block h-auto w-full max-w-xl print:max-w-[11cm]"
     >
       <title id={`${id}-title`}>Wiring from controller to device</title>
