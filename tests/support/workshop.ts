@@ -28,3 +28,9 @@ export async function makeRunning(person: Person, readings: readonly Reading[] =
   if (readings.length > 0) await appendSteps(person, id, { steps: readings.map((reading) => readingStep(reading)) });
   return id;
 }
+
+/** A potentiometer of 5 kΩ, its wire 2 open. [computed from the divider; common practice for the harness] */
+export const OPEN_WIRE_READINGS: readonly Reading[] = [["res:device:1-3@rest", 5000], ["res:device:1-2@rest", 4520], ["res:device:2-3@rest", 540], ["res:wire:2", "OL"], ["res:wire:1", 0.3]];
+
+/** "done", or the code of the error that an attempt ended with. */
+export const codeOf = (attempt: Promise<unknown>): Promise<string> => attempt.then(() => "done", (error: { code?: string }) => error.code ?? String(error));
