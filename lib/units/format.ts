@@ -34,8 +34,10 @@ function prefixFor(value: number, place: number, known: boolean, shown: readonly
   // Down to a tenth the unit itself reads better than its thousandth: 0.15 V, but 12 mV.
   const small = shown[0] ?? base;
   const fitting = size === -1 ? base : shown.filter(([power]) => power <= size).at(-1) ?? small;
-  const start = value === 0 || (known && roundTo(value, place) === 0) ? base : fitting;
-  return (known && place > start[0] ? shown.find(([power]) => power >= place) : start) ?? start;
+  if (value === 0 || (known && roundTo(value, place) === 0)) return base;
+  // 470 known to hundreds is 0.5 kΩ; but no further up than one zero after the point.
+  const larger = known && place > fitting[0] ? shown.find(([power]) => power >= place) : undefined;
+  return larger && size >= larger[0] - 1 ? larger : fitting;
 }
 
 function signed(text: string): string {

@@ -21,12 +21,14 @@ for (const { name, kind, finding } of CASES) {
     expect(readings).toBeLessThan(25);
 
     await page.getByRole("button", { name: "See the verdict" }).click();
-    const verdict = page.getByRole("heading", { level: 1 }).filter({ hasText: finding });
-    await expect(verdict).toBeVisible({ timeout: 20_000 });
-    await expect(page.getByRole("main")).toContainText(kind);
+    await expect(page.getByRole("heading", { level: 1, name: "Verdict" })).toBeVisible({ timeout: 20_000 });
+    const sentence = page.getByRole("main").getByText(/^It is a/).first();
+    await expect(sentence).toHaveText(kind);
+    await expect(sentence).toHaveText(finding);
     for (const [role, pin] of Object.entries(bench.truth.pins)) {
       const row = page.getByRole("row").filter({ hasText: new RegExp(role, "i") }).first();
       await expect(row, role).toContainText(String(pin));
+      await expect(sentence).toContainText(`${role} on ${pin}`);
     }
     await expectAccessible(page, `verdict of ${name}`);
     await expectNoSidewaysScroll(page);

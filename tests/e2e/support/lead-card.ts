@@ -9,7 +9,9 @@ const PLACES: readonly (readonly [words: RegExp, place: string])[] = [
 ];
 
 function lead(lines: readonly string[], colour: "red" | "black"): { place: string; end: string } {
-  const words = lines.find((line) => line.startsWith(`${colour} lead on `))?.replace(`${colour} lead on `, "").trim() ?? "";
+  // The lead's drawn tag brings its letter in front.
+  const line = new RegExp(`^[RB]?${colour} lead on (.+)$`);
+  const words = lines.map((one) => line.exec(one)?.[1]).find((one) => one !== undefined)?.trim() ?? "";
   for (const [pattern, place] of PLACES) {
     const end = pattern.exec(words)?.[1];
     if (end) return { place, end: end === "negative" ? "gnd" : end };

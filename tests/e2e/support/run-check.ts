@@ -1,5 +1,5 @@
 import { expect, type Page } from "@playwright/test";
-import machines from "../data/machines.json";
+import machines from "../data/machines.json" with { type: "json" };
 import { readScreen, type Screen } from "./lead-card";
 
 /** A machine of the bench: what is wrong with it, and what a meter reads at every check. */
