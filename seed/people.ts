@@ -1,4 +1,4 @@
-import type { Database } from "@/db/client";
+import type { Writer } from "@/db/client";
 import { people } from "@/db/schema";
 import type { Role } from "@/lib/auth/permissions";
 import { hashPassword } from "@/lib/auth/password";
@@ -20,7 +20,7 @@ export const DEMO_PEOPLE: readonly DemoPerson[] = [
 ];
 
 /** The six people of the demo workshop, with every role and two who hold several. */
-export async function seedPeople(db: Database): Promise<void> {
+export async function seedPeople(tx: Writer): Promise<void> {
   const passwordHash = await hashPassword(DEMO_PASSWORD);
-  await db.insert(people).values(DEMO_PEOPLE.map((person) => ({ ...person, roles: [...person.roles], passwordHash, createdAt: HIRED })));
+  await tx.insert(people).values(DEMO_PEOPLE.map((person) => ({ ...person, roles: [...person.roles], passwordHash, createdAt: HIRED })));
 }

@@ -1,4 +1,4 @@
-import { closeDatabase, readDb, write, type Database } from "@/db/client";
+import { closeDatabase, readDb, transact, type Writer } from "@/db/client";
 import { migrateDatabase } from "@/db/migrate";
 import { checks, entries, machines, people } from "@/db/schema";
 import { env } from "@/lib/env";
@@ -7,7 +7,7 @@ import { seedChecks } from "./checks";
 import { seedMachines } from "./machines";
 import { DEMO_PASSWORD, DEMO_PEOPLE, seedPeople } from "./people";
 
-interface Part { readonly name: string; readonly isEmpty: () => Promise<boolean>; readonly seed: (db: Database) => Promise<void> }
+interface Part { readonly name: string; readonly isEmpty: () => Promise<boolean>; readonly seed: (tx: Writer) => Promise<void> }
 
 /** In this order: each part points at rows of the ones before it. */
 const PARTS: readonly Part[] = [
@@ -25,7 +25,8 @@ async function seedDatabase(): Promise<void> {
   }
   for (const { name, isEmpty, seed } of PARTS) {
     if (!(await isEmpty())) continue;
-    await write(seed);
+    // All of a part or nothing: a run that was interrupted is simply run again.
+    await transact(seed);
     process.stdout.write(`Demo data: ${name}\n`);
   }
 }
