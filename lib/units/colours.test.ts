@@ -21,7 +21,7 @@ describe("wire colours", () => {
     }));
   });
 
-  it.each([["", "unknown-colour"], ["XY", "unknown-colour"], ["mauve", "unknown-colour"], ["GR", "other-scheme"], ["BKBNRD", "too-many-colours"]] as const)("%j is %s", (text, code) => {
+  it.each([["", "unknown-colour"], ["XY", "unknown-colour"], ["mauve", "unknown-colour"], ["__proto__", "unknown-colour"], ["GR", "other-scheme"], ["BKBNRD", "too-many-colours"]] as const)("%j is %s", (text, code) => {
     expect(parseColour(text)).toMatchObject({ ok: false, code });
   });
 });

@@ -5,14 +5,14 @@ export const IEC_COLOURS = [
 ] as const;
 
 /** Letters of DIN 72551, met on older vehicle harnesses; only "gn" is the same as in IEC 60757. */
-const DIN_COLOURS: Readonly<Record<string, string>> = {
-  SW: "black", BR: "brown", RT: "red", RO: "red", GE: "yellow", BL: "blue", HB: "light blue", GR: "grey", WS: "white",
-  LI: "lilac", OR: "orange", VI: "violet", RS: "pink", TR: "transparent",
-};
+const DIN_COLOURS: ReadonlyMap<string, string> = new Map([
+  ["SW", "black"], ["BR", "brown"], ["RT", "red"], ["RO", "red"], ["GE", "yellow"], ["BL", "blue"], ["HB", "light blue"], ["GR", "grey"],
+  ["WS", "white"], ["LI", "lilac"], ["OR", "orange"], ["VI", "violet"], ["RS", "pink"], ["TR", "transparent"],
+]);
 
 const PROTECTIVE = { code: "GNYE", words: "green-and-yellow" } as const;
 
-const OTHER_WORDS: Readonly<Record<string, string>> = { gray: "GY", purple: "VT", lilac: "VT", "light blue": "BU" };
+const OTHER_WORDS: ReadonlyMap<string, string> = new Map([["gray", "GY"], ["purple", "VT"], ["lilac", "VT"], ["light blue", "BU"]]);
 
 export type ParsedColour =
   | { readonly ok: true; readonly code: string; readonly words: string }
@@ -24,7 +24,7 @@ function order(code: string): number {
 
 function codesOf(token: string): readonly string[] | null {
   const upper = token.toUpperCase();
-  const word = IEC_COLOURS.find(([, name]) => name === token.toLowerCase())?.[0] ?? OTHER_WORDS[token.toLowerCase()];
+  const word = IEC_COLOURS.find(([, name]) => name === token.toLowerCase())?.[0] ?? OTHER_WORDS.get(token.toLowerCase());
   if (word) return [word];
   const pairs = upper.match(/../g) ?? [];
   return upper.length % 2 === 0 && pairs.length > 0 && pairs.every((pair) => order(pair) >= 0) ? pairs : null;
@@ -40,18 +40,18 @@ export function colourWords(code: string): string | null {
 
 /** What DIN 72551 means by two letters that are no IEC code, or null: "GR" -> "grey". */
 export function dinColour(letters: string): string | null {
-  return DIN_COLOURS[letters.toUpperCase()] ?? null;
+  return DIN_COLOURS.get(letters.toUpperCase()) ?? null;
 }
 
 function otherScheme(token: string, meaning: string): ParsedColour {
-  const iec = OTHER_WORDS[meaning] ?? IEC_COLOURS.find(([, word]) => word === meaning)?.[0];
+  const iec = OTHER_WORDS.get(meaning) ?? IEC_COLOURS.find(([, word]) => word === meaning)?.[0];
   const instead = iec ? ` Enter ${iec} if the wire is ${meaning}.` : " Enter the colour as a word.";
   return { ok: false, code: "other-scheme", message: `"${token}" is ${meaning} in DIN 72551 and nothing in IEC 60757; one code does not tell which was meant.${instead}` };
 }
 
 function joined(codes: readonly string[]): ParsedColour {
-  if (codes.length > 2) return { ok: false, code: "too-many-colours", message: "A wire has one colour or two. Enter for example BU, or RDBU for red and blue." };
-  const sorted = [...codes].sort((a, b) => order(a) - order(b));
+  if (new Set(codes).size > 2) return { ok: false, code: "too-many-colours", message: "A wire has one colour or two. Enter for example BU, or RDBU for red and blue." };
+  const sorted = [...new Set(codes)].sort((a, b) => order(a) - order(b));
   const code = sorted.join("") === "YEGN" ? PROTECTIVE.code : sorted.join("");
   return { ok: true, code, words: colourWords(code) ?? code };
 }

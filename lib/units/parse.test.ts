@@ -52,7 +52,7 @@ describe("parseQuantity names what is wrong", () => {
     ["0.5", "ratio", "percent-ambiguous"], ["1", "ratio", "percent-ambiguous"], ["120 %", "ratio", "out-of-range"], ["-5 %", "ratio", "out-of-range"],
     ["-50", "hertz", "out-of-range"], ["1e999", "ohm", "out-of-range"], ["OL", "volt", "word-not-for-unit"], ["none", "ohm", "word-not-for-unit"],
     ["abc", "ohm", "not-a-number"], ["1.2.3", "ohm", "not-a-number"], ["4 7", "ohm", "not-a-number"], ["4k7k", "ohm", "not-a-number"], ["k47", "ohm", "not-a-number"],
-    ["½", "ohm", "not-a-number"], ["10²", "ohm", "not-a-number"], ["NaN", "volt", "not-a-number"], ["12 34", "volt", "not-a-number"], ["--5", "volt", "not-a-number"],
+    ["½", "ohm", "not-a-number"], ["10²", "ohm", "not-a-number"], ["NaN", "volt", "not-a-number"], ["5 constructor", "volt", "not-a-number"], ["5 __proto__", "ohm", "not-a-number"], ["12 34", "volt", "not-a-number"], ["--5", "volt", "not-a-number"],
     ["1".repeat(41), "ohm", "too-long"],
   ] as const)("%j in %s is %s", (text, unit, expected) => expect(code(text, unit)).toBe(expected));
 

@@ -22,10 +22,11 @@ function measuredSuffix(text: string, unit: MeasuredUnit): Suffix {
   // A hand-held meter shows megohms as M and phones write small letters: a lone "m" may be either.
   if (unit === "ohm" && text === "m") return { ok: false, problem: "prefix-ambiguous" };
   // Without a unit "m" is a prefix; only lengths read it as their unit.
-  if (unit !== "metre" && prefixes[text] !== undefined) return { ...plain, power: prefixes[text] };
+  const alone = unit === "metre" ? undefined : prefixes.get(text);
+  if (alone !== undefined) return { ...plain, power: alone };
   for (const [prefix, rest] of splits(text)) {
     const group = unitGroup(rest);
-    const power = prefix === "" ? 0 : prefixes[prefix];
+    const power = prefix === "" ? 0 : prefixes.get(prefix);
     const named = group === unit || (rest === "" && prefix !== "" && unit !== "metre");
     if (named && power !== undefined) return { ok: true, power, percent: unit === "ratio" };
     if (named) problem = "wrong-prefix";

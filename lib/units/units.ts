@@ -14,34 +14,34 @@ export interface UnitFacts {
   /** How a sentence names the reading. */
   readonly name: string;
   /** Powers of ten that may stand before the symbol, by letter. */
-  readonly prefixes: Readonly<Record<string, number>>;
+  readonly prefixes: ReadonlyMap<string, number>;
   /** Prefixes used when writing a value, smallest first. */
   readonly shown: readonly (readonly [power: number, letter: string])[];
   /** What to type, for error sentences. */
   readonly example: string;
 }
 
-const MILLI = { m: -3, milli: -3 } as const;
-const MICRO = { u: -6, "μ": -6, micro: -6 } as const;
-const KILO = { k: 3, K: 3, kilo: 3 } as const;
-const MEGA = { M: 6, meg: 6, mega: 6 } as const;
+const MICRO = [["u", -6], ["μ", -6], ["micro", -6]] as const;
+const MILLI = [["m", -3], ["milli", -3]] as const;
+const KILO = [["k", 3], ["K", 3], ["kilo", 3]] as const;
+const MEGA = [["M", 6], ["meg", 6], ["mega", 6]] as const;
 
 export const MEASURED: Readonly<Record<MeasuredUnit, UnitFacts>> = {
   ohm: {
-    symbol: "Ω", name: "ohms", prefixes: { ...MICRO, ...MILLI, ...KILO, ...MEGA, G: 9, giga: 9 },
+    symbol: "Ω", name: "ohms", prefixes: new Map([...MICRO, ...MILLI, ...KILO, ...MEGA, ["G", 9], ["giga", 9]]),
     shown: [[-3, "m"], [0, ""], [3, "k"], [6, "M"], [9, "G"]], example: "4.7 kΩ, 4k7 or OL",
   },
   volt: {
-    symbol: "V", name: "volts", prefixes: { ...MICRO, ...MILLI, ...KILO },
+    symbol: "V", name: "volts", prefixes: new Map([...MICRO, ...MILLI, ...KILO]),
     shown: [[-3, "m"], [0, ""], [3, "k"]], example: "4.98 V or -12 mV",
   },
   hertz: {
-    symbol: "Hz", name: "hertz", prefixes: { ...KILO, ...MEGA },
+    symbol: "Hz", name: "hertz", prefixes: new Map([...KILO, ...MEGA]),
     shown: [[0, ""], [3, "k"], [6, "M"]], example: "500 Hz, 1.2 kHz or none",
   },
-  ratio: { symbol: "%", name: "percent", prefixes: {}, shown: [[0, ""]], example: "27.3 % or none" },
+  ratio: { symbol: "%", name: "percent", prefixes: new Map(), shown: [[0, ""]], example: "27.3 % or none" },
   metre: {
-    symbol: "m", name: "metres", prefixes: { ...MICRO, ...MILLI, c: -2, ...KILO },
+    symbol: "m", name: "metres", prefixes: new Map([...MICRO, ...MILLI, ["c", -2], ...KILO]),
     shown: [[-3, "m"], [0, ""], [3, "k"]], example: "2.5 m or 112 mm",
   },
 };
