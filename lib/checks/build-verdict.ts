@@ -6,7 +6,7 @@ import { shortVerdict, SURE, verdictSentence } from "./verdict-sentence";
 
 /** More findings than this are listed with their chances but get no advice of their own. */
 const MAX_ADVICE = 4;
-const MAX_TELL_APART = 5;
+const MAX_TELL_APART = 3;
 /** A rival below this chance is not set against "sound" in the evidence table. */
 const RIVAL_FLOOR = 0.0005;
 

@@ -42,17 +42,23 @@ export function findingPoint(fault: Fault, pins: PinAssignment | null): Point | 
   }
 }
 
-/** Least distance of two marks on one wire. */
+/** Least distance of two marks, along the wires and across them. */
 const MARK_PITCH = 36;
 
-/** Marks that would cover each other are moved apart along the wire, in order. */
+/** Along the wire in the harness, up and down in the device: a mark stays within the part that it belongs to. */
+function places(point: Point): readonly Point[] {
+  const steps = [0, 1, -1, 2, -2, 3, -3].map((step) => step * MARK_PITCH);
+  return point.x >= SKETCH.device.left ? steps.map((dy) => ({ x: point.x, y: point.y - dy })) : steps.map((dx) => ({ x: point.x + dx, y: point.y }));
+}
+
+const apart = (a: Point, b: Point): boolean => Math.abs(a.x - b.x) >= MARK_PITCH || Math.abs(a.y - b.y) >= MARK_PITCH;
+
+/** Marks that would cover each other are moved apart, the first one staying where it is. */
 export function spread(points: readonly (Point | null)[]): readonly (Point | null)[] {
   const placed: Point[] = [];
   return points.map((point) => {
     if (!point) return null;
-    let { x } = point;
-    while (placed.some((other) => other.y === point.y && Math.abs(other.x - x) < MARK_PITCH)) x -= MARK_PITCH;
-    const free = { x, y: point.y };
+    const free = places(point).find((place) => placed.every((other) => apart(place, other))) ?? point;
     placed.push(free);
     return free;
   });

@@ -100,7 +100,7 @@ export function VerdictView({ check, actions }: VerdictViewProps) {
       </div>
       {verdict.advice.length > 0 ? (
         <div className="grid items-start gap-6 lg:grid-cols-2">
-          <Sheet title="What to do next"><AdviceList advice={verdict.advice} labels={labels} part="next" /></Sheet>
+          <Sheet title="What to do next"><ReadFirst verdict={verdict} /><AdviceList advice={verdict.advice} labels={labels} part="next" /></Sheet>
           <Sheet title="How to prove the repair"><AdviceList advice={verdict.advice} labels={labels} part="prove" /></Sheet>
         </div>
       ) : null}
@@ -112,6 +112,12 @@ export function VerdictView({ check, actions }: VerdictViewProps) {
       <Cautions lines={verdict.cautions} />
     </div>
   );
+}
+
+/** Nothing is taken apart for a finding that a reading could still rule out. */
+function ReadFirst({ verdict }: { verdict: Verdict }) {
+  if (verdict.tellApart.length === 0) return null;
+  return <p className="mb-4 font-bold">First take the readings that tell these apart, in a re-check. Then go on with the finding that is left.</p>;
 }
 
 function Cautions({ lines }: { lines: readonly string[] }) {

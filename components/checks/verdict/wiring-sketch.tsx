@@ -29,7 +29,7 @@ function Connector({ labels }: { labels: Labels }) {
       <Box left={left} right={right} title="Connector" />
       <path d={`M${SKETCH.gap} ${SKETCH.top}V${SKETCH.bottom}`} className="stroke-ink [stroke-width:2]" strokeDasharray="3 4" />
       {PINS.map((pin) => (
-        <text key={pin} x={left + 5} y={wireY(pin) - 8} fontSize={16} className="fill-ink font-mono font-bold">{labels[pin - 1]}</text>
+        <text key={pin} x={left + 5} y={wireY(pin) - 11} fontSize={16} className="fill-ink font-mono font-bold">{labels[pin - 1]}</text>
       ))}
     </>
   );
@@ -84,7 +84,7 @@ export function WiringSketch({ labels, pins, findings, wireColours }: WiringSket
       <ShortEnd fault={only} />
       {PINS.map((pin) => {
         const colour = wireColours?.[pin - 1];
-        return colour ? <text key={pin} x={SKETCH.controller.right + 6} y={wireY(pin) - 8} fontSize={16} className="fill-ink font-mono">{colour}</text> : null;
+        return colour ? <text key={pin} x={SKETCH.controller.right + 6} y={wireY(pin) - 11} fontSize={16} className="fill-ink font-mono">{colour}</text> : null;
       })}
       {points.map((point, index) => (point ? <Mark key={markLetter(index)} point={point} letter={markLetter(index)} /> : null))}
     </svg>
