@@ -13,6 +13,11 @@ async function codeOf(fields: Readonly<Record<string, string>>, given: Readonly<
   return assertActionBody(request).then(() => "passes", (error: { code?: string }) => error.code ?? String(error));
 }
 
+async function codeOfText(body: string, given: Readonly<Record<string, string>> = {}): Promise<string> {
+  const headers = { "content-type": "text/plain;charset=UTF-8", "content-length": String(body.length), ...given };
+  return assertActionBody(new Request("http://checks.example/today", { method: "POST", headers, body })).then(() => "passes", (error: { code?: string }) => error.code ?? String(error));
+}
+
 const scripted = (args: string, fields: Readonly<Record<string, string>> = {}) => codeOf({ "0": args, ...fields }, { "next-action": ID });
 const plain = (reference: string, bound: Readonly<Record<string, string>> = {}) => codeOf({ "$ACTION_REF_1": "", "$ACTION_1:0": reference, ...bound });
 
@@ -29,6 +34,22 @@ describe("the body of an action sent by a page's script", () => {
 
   it("is refused when the action's name is none", async () => {
     expect(await codeOf({ "0": "[]" }, { "next-action": "../../etc" })).toBe("malformed-form");
+  });
+});
+
+describe("an action's arguments sent as text, when there is no form among them", () => {
+  it.each(["[]", '["night"]', '["01K4",["editor"],true]'])("passes as our own pages send it: %s", async (args) => {
+    expect(await codeOfText(args, { "next-action": ID })).toBe("passes");
+  });
+
+  it.each(["", "garbage", "{}", '["$F1"]', '[{"deep":"$@1"}]'])("is refused as malformed: %s", async (args) => {
+    expect(await codeOfText(args, { "next-action": ID })).toBe("malformed-form");
+  });
+
+  it("is refused without the action's name, with a wrong one, and when too long", async () => {
+    expect(await codeOfText("[]")).toBe("method-not-allowed");
+    expect(await codeOfText("[]", { "next-action": "x" })).toBe("malformed-form");
+    expect(await codeOfText("[]", { "next-action": ID, "content-length": String(ACTION_LIMIT + 1) })).toBe("body-too-large");
   });
 });
 

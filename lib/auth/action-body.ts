@@ -27,9 +27,9 @@ function parseJson(text: FormDataEntryValue | null): unknown {
   }
 }
 
-/** With JavaScript: field 0 holds the arguments, the form's own fields follow under a prefix. */
-function assertArguments(form: FormData): void {
-  const given = parseJson(form.get("0"));
+/** With JavaScript: the arguments as text; with a form among them, as its field 0, and the form's own fields follow under a prefix. */
+function assertArguments(text: FormDataEntryValue | null): void {
+  const given = parseJson(text);
   if (!Array.isArray(given) || !isPlain(given)) throw malformed();
 }
 
@@ -51,21 +51,28 @@ function isReference(given: unknown, group: string, form: FormData): boolean {
   return bound === null || (part !== undefined && form.has(`$ACTION_${group}:${part}`));
 }
 
+async function assertForm(request: Request, action: string | null): Promise<void> {
+  const form = await request.clone().formData().catch(() => null);
+  if (!form) throw malformed();
+  if (action !== null) assertArguments(form.get("0"));
+  else assertHiddenFields(form);
+}
+
 /**
- * What a page takes is a form of its own, of a bearable size and well formed; checked before the framework
- * decodes it, because what it cannot decode it answers with 500.
+ * What a page takes is a form of its own, or the arguments of one of its actions as text, of a bearable size and well
+ * formed; checked before the framework decodes it, because what it cannot decode it answers with 500.
  * @throws AppError method-not-allowed (405), length-required (411), body-too-large (413), malformed-form (400)
  */
 export async function assertActionBody(request: Request): Promise<void> {
   const type = request.headers.get("content-type") ?? "";
-  if (request.method !== "POST" || !type.startsWith("multipart/form-data")) throw new AppError("method-not-allowed", "This address only shows a page and takes its own forms.", 405);
+  const action = request.headers.get("next-action");
+  const isForm = type.startsWith("multipart/form-data");
+  const isText = action !== null && type.startsWith("text/plain");
+  if (request.method !== "POST" || !(isForm || isText)) throw new AppError("method-not-allowed", "This address only shows a page and takes its own forms.", 405);
   const length = request.headers.get("content-length");
   if (length === null) throw new AppError("length-required", "The request does not say how long it is.", 411);
   if (Number(length) > ACTION_LIMIT) throw new AppError("body-too-large", "The form is larger than 256 KB.", 413);
-  const action = request.headers.get("next-action");
   if (action !== null && !ACTION_ID.test(action)) throw malformed();
-  const form = await request.clone().formData().catch(() => null);
-  if (!form) throw malformed();
-  if (action !== null) assertArguments(form);
-  else assertHiddenFields(form);
+  if (isForm) await assertForm(request, action);
+  else assertArguments(await request.clone().text());
 }
