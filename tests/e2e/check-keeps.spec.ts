@@ -47,7 +47,8 @@ test("a reload in mid-check comes back to the same screen, with its readings and
 
 test("a wrong unit is named beside the field, and what was typed stays", async ({ page }) => {
   await page.getByRole("button", { name: "Another reading" }).click();
-  await page.getByRole("dialog").getByRole("button", { name: /Battery/i }).first().click();
+  await page.getByRole("dialog").locator("summary").filter({ hasText: /power on \(1\)/i }).click();
+  await page.getByRole("dialog").getByRole("button", { name: /^Voltage, battery/ }).click();
   await toReading(page);
   await field(page).fill("12 kΩ");
   await enter(page).click();

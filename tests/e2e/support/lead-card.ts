@@ -1,4 +1,4 @@
-import type { Page } from "@playwright/test";
+import { expect, type Page } from "@playwright/test";
 
 /** What is on the running check's screen, as a technician reads it off. */
 export type Screen = { readonly type: "state" | "enough" | "exhausted" } | { readonly type: "reading"; readonly check: string };
@@ -37,13 +37,26 @@ export function checkOnCard(title: string, card: readonly string[]): string {
   return `${measure === "Resistance" ? "res" : "volt"}:${place}:${red.end}-${lead(card, "black").end}${position}`;
 }
 
+/** Heading and lines of the screen in one look, so that they belong to the same screen; null while there is nothing to read. */
+async function look(page: Page): Promise<{ title: string; lines: string[] } | null> {
+  return page.evaluate(() => {
+    const heading = document.querySelector("main h1");
+    const title = heading?.textContent?.trim() ?? "";
+    if (title === "" || /Working out|Opening|What do you have/.test(title)) return null;
+    return { title, lines: [...(heading?.closest("section")?.querySelectorAll("p") ?? [])].map((line) => line.textContent?.trim() ?? "") };
+  });
+}
+
 /** Waits until the check has something to say, and reads it. */
 export async function readScreen(page: Page): Promise<Screen> {
-  const heading = page.getByRole("heading", { level: 1 }).filter({ hasNotText: /Working out|Opening/ });
-  const title = (await heading.textContent())?.trim() ?? "";
+  let seen: Awaited<ReturnType<typeof look>> = null;
+  await expect(async () => {
+    seen = await look(page);
+    expect(seen, "a screen of the check").not.toBeNull();
+  }).toPass({ timeout: 15_000, intervals: [50, 100, 200] });
+  const { title, lines } = seen ?? { title: "", lines: [] as string[] };
   if (title === "Before the next reading") return { type: "state" };
   if (title === "Enough is known") return { type: "enough" };
   if (title.startsWith("No reading is left")) return { type: "exhausted" };
-  const lines = await page.locator("section", { has: heading }).locator("p").allTextContents();
-  return { type: "reading", check: checkOnCard(title, lines.map((line) => line.trim())) };
+  return { type: "reading", check: checkOnCard(title, lines) };
 }
