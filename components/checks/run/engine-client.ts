@@ -9,7 +9,7 @@ export interface EngineClient {
 
 /** The engine on the main thread, loaded when needed: for browsers where no worker can be started. */
 function mainThreadClient(): EngineClient {
-  const engine = import("@/lib/diagnosis").then((all) => [all][0] as typeof all & { effects: (setup: Setup, readings: readonly Reading[]) => readonly ReadingEffect[] });
+  const engine = import("@/lib/diagnosis");
   return {
     assess: async (setup, readings) => (await engine).assess(setup, readings),
     effects: async (setup, readings) => (await engine).effects(setup, readings),

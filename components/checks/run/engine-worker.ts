@@ -1,13 +1,11 @@
-import * as engine from "@/lib/diagnosis";
+import { assess, effects } from "@/lib/diagnosis";
 import type { EngineAnswer, EngineRequest } from "./engine-messages";
-
-const pending = [engine as { effects?: (setup: EngineRequest["setup"], readings: EngineRequest["readings"]) => readonly import("@/lib/diagnosis").ReadingEffect[] }];
 
 function answerTo({ id, task, setup, readings }: EngineRequest): EngineAnswer {
   try {
     return task === "assess"
-      ? { id, task, assessment: engine.assess(setup, readings) }
-      : { id, task, effects: pending[0]?.effects?.(setup, readings) ?? [] };
+      ? { id, task, assessment: assess(setup, readings) }
+      : { id, task, effects: effects(setup, readings) };
   } catch (error) {
     return { id, task: "failed", message: String(error) };
   }

@@ -1,15 +1,14 @@
 "use client";
 
-import { useEffect, useState } from "react";
+import { useRef, useState } from "react";
 import { ulid } from "ulid";
 import { PageHeading } from "@/components/ui";
 import type { RunSetup } from "@/lib/checks/run";
 import type { SetupChoices, SetupEntry } from "@/lib/checks/setup-form";
 import { keepRun } from "@/lib/offline/run-store";
-import { CheckRun } from "./check-run";
+import { LazyCheckRun, warmCheckRun } from "./check-run-lazy";
 import { OpenRuns } from "./open-runs";
 import { SetupForm } from "./setup-form";
-import { sharedEngine } from "./use-engine";
 
 interface NewCheckProps {
   readonly personId: string;
@@ -25,10 +24,14 @@ interface NewCheckProps {
 export function NewCheck({ personId, entry, choices, machineId }: NewCheckProps) {
   const [started, setStarted] = useState<string | null>(null);
 
-  useEffect(() => {
-    // Load the engine while the server is there.
-    sharedEngine();
-  }, []);
+  const warmed = useRef(false);
+  // With the first touch, not before: the page itself stays light, and the check is there should the server go.
+  const warm = () => {
+    if (warmed.current) return;
+    warmed.current = true;
+    warmCheckRun();
+    void import("./use-engine").then(({ sharedEngine }) => sharedEngine(), () => undefined);
+  };
 
   const start = async (setup: RunSetup) => {
     const id = ulid();
@@ -37,12 +40,12 @@ export function NewCheck({ personId, entry, choices, machineId }: NewCheckProps)
     setStarted(id);
   };
 
-  if (started) return <CheckRun id={started} personId={personId} known={null} />;
+  if (started) return <LazyCheckRun id={started} personId={personId} known={null} />;
   return (
-    <>
+    <div onFocusCapture={warm} onPointerDownCapture={warm}>
       <PageHeading title="What do you have?" lead="Only the three labels are needed. Whatever else you can see shortens the check." />
       <OpenRuns personId={personId} />
       <SetupForm entry={entry} choices={choices} machineId={machineId} draftKey={`pinwright:new:${personId}`} onStart={start} />
-    </>
+    </div>
   );
 }

@@ -1,5 +1,5 @@
 import type { Metadata } from "next";
-import { CheckRun } from "@/components/checks/run/check-run";
+import { LazyCheckRun } from "@/components/checks/run/check-run-lazy";
 import { SettleRun } from "@/components/checks/run/settle-run";
 import type { Person } from "@/lib/auth/permissions";
 import { requirePermission } from "@/lib/auth/require-permission";
@@ -35,5 +35,5 @@ export default async function CheckPage({ params }: { readonly params: Promise<{
   }
   await requirePermission("check:run");
   const known = check ? { id, setup: check.setup, steps: check.steps } : null;
-  return <CheckRun id={id} personId={person.id} known={known} />;
+  return <LazyCheckRun id={id} personId={person.id} known={known} />;
 }
