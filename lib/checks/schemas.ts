@@ -64,12 +64,12 @@ export const listChecksSchema = z.object({
   machine: emptyIsAbsent(idSchema),
   entry: emptyIsAbsent(idSchema),
   person: emptyIsAbsent(idSchema),
-  kind: emptyIsAbsent(z.enum(KINDS)),
-  finding: emptyIsAbsent(z.enum(FAULT_CODES)),
-  state: emptyIsAbsent(z.enum(["running", "finished", "abandoned"])),
+  kind: emptyIsAbsent(z.enum(KINDS, "There is no such kind. Choose one from the list.")),
+  finding: emptyIsAbsent(z.enum(FAULT_CODES, "There is no such finding. Choose one from the list.")),
+  state: emptyIsAbsent(z.enum(["running", "finished", "abandoned"], "There is no such state. Choose one from the list.")),
   from: emptyIsAbsent(dateSchema),
   to: emptyIsAbsent(dateSchema),
   after: emptyIsAbsent(cursorSchema),
-  limit: emptyIsAbsent(z.coerce.number().int().min(1).max(100)),
+  limit: emptyIsAbsent(z.coerce.number("A page holds 1 to 100 checks.").int().min(1).max(100)),
 });
 export type ListChecksFilters = z.infer<typeof listChecksSchema>;

@@ -74,7 +74,7 @@ export default async function ChecksPage({ searchParams }: { readonly searchPara
   return (
     <>
       <PageHeading title="Checks" lead="Every finished check of the workshop, and your own running ones." actions={mayRun ? <StartButton /> : undefined} />
-      <LogFilters query={query} choices={choices} />
+      <LogFilters query={query} choices={choices} open={page instanceof AppError} />
       <div className="mt-6">
         {page instanceof AppError
           ? <Notice tone="stop" title="These filters cannot be read"><p>{page.message}</p></Notice>

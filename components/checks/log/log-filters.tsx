@@ -28,11 +28,20 @@ export function activeFilters(query: LogQuery): number {
   return Object.entries(query).filter(([key, value]) => key !== "after" && value).length;
 }
 
-function Frame({ count, children }: { count: number; children: ReactNode }) {
+/** The filters that are on, in words; an id that no list holds is counted as "unknown". */
+function activeWords(query: LogQuery, lists: Readonly<Partial<Record<keyof LogQuery, readonly Choice[]>>>): readonly string[] {
+  const chosen = Object.entries(lists).flatMap(([key, list]) => {
+    const value = query[key as keyof LogQuery];
+    return value ? [list?.find((choice) => choice.id === value)?.name ?? `unknown ${key}`] : [];
+  });
+  return [...chosen, ...(query.from ? [`from ${query.from}`] : []), ...(query.to ? [`to ${query.to}`] : [])];
+}
+
+function Frame({ words, open, children }: { words: readonly string[]; open: boolean; children: ReactNode }) {
   return (
-    <details open={count > 0} className="group border-y-2 border-rule">
+    <details open={open} className="group border-y-2 border-rule">
       <summary className="flex min-h-touch cursor-pointer list-none items-center justify-between gap-3 py-2 font-bold">
-        <span>Filter{count > 0 ? ` (${count} on)` : ""}</span>
+        <span>{words.length > 0 ? `Filter: ${words.join(", ")}` : "Filter"}</span>
         <span className="font-mono text-xl group-open:hidden" aria-hidden="true">+</span>
         <span className="hidden font-mono text-xl group-open:block" aria-hidden="true">−</span>
       </summary>
@@ -42,11 +51,11 @@ function Frame({ count, children }: { count: number; children: ReactNode }) {
 }
 
 /** Filters of the log as a plain form: they live in the address and work without script. */
-export function LogFilters({ query, choices }: { query: LogQuery; choices: LogChoices }) {
-  const count = activeFilters(query);
+export function LogFilters({ query, choices, open }: { query: LogQuery; choices: LogChoices; open: boolean }) {
   const machines = choices.machines.map((m) => ({ id: m.id, name: `${m.fleetNumber} ${m.name}` }));
+  const words = activeWords(query, { machine: machines, entry: choices.entries, kind: KIND_CHOICES, finding: FINDING_CHOICES, person: choices.people, state: STATES });
   return (
-    <Frame count={count}>
+    <Frame words={words} open={open}>
       {/* Choices are uncontrolled: a new address must give new defaults. */}
       <form key={JSON.stringify(query)} method="get" action="/checks" role="search" aria-label="Filter the log" className="grid gap-4 sm:grid-cols-2 lg:grid-cols-4">
         <ChoiceField label="Machine" name="machine" any="Any machine" choices={machines} value={query.machine} />
@@ -59,7 +68,7 @@ export function LogFilters({ query, choices }: { query: LogQuery; choices: LogCh
         <Field label="To day"><TextInput type="date" name="to" defaultValue={query.to} /></Field>
         <div className="flex flex-wrap gap-3 sm:col-span-2 lg:col-span-4">
           <Button type="submit" tone="main">Show</Button>
-          {count > 0 ? <ButtonLink href="/checks">Clear filters</ButtonLink> : null}
+          {words.length > 0 ? <ButtonLink href="/checks">Clear filters</ButtonLink> : null}
         </div>
       </form>
     </Frame>
