@@ -1,5 +1,5 @@
 import { AttachMachine, CheckFacts, VerdictButtons, VerdictView } from "@/components/checks/verdict";
-import { PageHeading, Sheet } from "@/components/ui";
+import { ButtonLink, EmptyState, PageHeading, Sheet } from "@/components/ui";
 import { hasPermission, type Person } from "@/lib/auth/permissions";
 import type { CheckView } from "@/lib/checks/check-view";
 import { machineChoices } from "@/lib/checks/log-choices";
@@ -13,6 +13,7 @@ interface FinishedCheckProps {
 
 /** A finished check, read-only: its verdict, and what can be done after it. */
 export async function FinishedCheck({ check, person }: FinishedCheckProps) {
+  if (!check.verdict) return <Abandoned check={check} />;
   const mayRun = hasPermission(person, "check:run");
   const mayAttach = mayRun && (check.person.id === person.id || hasPermission(person, "machine:edit"));
   const machines = mayAttach ? await machineChoices(person) : [];
@@ -27,6 +28,16 @@ export async function FinishedCheck({ check, person }: FinishedCheckProps) {
           {mayAttach ? <div className="mt-5"><AttachMachine checkId={check.id} machines={machines} current={check.machine?.id ?? null} attach={attachMachineAction} /></div> : null}
         </Sheet>
       </div>
+    </>
+  );
+}
+
+function Abandoned({ check }: { readonly check: CheckView }) {
+  return (
+    <>
+      <PageHeading title="Abandoned check" />
+      <EmptyState title="No verdict was reached" action={<ButtonLink href="/checks" tone="main">Back to the log</ButtonLink>}>Its readings stay on record. Start a new check to go on.</EmptyState>
+      <div className="mt-6"><Sheet title="This check"><CheckFacts check={check} /></Sheet></div>
     </>
   );
 }

@@ -14,7 +14,7 @@ export default async function ReportPage({ params }: { readonly params: Promise<
   const check = await checkForPage(person, id);
   const back = `/checks/${id}` as Route;
   if (!check.verdict) {
-    return <EmptyState title="No report yet" action={<ButtonLink href={back} tone="main">Carry on with the check</ButtonLink>}>A report is made from the verdict. Finish the check first.</EmptyState>;
+    return <EmptyState title="No report" action={<ButtonLink href={back} tone="main">Back to the check</ButtonLink>}>A report is made from the verdict of a finished check.</EmptyState>;
   }
   return (
     <>
