@@ -1,5 +1,6 @@
 import { expect, test, type Page } from "@playwright/test";
 import { signIn } from "./support/people";
+import { startUnknown } from "./support/run-check";
 
 /** Most JavaScript a route may bring, gzipped; a route with nothing on it brings 131 KB. */
 const MOST_KILOBYTES = 190;
@@ -10,7 +11,7 @@ declare global {
   interface Window { shifts?: number }
 }
 
-/** JavaScript that came over the network for a page, in kilobytes as sent, without what the page loads on demand later. */
+/** JavaScript that came over the network for a page, in kilobytes as sent; the engine's worker loads its own beside the page. */
 async function scriptKilobytes(page: Page, path: string): Promise<number> {
   const sizes: Promise<number>[] = [];
   page.on("requestfinished", (request) => {
@@ -42,3 +43,20 @@ for (const path of ROUTES) {
     expect(await page.evaluate(() => window.shifts)).toBeLessThan(0.01);
   });
 }
+
+test("a finished check, an entry and, where no drawing stands beside it, a running check stay under the same weight", async ({ page, browser, isMobile }, { project }) => {
+  await signIn(page, "everyRole");
+  await startUnknown(page);
+  const running = new URL(page.url()).pathname;
+  await page.goto("/checks?state=finished");
+  const finished = (await page.getByRole("main").getByRole("list").getByRole("link").first().getAttribute("href")) ?? "";
+  await page.goto("/catalogue");
+  const entry = (await page.getByRole("list", { name: "Entries found" }).getByRole("link").first().getAttribute("href")) ?? "";
+  const narrow = (project.use.viewport?.width ?? 1280) < 1024 || isMobile;
+  for (const path of [finished, entry, ...(narrow ? [running] : [])]) {
+    const fresh = await browser.newPage();
+    await signIn(fresh, "everyRole");
+    expect(await scriptKilobytes(fresh, path), path).toBeLessThanOrEqual(MOST_KILOBYTES);
+    await fresh.context().close();
+  }
+});
