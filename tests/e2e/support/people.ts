@@ -4,6 +4,7 @@ import { expect, type BrowserContext, type Page } from "@playwright/test";
 export const PEOPLE = {
   technician: "tilda@canal-workshop.example",
   otherTechnician: "joram@canal-workshop.example",
+  trainer: "tomas@canal-workshop.example",
   administrator: "ana@canal-workshop.example",
   everyRole: "wim@canal-workshop.example",
 } as const;
