@@ -21,10 +21,22 @@ function notePeers(): void {
   });
 }
 
-/** Once a server process: settings checked, database migrated, first administrator made where asked for. */
-export async function startUp(): Promise<void> {
+async function prepare(): Promise<void> {
   const { firstAdministrator } = env();
   notePeers();
   await migrateDatabase();
   if (firstAdministrator) await addFirstAdministrator(firstAdministrator);
+}
+
+/**
+ * Once a server process: settings checked, database migrated, first administrator made where asked for.
+ * When that fails the process ends: left to itself, Next would go on listening and answer every request with 500.
+ */
+export async function startUp(): Promise<void> {
+  try {
+    await prepare();
+  } catch (error) {
+    process.stderr.write(`Pinwright does not start. ${error instanceof Error ? error.message : String(error)}\n`);
+    process.exit(1);
+  }
 }

@@ -35,7 +35,7 @@ test("headers: a nonce of its own each time, no frames, no sniffing; HSTS and th
   expect(secure.headers()["strict-transport-security"]).toContain("max-age=");
 });
 
-test("signing in works without a script, and over HTTPS gives a __Host- cookie", async ({ browser, baseURL }) => {
+test("signing in works without a script, and its cookie is small and closed to scripts", async ({ browser, baseURL }) => {
   const context = await browser.newContext({ javaScriptEnabled: false });
   const page = await context.newPage();
   await page.goto("/sign-in");
@@ -51,6 +51,22 @@ test("signing in works without a script, and over HTTPS gives a __Host- cookie",
   expect(cookie).toMatchObject({ httpOnly: true, sameSite: "Lax", path: "/", secure: false });
   expect((cookie?.value.length ?? 0) + "pinwright_session".length).toBeLessThan(1024);
   await context.close();
+});
+
+test("over HTTPS the session is a __Host- cookie", async ({ request, baseURL }) => {
+  const html = await (await request.get("/sign-in")).text();
+  const hidden = [...html.matchAll(/<input type="hidden" name="([^"]+)"(?: value="([^"]*)")?/g)];
+  expect(hidden.length).toBeGreaterThan(0);
+  const fields = Object.fromEntries(hidden.map(([, name = "", value = ""]) => [name, value.replaceAll("&quot;", '"')]));
+  const answer = await request.post("/sign-in", {
+    headers: { origin: baseURL ?? "", "x-forwarded-proto": "https" }, maxRedirects: 0,
+    multipart: { ...fields, email: PEOPLE.technician, password: "lock-paddle-27" },
+  });
+  const cookies = answer.headersArray().filter(({ name }) => name.toLowerCase() === "set-cookie").map(({ value }) => value);
+  const session = cookies.find((cookie) => cookie.includes("pinwright_session=")) ?? "";
+  expect(session).toMatch(/^__Host-pinwright_session=/);
+  for (const part of ["Secure", "HttpOnly", "Path=/", "SameSite=lax"]) expect(session.toLowerCase()).toContain(part.toLowerCase());
+  expect(session).not.toMatch(/domain=/i);
 });
 
 test("the form says what is wrong before it is sent", async ({ page }) => {
