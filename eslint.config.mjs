@@ -51,7 +51,13 @@ const config = [
     ignores: ["lib/diagnosis/cli/**", "lib/diagnosis/**/*.test.ts"],
     rules: {
       "no-restricted-globals": ["error", { name: "Date", message: "The engine has no clock." }, { name: "performance", message: "The engine has no clock." }, { name: "process", message: "The engine is pure." }, { name: "fetch", message: "The engine is pure." }],
-      "no-restricted-properties": ["error", { object: "Math", property: "random", message: "The engine has no randomness." }],
+      "no-restricted-properties": [
+        "error",
+        { object: "Math", property: "random", message: "The engine has no randomness." },
+        // Not exactly rounded: the last bit differs between browsers and server.
+        ...["exp", "expm1", "log", "log1p", "log2", "log10", "pow", "hypot", "sin", "cos", "tan", "atan", "tanh", "cbrt"].map((property) => ({ object: "Math", property, message: "Use lib/diagnosis/numerics.ts: the same bits on phone and server." })),
+      ],
+      "no-restricted-syntax": ["error", { selector: "BinaryExpression[operator='**'], AssignmentExpression[operator='**=']", message: "Multiply, or use lib/diagnosis/numerics.ts: the same bits on phone and server." }],
     },
   },
   // NEXT_RUNTIME decides at build time which branch exists at all; the rest configures tools.

@@ -12,6 +12,7 @@ import { ENTRY_IS_RIGHT } from "./priors";
 import type { Assessment, NextCheck, Reading, Setup } from "./types";
 import { validate } from "./validate";
 import { whyText } from "./words";
+import { ln } from "./numerics";
 
 /** Belief in a finding, a kind and pins at which the question counts as answered. */
 const SETTLED = 0.985;
@@ -26,7 +27,7 @@ export function beliefs(setup: Setup, readings: readonly Reading[]): Believed[] 
   const byEntry = believe(candidatesForEntry(setup.expect), observations, meter);
   if (!fitsBadly(byEntry[0]!, observations, meter)) return byEntry;
   // The entry cannot explain the readings: another device may be fitted, or its pins may differ.
-  const shifted = (list: ReturnType<typeof candidatesForEntry>, share: number) => list.map((c) => ({ ...c, logPrior: c.logPrior + Math.log(share) }));
+  const shifted = (list: ReturnType<typeof candidatesForEntry>, share: number) => list.map((c) => ({ ...c, logPrior: c.logPrior + ln(share) }));
   return believe([...shifted(candidatesForEntry(setup.expect), ENTRY_IS_RIGHT), ...shifted(candidatesForUnknown(), 1 - ENTRY_IS_RIGHT)], observations, meter);
 }
 

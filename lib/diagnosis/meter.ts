@@ -15,9 +15,9 @@ export const DEFAULT_METER: MeterSpec = {
  * display's full count that still holds the value (600.0, 6.000 k, ... for 6000 counts).
  */
 export function resolutionAt(ohms: number, counts: number): number {
-  const lowestRange = counts / 10;
-  const decades = Math.max(0, Math.ceil(Math.log10(Math.max(Math.abs(ohms), 1e-9) / lowestRange) - 1e-12));
-  return (lowestRange * 10 ** decades) / counts;
+  let range = counts / 10;
+  while (range * (1 + 1e-12) < Math.abs(ohms)) range *= 10;
+  return range / counts;
 }
 
 /**

@@ -1,6 +1,7 @@
 import { THERMAL_VOLTS } from "../network/solve";
 import { GROUND, SIGNAL, SUPPLY, type Candidate } from "./candidate";
 import { P } from "./parameters";
+import { ln } from "../numerics";
 
 /** An ohms function: a source behind a resistor as large as the range; the lowest range that holds the reading is shown. */
 const SOURCE_VOLTS = 2.5;
@@ -28,7 +29,7 @@ export function ohmsThroughDiodes(ohms: number, drop: number, junctions: number)
 function currentThrough(series: number, drop: number, junctions: number): number {
   let amperes = (SOURCE_VOLTS - drop) / series;
   for (let k = 0; k < 4; k++) {
-    const volts = drop + junctions * EMISSION * THERMAL_VOLTS * Math.log(amperes / DROP_AMPERES);
+    const volts = drop + junctions * EMISSION * THERMAL_VOLTS * ln(amperes / DROP_AMPERES);
     amperes = Math.max(SOURCE_VOLTS - volts, 0.05) / series;
   }
   return amperes;

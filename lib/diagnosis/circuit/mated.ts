@@ -3,6 +3,7 @@ import { GROUND, SIGNAL, SUPPLY, type Candidate } from "./candidate";
 import { cavity, supplyVolts, type Thevenin } from "./controller";
 import { clampShare, DROP_AMPERES, EMISSION } from "./device-ohms";
 import { P } from "./parameters";
+import { exp } from "../numerics";
 
 /** Input resistance of a voltmeter, ohms (hand-held meters: 10 megohm). */
 export const METER_OHMS = 10e6;
@@ -72,7 +73,7 @@ function solvePotentiometer(c: Candidate, x: Float64Array, out: MatedVolts): voi
   }
 }
 
-const saturation = (drop: number) => DROP_AMPERES * Math.exp(-drop / (EMISSION * THERMAL_VOLTS));
+const saturation = (drop: number) => DROP_AMPERES * exp(-drop / (EMISSION * THERMAL_VOLTS));
 
 /** Junction voltage from which the solution is sought, volts: near where a conducting junction ends up. */
 const GUESS_VOLTS = 0.45;
@@ -141,7 +142,7 @@ function solveElectronic(c: Candidate, x: Float64Array, out: MatedVolts): void {
 }
 
 function chanceOfRunning(across: number, fed: number): number {
-  return 1 / (1 + Math.exp(-(across - Math.min(RUN_VOLTS, MIN_SUPPLY_SHARE * fed)) / 0.12));
+  return 1 / (1 + exp(-(across - Math.min(RUN_VOLTS, MIN_SUPPLY_SHARE * fed)) / 0.12));
 }
 
 /** What the output does in the two networks: low and high of a pulse, rest and full of a voltage, or one stuck state. */

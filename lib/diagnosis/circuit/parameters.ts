@@ -1,4 +1,5 @@
 import type { Expect, FaultCode } from "../types";
+import { ln } from "../numerics";
 
 /** What is not known of device, wires and controller: places in the parameter vector. */
 export const P = {
@@ -26,7 +27,7 @@ class RangeBuilder {
 
   /** Middle value and factor that one standard deviation spans, e.g. (3000, 2): 1.5 k to 6 k. */
   ratio(index: number, middle: number, factor: number): this {
-    this.mean[index] = Math.log(middle); this.sd[index] = Math.log(factor); this.log[index] = 1;
+    this.mean[index] = ln(middle); this.sd[index] = ln(factor); this.log[index] = 1;
     return this;
   }
 

@@ -6,6 +6,7 @@ import { cavity, looseToGround, parallel, wireOhms, type Thevenin } from "./cont
 import { deviceOhms } from "./device-ohms";
 import { clampDuty, METER_OHMS, newMatedVolts, pulses, solveMated } from "./mated";
 import { P } from "./parameters";
+import { exp, ln } from "../numerics";
 
 export const CHECK_COUNT = ALL_CHECKS.length;
 export const CHECK_INDEX: ReadonlyMap<string, number> = new Map(ALL_CHECKS.map((c, i) => [c.code, i]));
@@ -47,7 +48,7 @@ const IDLE_SLACK = 0.03, IDLE_VOLTS = 0.02;
 const SEEN_VOLTS = 0.15;
 const TRIGGER_VOLTS = 0.8;
 
-const logistic = (z: number) => 1 / (1 + Math.exp(-z));
+const logistic = (z: number) => 1 / (1 + exp(-z));
 const roles = new Int8Array(4);
 const here: Thevenin = { volts: 0, ohms: 0 }, there: Thevenin = { volts: 0, ohms: 0 };
 const mated = newMatedVolts();
@@ -94,7 +95,7 @@ function deviceCheck(c: Candidate, x: Float64Array, index: number, red: number, 
 function setOhms(out: Predictions, index: number, ohms: number): void {
   out.value[index] = ohms;
   if (ohms < 0.5 * MAX_OHMS) out.word[index] = 0;
-  else out.word[index] = ohms > 2 * MAX_OHMS ? 1 : logistic(Math.log(ohms / MAX_OHMS) / 0.02);
+  else out.word[index] = ohms > 2 * MAX_OHMS ? 1 : logistic(ln(ohms / MAX_OHMS) / 0.02);
 }
 
 /** The partner of a cavity whose wire is shorted to another wire, or -1. */
@@ -139,7 +140,7 @@ function voltsBetween(c: Candidate, x: Float64Array, red: number, black: number)
 function matedChecks(c: Candidate, x: Float64Array, items: readonly Item[], out: Predictions): void {
   solveMated(c, x, mated);
   out.idle = c.family !== "potentiometer" && mated.running === 0;
-  out.logState = c.running === "yes" ? Math.log(Math.max(mated.running, 1e-4)) : 0;
+  out.logState = c.running === "yes" ? ln(Math.max(mated.running, 1e-4)) : 0;
   for (const k of items) {
     const role = roles[k.red]!, place = 3 * k.full + role, volts = mated.volts[place]!;
     if (k.spec.meter === "dc-volts") { out.value[k.index] = volts; out.slack[k.index] = out.idle && Math.abs(volts) > 0.03 ? IDLE_SLACK * Math.abs(volts) + IDLE_VOLTS : 0; }

@@ -2,6 +2,7 @@ import { FAMILIES, FAULT_PLACES, GROUND, makeCandidate, PERMUTATIONS, SIGNAL, SU
 import type { Family, Pull } from "../circuit/parameters";
 import { FAMILY_SHARE, FAULT_WEIGHTS, KIND_WEIGHTS, PULL_SHARE } from "../priors";
 import { KINDS, type Expect, type Kind, type PinAssignment } from "../types";
+import { ln } from "../numerics";
 
 const PULLS: readonly Pull[] = ["down", "up", "up-to-supply"];
 
@@ -10,7 +11,7 @@ function faultLogWeights(family: Family): readonly { place: FaultPlace; log: num
   const places = FAULT_PLACES[family];
   const count = (code: string) => places.filter((p) => p.code === code).length;
   const total = [...new Set(places.map((p) => p.code))].reduce((sum, code) => sum + FAULT_WEIGHTS[code], 0);
-  return places.map((place) => ({ place, log: Math.log(FAULT_WEIGHTS[place.code] / count(place.code) / total) }));
+  return places.map((place) => ({ place, log: ln(FAULT_WEIGHTS[place.code] / count(place.code) / total) }));
 }
 
 function ofFamily(kind: Kind, family: Family, pins: PinAssignment, base: number, expect?: Expect): Candidate[] {
@@ -19,7 +20,7 @@ function ofFamily(kind: Kind, family: Family, pins: PinAssignment, base: number,
     const states = runningStates(family, place);
     return pullsFor(family, place).flatMap((pull) => ends.flatMap((breakEnd) => states.map((running) => makeCandidate({
       family, kind, pins, place, pull, breakEnd, running, expect,
-      logPrior: base + log + Math.log(pullShare(family, pull, place)) - Math.log(ends.length * states.length),
+      logPrior: base + log + ln(pullShare(family, pull, place)) - ln(ends.length * states.length),
     }))));
   });
 }
@@ -44,7 +45,7 @@ let unknownDevice: readonly Candidate[] | null = null;
 /** Every way an unknown three-wire device may be built; made once, since nothing in it depends on the readings. */
 export function candidatesForUnknown(): readonly Candidate[] {
   unknownDevice ??= KINDS.flatMap((kind) => PERMUTATIONS.flatMap((pins) => FAMILIES[kind].flatMap((family) =>
-    ofFamily(kind, family, pins, Math.log(KIND_WEIGHTS[kind] * FAMILY_SHARE[family] / PERMUTATIONS.length)))));
+    ofFamily(kind, family, pins, ln(KIND_WEIGHTS[kind] * FAMILY_SHARE[family] / PERMUTATIONS.length)))));
   return unknownDevice;
 }
 
@@ -52,6 +53,6 @@ export function candidatesForUnknown(): readonly Candidate[] {
 export function candidatesForEntry(expect: Expect): readonly Candidate[] {
   const families = FAMILIES[expect.kind].filter((f) => !expect.output || f === expect.output);
   const total = families.reduce((sum, f) => sum + FAMILY_SHARE[f], 0);
-  return families.flatMap((family) => ofFamily(expect.kind, family, expect.pins, Math.log(FAMILY_SHARE[family] / total), expect));
+  return families.flatMap((family) => ofFamily(expect.kind, family, expect.pins, ln(FAMILY_SHARE[family] / total), expect));
 }
 

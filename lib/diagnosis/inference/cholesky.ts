@@ -1,3 +1,5 @@
+import { ln } from "../numerics";
+
 /** Dense Cholesky factorisation in place, lower triangle, for the few unknowns of a fit (m <= 19). */
 
 /** Replaces the lower triangle of a symmetric positive matrix by its factor. */
@@ -33,6 +35,6 @@ export function forward(l: Float64Array, m: number, b: Float64Array): void {
 /** Logarithm of the determinant of A from its factor. */
 export function logDeterminant(l: Float64Array, m: number): number {
   let sum = 0;
-  for (let i = 0; i < m; i++) sum += 2 * Math.log(l[i * m + i]!);
+  for (let i = 0; i < m; i++) sum += 2 * ln(l[i * m + i]!);
   return sum;
 }

@@ -4,6 +4,7 @@ import type { MeterSpec, Reading } from "../types";
 import { physical } from "./fit";
 import { numberLogChance, observe, scalePrediction, wordLogChance, type Observation } from "./observe";
 import type { Believed } from "./posterior";
+import { norm } from "../numerics";
 
 /** A reading this many standard uncertainties from what the best explanation expects contradicts it. */
 const FAR = 7;
@@ -19,7 +20,7 @@ export function misfits(b: Believed, observations: readonly Observation[], meter
   return observations.map((o) => {
     if (o.word !== null) return wordLogChance(o, predictions) < UNLIKELY_WORD ? FAR + 1 : 0;
     if (numberLogChance(o, predictions) === null) return FAR + 3;
-    const sd = Math.hypot(o.sd, predictions.slack[o.index]!);
+    const sd = norm(o.sd, predictions.slack[o.index]!);
     return Math.abs(o.scaled - scalePrediction(o.spec, predictions.value[o.index]!, meter)) / sd;
   });
 }

@@ -5,6 +5,7 @@ import type { MeterSpec } from "../types";
 import { factor, logDeterminant, solveFactored } from "./cholesky";
 import { movedBy, reachOf } from "./movable";
 import { numberLogChance, scalePrediction, strayNumberLogDensity, wordLogChance, type Observation } from "./observe";
+import { exp, ln, norm } from "../numerics";
 
 /**
  * Joint fit of everything unknown to everything read. Parameters are measured in standard deviations of
@@ -53,7 +54,7 @@ function makeRoom(observations: number): void {
 
 function physicalAt(c: Candidate, i: number, z: number): number {
   const v = c.ranges.mean[i]! + c.ranges.sd[i]! * z;
-  return c.ranges.log[i] ? Math.exp(v) : v;
+  return c.ranges.log[i] ? exp(v) : v;
 }
 
 /** Physical values at z, written into `out`. */
@@ -78,11 +79,11 @@ function compare(o: Observation, i: number, meter: MeterSpec): number {
   if (o.word !== null) return wordLogChance(o, base);
   const shown = numberLogChance(o, base);
   if (shown === null) return strayNumberLogDensity();
-  const slack = base.slack[o.index]!, sd = slack === 0 ? o.sd : Math.hypot(o.sd, slack);
+  const slack = base.slack[o.index]!, sd = slack === 0 ? o.sd : norm(o.sd, slack);
   predicted[o.index] = scalePrediction(o.spec, base.value[o.index]!, meter);
   const r = (o.scaled - predicted[o.index]!) / sd, spread = 1 + r * r / TAIL_SQUARED;
   live[i] = 1; residual[i] = r; sds[i] = sd; weight[i] = 1 / spread;
-  return shown + o.logPeak - (slack === 0 ? 0 : Math.log(sd / o.sd)) - 0.5 * TAIL_SQUARED * Math.log(spread);
+  return shown + o.logPeak - (slack === 0 ? 0 : ln(sd / o.sd)) - 0.5 * TAIL_SQUARED * ln(spread);
 }
 
 /** Derivatives of the scaled predictions by z, over sd, by forward differences at the point last evaluated. */

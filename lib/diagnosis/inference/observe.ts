@@ -2,6 +2,7 @@ import { CHECK_GROUP, CHECK_INDEX, type Predictions } from "../circuit/predict";
 import { ALL_CHECKS } from "../checks";
 import { DEFAULT_METER, meterLimit, standardUncertainty } from "../meter";
 import type { CheckSpec, MeterSpec, Reading } from "../types";
+import { exp, ln, norm } from "../numerics";
 
 /** A reading made ready for comparison: on the scale where the meter's error is nearly constant. */
 export interface Observation {
@@ -18,18 +19,18 @@ export interface Observation {
 const OHM_OFFSET = 2;
 /** The circuit model is itself only so good; common practice for lumped models of wiring. */
 const MODEL_OHM_SHARE = 0.004, MODEL_VOLTS = 0.004, MODEL_VOLT_SHARE = 0.0005, MODEL_HERTZ_SHARE = 0.0005, MODEL_DUTY = 0.001;
-const LOG_ROOT_TWO_PI = 0.5 * Math.log(2 * Math.PI);
+const LOG_ROOT_TWO_PI = 0.5 * ln(2 * Math.PI);
 
 /** Number on the comparison scale: logarithm for ohms and hertz, straight for volts and duty. */
 export function scale(spec: CheckSpec, value: number): number {
-  if (spec.unit === "ohm") return Math.log(Math.max(value, 0) + OHM_OFFSET);
-  return spec.unit === "hertz" ? Math.log(Math.max(value, 1e-3)) : value;
+  if (spec.unit === "ohm") return ln(Math.max(value, 0) + OHM_OFFSET);
+  return spec.unit === "hertz" ? ln(Math.max(value, 1e-3)) : value;
 }
 
 /** The number a scaled value stands for; inverse of `scale`. */
 export function unscale(spec: CheckSpec, scaled: number): number {
-  if (spec.unit === "ohm") return Math.max(0, Math.exp(scaled) - OHM_OFFSET);
-  return spec.unit === "hertz" ? Math.exp(scaled) : scaled;
+  if (spec.unit === "ohm") return Math.max(0, exp(scaled) - OHM_OFFSET);
+  return spec.unit === "hertz" ? exp(scaled) : scaled;
 }
 
 /** Predicted reading on the comparison scale; test leads add their own resistance to ohms. */
@@ -41,10 +42,10 @@ export function scalePrediction(spec: CheckSpec, value: number, meter: MeterSpec
 export function scaledSd(spec: CheckSpec, value: number, meter: MeterSpec): number {
   const u = standardUncertainty(meterLimit(spec, value, meter));
   switch (spec.unit) {
-    case "ohm": return Math.hypot(u, MODEL_OHM_SHARE * value) / (Math.max(value, 0) + OHM_OFFSET);
-    case "volt": return Math.hypot(u, MODEL_VOLTS, MODEL_VOLT_SHARE * value);
-    case "hertz": return Math.hypot(u / value, MODEL_HERTZ_SHARE);
-    default: return Math.hypot(u, MODEL_DUTY);
+    case "ohm": return norm(u, MODEL_OHM_SHARE * value) / (Math.max(value, 0) + OHM_OFFSET);
+    case "volt": return norm(u, MODEL_VOLTS, MODEL_VOLT_SHARE * value);
+    case "hertz": return norm(u / value, MODEL_HERTZ_SHARE);
+    default: return norm(u, MODEL_DUTY);
   }
 }
 
@@ -58,7 +59,7 @@ function observation(index: number, value: Reading[1], meter: MeterSpec): Observ
   const spec = ALL_CHECKS[index]!, group = CHECK_GROUP[index]!;
   if (typeof value === "string") return { index, spec, group, word: value, scaled: 0, sd: 1, logPeak: 0 };
   const sd = scaledSd(spec, value, meter);
-  return { index, spec, group, word: null, scaled: scale(spec, value), sd, logPeak: -Math.log(sd) - LOG_ROOT_TWO_PI };
+  return { index, spec, group, word: null, scaled: scale(spec, value), sd, logPeak: -ln(sd) - LOG_ROOT_TWO_PI };
 }
 
 /** Least log-chance given to a word that a candidate rules out: people misread and mistype. */
@@ -66,7 +67,7 @@ const WORD_FLOOR = -11;
 /** Log-density of a number where a word was due: any number over the scale's width is as good as another. */
 const STRAY_NUMBER = -13;
 
-const logChance = (p: number) => (p > 0 ? Math.max(Math.log(p), WORD_FLOOR) : WORD_FLOOR);
+const logChance = (p: number) => (p > 0 ? Math.max(ln(p), WORD_FLOOR) : WORD_FLOOR);
 
 /** Log-chance of a word under the predictions. */
 export function wordLogChance(o: Observation, p: Predictions): number {
@@ -82,7 +83,7 @@ export function wordLogChance(o: Observation, p: Predictions): number {
 /** Log-chance that a number is shown at all, or null when the candidate all but rules numbers out. */
 export function numberLogChance(o: Observation, p: Predictions): number | null {
   const word = p.word[o.index]!;
-  return word > 0.5 ? null : Math.log(1 - word);
+  return word > 0.5 ? null : ln(1 - word);
 }
 
 export function strayNumberLogDensity(): number { return STRAY_NUMBER; }

@@ -1,5 +1,6 @@
 import type { CheckSpec } from "../types";
 import type { Outlook } from "./outlook";
+import { exp } from "../numerics";
 
 /** One believed candidate's share and what it expects; `row` is the hypothesis it counts towards. */
 export interface Expected { readonly p: number; readonly row: number; readonly outlook: Outlook }
@@ -8,7 +9,7 @@ const MOST_EDGES = 12;
 /** Share of readings that fall anywhere at all: slips of lead, eye and finger (common practice: a few in a thousand). */
 const STRAY = 0.004;
 /** The logistic curve that stays within 0.01 of the normal distribution. */
-const normalBelow = (z: number) => 1 / (1 + Math.exp(-1.702 * z));
+const normalBelow = (z: number) => 1 / (1 + exp(-1.702 * z));
 
 /**
  * Chances of a check's outcomes, one row a hypothesis: the words it may show, then bands of numbers. The

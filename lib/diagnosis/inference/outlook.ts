@@ -7,6 +7,7 @@ import { physical } from "./fit";
 import { movedBy, reachOf } from "./movable";
 import { scaledSd, scalePrediction, unscale } from "./observe";
 import type { Believed } from "./posterior";
+import { exp, square } from "../numerics";
 
 /** What one candidate, fitted to the readings so far, expects of every check: a normal on the comparison scale, or a word. */
 export interface Outlook {
@@ -32,7 +33,7 @@ export function outlookOf(b: Believed, meter: MeterSpec): Outlook {
   addKnown(b, derivatives, variance);
   const sd = new Float64Array(CHECK_COUNT);
   for (let i = 0; i < CHECK_COUNT; i++) {
-    if (numeric(at, i)) sd[i] = Math.sqrt(variance[i]! + at.slack[i]! ** 2 + scaledSd(ALL_CHECKS[i]!, unscale(ALL_CHECKS[i]!, mean[i]!), meter) ** 2);
+    if (numeric(at, i)) sd[i] = Math.sqrt(variance[i]! + square(at.slack[i]!) + square(scaledSd(ALL_CHECKS[i]!, unscale(ALL_CHECKS[i]!, mean[i]!), meter)));
   }
   return { mean, sd, word: Float64Array.from(at.word), jumps: Float64Array.from(at.jumps) };
 }
@@ -46,7 +47,7 @@ function derivativesOf(b: Believed, meter: MeterSpec, mean: Float64Array): Deriv
   const { candidate: c, fit } = b, parameters = movedBy(c, ALL_GROUPS);
   const idle = at.idle, rows = parameters.map((p) => {
     const row = new Float64Array(CHECK_COUNT), kept = x[p]!, v = c.ranges.mean[p]! + c.ranges.sd[p]! * (fit.z[p]! + DIFFERENCE), reach = reachOf(c, p, idle);
-    x[p] = c.ranges.log[p] ? Math.exp(v) : v;
+    x[p] = c.ranges.log[p] ? exp(v) : v;
     nudged.value.set(at.value);
     predictInto(c, x, WHOLE_PLAN, reach, nudged);
     x[p] = kept;
@@ -63,10 +64,10 @@ function addKnown(b: Believed, d: Derivatives, variance: Float64Array): void {
   const joint = new Float64Array(m);
   for (let i = 0; i < CHECK_COUNT; i++) {
     let sum = 0;
-    for (const p of untouched) sum += d.rows[place.get(p)!]![i]! ** 2;
+    for (const p of untouched) sum += square(d.rows[place.get(p)!]![i]!);
     let any = false;
     for (let k = 0; k < m; k++) { const row = place.get(active[k]!); joint[k] = row === undefined ? 0 : d.rows[row]![i]!; any ||= joint[k] !== 0; }
-    if (any) { forward(precision, m, joint); for (let k = 0; k < m; k++) sum += joint[k]! ** 2; }
+    if (any) { forward(precision, m, joint); for (let k = 0; k < m; k++) sum += square(joint[k]!); }
     variance[i] = sum;
   }
 }

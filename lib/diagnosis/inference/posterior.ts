@@ -4,6 +4,7 @@ import { GROUP } from "../circuit/predict";
 import type { MeterSpec } from "../types";
 import { evidenceOf, fitCandidate, type Evidence, type Fit } from "./fit";
 import type { Observation } from "./observe";
+import { exp } from "../numerics";
 
 /** A candidate with its fit and its share of the belief. */
 export interface Believed { readonly candidate: Candidate; readonly fit: Fit; readonly logWeight: number; p: number }
@@ -109,7 +110,7 @@ function normalise(list: Believed[]): Believed[] {
   list.sort((a, b) => b.logWeight - a.logWeight || byId(a.candidate, b.candidate));
   const best = list[0]!.logWeight;
   const kept = list.filter((b) => b.logWeight >= best - CUT);
-  const total = kept.reduce((sum, b) => sum + Math.exp(b.logWeight - best), 0);
-  for (const b of kept) b.p = Math.exp(b.logWeight - best) / total;
+  const total = kept.reduce((sum, b) => sum + exp(b.logWeight - best), 0);
+  for (const b of kept) b.p = exp(b.logWeight - best) / total;
   return kept;
 }

@@ -1,3 +1,5 @@
+import { exp, ln } from "../numerics";
+
 /**
  * Nodal analysis of small DC networks: resistors, real sources (a voltage behind a resistance) and diodes.
  * Method: modified for sources as Norton equivalents, so the matrix stays symmetric and positive; diodes by
@@ -59,7 +61,7 @@ export class NodalNetwork {
    * silicon), `guess` the junction voltage to start from, volts. The guess changes how soon, not where, the solution is found.
    */
   diode(anode: number, cathode: number, saturation: number, emission = 1, guess = 0): void {
-    const thermal = emission * THERMAL_VOLTS, limitVolts = thermal * Math.log(thermal / (Math.SQRT2 * saturation));
+    const thermal = emission * THERMAL_VOLTS, limitVolts = thermal * ln(thermal / (Math.SQRT2 * saturation));
     const slot = this.diodes[this.diodeCount];
     if (slot) Object.assign(slot, { anode, cathode, saturation, thermal, limitVolts, volts: guess });
     else this.diodes.push({ anode, cathode, saturation, thermal, limitVolts, volts: guess });
@@ -85,7 +87,7 @@ export class NodalNetwork {
     const rhs = this.currentsCopy();
     for (let k = 0; k < this.diodeCount; k++) {
       const d = this.diodes[k]!;
-      const e = Math.exp(Math.min(d.volts / d.thermal, 80));
+      const e = exp(Math.min(d.volts / d.thermal, 80));
       const g = Math.max(d.saturation * e / d.thermal, MIN_SIEMENS);
       const i = d.saturation * (e - 1) + MIN_SIEMENS * d.volts;
       this.conductance(this.work, d.anode, d.cathode, g);
@@ -137,7 +139,7 @@ export class NodalNetwork {
 /** Keeps one Newton step of a junction within the reach of its exponential. */
 function limitJunction(next: number, last: number, { thermal, limitVolts }: Diode): number {
   if (next <= limitVolts || Math.abs(next - last) <= 2 * thermal) return next;
-  if (last <= 0) return thermal * Math.log(Math.max(next / thermal, Math.E));
+  if (last <= 0) return thermal * ln(Math.max(next / thermal, Math.E));
   const grow = 1 + (next - last) / thermal;
-  return grow > 0 ? last + thermal * Math.log(grow) : limitVolts;
+  return grow > 0 ? last + thermal * ln(grow) : limitVolts;
 }

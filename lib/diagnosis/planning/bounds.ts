@@ -1,3 +1,5 @@
+import { log2 } from "../numerics";
+
 /**
  * Expected length of the best prefix code of the given arity over the weights (Huffman 1952): no sequence of tests with that many
  * outcomes can identify hypotheses of these chances in fewer tests on average.
@@ -19,5 +21,5 @@ export function huffmanLength(weights: readonly number[], arity = 2): number {
 
 /** Shannon's bound: entropy (bits) over what one test with that many outcomes can tell at most. */
 export function entropyBound(bits: number, outcomes = 2): number {
-  return bits / Math.log2(outcomes);
+  return bits / log2(outcomes);
 }

@@ -1,4 +1,5 @@
 import type { PlanProblem, PlanTest } from "./types";
+import { log2 } from "../numerics";
 
 /** The problem in flat arrays, so that the inner loops allocate nothing. */
 export interface Compiled {
@@ -47,7 +48,7 @@ function fillChances(tests: readonly PlanTest[], size: number, offset: Int32Arra
       for (const p of test.outcomes[h]!) {
         chance[at] = p;
         at += 1;
-        if (p > 0) entropy -= p * Math.log2(p);
+        if (p > 0) entropy -= p * log2(p);
       }
       noise[t * size + h] = entropy;
     }

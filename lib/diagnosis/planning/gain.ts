@@ -1,11 +1,12 @@
 import type { Compiled } from "./compile";
+import { log2 } from "../numerics";
 
 /** Shannon entropy of chances that sum to 1, bits. */
 export function entropyBits(chances: ArrayLike<number>): number {
   let bits = 0;
   for (let i = 0; i < chances.length; i += 1) {
     const p = chances[i]!;
-    if (p > 0) bits -= p * Math.log2(p);
+    if (p > 0) bits -= p * log2(p);
   }
   return bits;
 }
@@ -28,7 +29,7 @@ export function gainBits(c: Compiled, test: number, belief: Float64Array, scratc
   let bits = 0;
   for (let o = 0; o < c.outcomes[test]!; o += 1) {
     const p = scratch[o]!;
-    if (p > 0) bits -= p * Math.log2(p);
+    if (p > 0) bits -= p * log2(p);
   }
   for (let h = 0; h < c.size; h += 1) bits -= belief[h]! * c.noise[test * c.size + h]!;
   return Math.max(0, bits);
