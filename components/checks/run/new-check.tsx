@@ -1,6 +1,6 @@
 "use client";
 
-import { useRef, useState } from "react";
+import { useCallback, useEffect, useRef, useState } from "react";
 import { ulid } from "ulid";
 import { PageHeading } from "@/components/ui";
 import type { RunSetup } from "@/lib/checks/run";
@@ -17,6 +17,28 @@ interface NewCheckProps {
   readonly machineId: string;
 }
 
+/** Milliseconds after the page is there: long enough for it to be read and used first. */
+const WARM_AFTER = 3_000;
+
+/**
+ * Fetches the check's screens and engine with the first touch, or a little later without one: the page itself stays
+ * light, and the check is there should the server go.
+ */
+function useWarmUp(): () => void {
+  const warmed = useRef(false);
+  const warm = useCallback(() => {
+    if (warmed.current) return;
+    warmed.current = true;
+    warmCheckRun();
+    void import("./use-engine").then(({ sharedEngine }) => sharedEngine(), () => { warmed.current = false; });
+  }, []);
+  useEffect(() => {
+    const timer = setTimeout(warm, WARM_AFTER);
+    return () => clearTimeout(timer);
+  }, [warm]);
+  return warm;
+}
+
 /**
  * Starts a check on the phone and goes straight into it, on the same page: the server need not answer.
  * The address becomes the check's own, so that a reload comes back to it.
@@ -24,14 +46,7 @@ interface NewCheckProps {
 export function NewCheck({ personId, entry, choices, machineId }: NewCheckProps) {
   const [started, setStarted] = useState<string | null>(null);
 
-  const warmed = useRef(false);
-  // With the first touch, not before: the page itself stays light, and the check is there should the server go.
-  const warm = () => {
-    if (warmed.current) return;
-    warmed.current = true;
-    warmCheckRun();
-    void import("./use-engine").then(({ sharedEngine }) => sharedEngine(), () => undefined);
-  };
+  const warm = useWarmUp();
 
   const start = async (setup: RunSetup) => {
     const id = ulid();

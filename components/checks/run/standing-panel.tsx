@@ -22,7 +22,7 @@ export function StandingPanel({ engine, labels, why, chosen }: StandingPanelProp
   const reason = why ?? (chosen ? "You picked this one; it is not the one that was proposed." : null);
   return (
     <>
-      <div className="sticky top-0 z-20 lg:static lg:col-start-2 lg:row-start-1">
+      <div data-standing-strip className="sticky top-0 z-20 lg:static lg:col-start-2 lg:row-start-1">
         <StandingStrip assessment={engine.latest} working={engine.current === null && !engine.failed} labels={labels} open={open} onToggle={() => setOpen(!open)} />
       </div>
       <p role="status" className="sr-only">{standingSentence(engine.current, labels)}</p>
