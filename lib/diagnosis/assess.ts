@@ -23,12 +23,12 @@ const MOST_NEXT = 5;
 /** Belief over everything that may be true of the machine, likeliest first. */
 export function beliefs(setup: Setup, readings: readonly Reading[]): Believed[] {
   const meter = setup.meter ?? DEFAULT_METER, observations = observe(readings, meter);
-  if (!setup.expect) return believe(candidatesForUnknown(), observations, meter);
-  const byEntry = believe(candidatesForEntry(setup.expect), observations, meter);
+  if (!setup.expect) return believe(candidatesForUnknown(setup.experience), observations, meter);
+  const byEntry = believe(candidatesForEntry(setup.expect, setup.experience), observations, meter);
   if (!fitsBadly(byEntry[0]!, observations, meter)) return byEntry;
   // The entry cannot explain the readings: another device may be fitted, or its pins may differ.
   const shifted = (list: ReturnType<typeof candidatesForEntry>, share: number) => list.map((c) => ({ ...c, logPrior: c.logPrior + ln(share) }));
-  return believe([...shifted(candidatesForEntry(setup.expect), ENTRY_IS_RIGHT), ...shifted(candidatesForUnknown(), 1 - ENTRY_IS_RIGHT)], observations, meter);
+  return believe([...shifted(candidatesForEntry(setup.expect, setup.experience), ENTRY_IS_RIGHT), ...shifted(candidatesForUnknown(setup.experience), 1 - ENTRY_IS_RIGHT)], observations, meter);
 }
 
 /**

@@ -46,8 +46,8 @@ function standIn(setup: Setup, readings: readonly Reading[], fault: Fault): Cand
   const top = beliefs(setup, readings)[0]!.candidate;
   const alike = (c: Candidate) => c.hypothesis.kind === top.hypothesis.kind && `${c.pinOf}` === `${top.pinOf}`;
   const having = (pool: readonly Candidate[]) => pool.filter((c) => faultId(c.hypothesis.fault) === id);
-  const byEntry = setup.expect ? having(candidatesForEntry(setup.expect)).filter(alike) : [];
-  const any = having(candidatesForUnknown()), near = any.filter(alike);
+  const byEntry = setup.expect ? having(candidatesForEntry(setup.expect, setup.experience)).filter(alike) : [];
+  const any = having(candidatesForUnknown(setup.experience)), near = any.filter(alike);
   const list = byEntry.length > 0 ? byEntry : near.length > 0 ? near : any;
   return list.length === 0 ? null : believe(list, observations, meter)[0]!.candidate;
 }

@@ -6,3 +6,4 @@ export { assess } from "./assess";
 export { answerRequest, type Answer, type Refusal } from "./answer";
 export { effects, evidence, predict, tellApart } from "./explain";
 export { faultText, whyText } from "./words";
+export { chancesBefore, FINDING_PRIORS, KIND_PRIORS, PRIOR_CHECKS, type Prior } from "./priors";

@@ -1,21 +1,57 @@
 import type { Family, Pull } from "./circuit/parameters";
-import type { FaultCode, Kind } from "./types";
+import type { Experience, FaultCode, Kind } from "./types";
+
+/** What is believed of one finding or kind before the first reading, as a share, and where the figure comes from. */
+export interface Prior<Code> { readonly code: Code; readonly share: number; readonly source: string }
+
+const PRACTICE = "common practice";
+const CONNECTION = "MIL-HDBK-338B after FMD-91: of faulty connections 0.61 open, 0.23 poor, 0.16 short; share of all findings by common practice";
+const RESISTOR = "MIL-HDBK-338B after FMD-91: of faulty variable resistors 0.53 open, 0.40 erratic, 0.07 short; share of all findings by common practice";
 
 /**
- * Chances before the first reading, as relative weights. Common practice: when a technician is sent to a
- * machine, about a third of the devices turn out sound; of the rest most faults are in wires and connectors
- * (interconnections lead every published list of electrical failures, e.g. FMD-91 as in MIL-HDBK-338B:
- * connection open 0.61, poor 0.23, short 0.16), fewer in the device, few in the controller.
- * A fault with several places shares its weight among them.
+ * Chances before the first reading. When a technician is sent to a machine, about a third of the devices turn out
+ * sound; of the rest most faults are in wires and connectors, fewer in the device, few in the controller.
+ * A finding with several places shares its chance among them.
  */
-export const FAULT_WEIGHTS: Readonly<Record<FaultCode, number>> = {
-  none: 0.31, "wire-open": 0.15, "wire-resistive": 0.09, "short-to-ground": 0.075, "contact-open": 0.07, "wires-swapped": 0.055,
-  "supply-missing": 0.05, "short-to-battery": 0.05, "wires-shorted": 0.04, "pull-missing": 0.025, "track-worn": 0.055,
-  "wiper-open": 0.03, "track-open": 0.02, "output-dead": 0.03, "output-stuck-high": 0.03, "output-stuck-low": 0.03,
-};
+export const FINDING_PRIORS: readonly Prior<FaultCode>[] = [
+  { code: "none", share: 0.31, source: PRACTICE },
+  { code: "wire-open", share: 0.15, source: CONNECTION },
+  { code: "wire-resistive", share: 0.09, source: CONNECTION },
+  { code: "short-to-ground", share: 0.075, source: CONNECTION },
+  { code: "contact-open", share: 0.07, source: CONNECTION },
+  { code: "wires-swapped", share: 0.055, source: PRACTICE },
+  { code: "supply-missing", share: 0.05, source: PRACTICE },
+  { code: "short-to-battery", share: 0.05, source: CONNECTION },
+  { code: "wires-shorted", share: 0.04, source: CONNECTION },
+  { code: "pull-missing", share: 0.025, source: PRACTICE },
+  { code: "track-worn", share: 0.055, source: RESISTOR },
+  { code: "wiper-open", share: 0.03, source: RESISTOR },
+  { code: "track-open", share: 0.02, source: RESISTOR },
+  { code: "output-dead", share: 0.03, source: PRACTICE },
+  { code: "output-stuck-high", share: 0.03, source: PRACTICE },
+  { code: "output-stuck-low", share: 0.03, source: PRACTICE },
+];
 
-/** Common practice: no kind is rare on mobile plant; powered voltage devices are the fewest of the three. */
-export const KIND_WEIGHTS: Readonly<Record<Kind, number>> = { potentiometer: 0.38, pwm: 0.4, voltage: 0.22 };
+/** No kind is rare on mobile plant; powered voltage devices are the fewest of the three. */
+export const KIND_PRIORS: readonly Prior<Kind>[] = [
+  { code: "potentiometer", share: 0.38, source: PRACTICE },
+  { code: "pwm", share: 0.4, source: PRACTICE },
+  { code: "voltage", share: 0.22, source: PRACTICE },
+];
+
+/** The published chances count as much as this many checks of the workshop's own (common practice; shown with them). */
+export const PRIOR_CHECKS = 100;
+
+/** Dirichlet posterior mean of one list of chances: prior shares worth PRIOR_CHECKS checks, and the workshop's own counts. Shares sum to 1. */
+function shifted<Code extends string>(priors: readonly Prior<Code>[], counts: Readonly<Partial<Record<Code, number>>> | undefined): Record<Code, number> {
+  const whole = priors.reduce((sum, p) => sum + p.share, 0), own = priors.reduce((sum, p) => sum + (counts?.[p.code] ?? 0), 0);
+  return Object.fromEntries(priors.map((p) => [p.code, (PRIOR_CHECKS * p.share / whole + (counts?.[p.code] ?? 0)) / (PRIOR_CHECKS + own)])) as Record<Code, number>;
+}
+
+/** Chances of kinds and findings before the first reading, with the workshop's own confirmed checks counted in where there are any. */
+export function chancesBefore(experience?: Experience): { kinds: Readonly<Record<Kind, number>>; findings: Readonly<Record<FaultCode, number>> } {
+  return { kinds: shifted(KIND_PRIORS, experience?.kinds), findings: shifted(FINDING_PRIORS, experience?.findings) };
+}
 
 /** Open-collector outputs are the more common of the two PWM output types (common practice). */
 export const FAMILY_SHARE: Readonly<Record<Family, number>> = { potentiometer: 1, "open-collector": 0.65, "push-pull": 0.35, voltage: 1 };

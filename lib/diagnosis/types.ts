@@ -45,11 +45,19 @@ export interface Expect {
   readonly signalVolts?: { readonly rest: number; readonly full: number };
 }
 
+/** The workshop's own confirmed checks, counted: whole numbers from 0. */
+export interface Experience {
+  readonly kinds: Readonly<Partial<Record<Kind, number>>>;
+  readonly findings: Readonly<Partial<Record<FaultCode, number>>>;
+}
+
 export interface Setup {
   readonly pins: readonly [string, string, string];
   readonly expect?: Expect;
   /** The meter in hand; the bench meter of `meter.ts` when absent. */
   readonly meter?: MeterSpec;
+  /** Shifts the chances before the first reading; the published ones alone when absent. */
+  readonly experience?: Experience;
   /** Checks the technician cannot do here; never proposed. */
   readonly excluded?: readonly string[];
   /** State of the machine now, where it is known; else it follows from the readings taken. */

@@ -1,21 +1,23 @@
 import { FAMILIES, FAULT_PLACES, GROUND, makeCandidate, PERMUTATIONS, SIGNAL, SUPPLY, type Candidate, type FaultPlace, type Running } from "../circuit/candidate";
 import type { Family, Pull } from "../circuit/parameters";
-import { FAMILY_SHARE, FAULT_WEIGHTS, KIND_WEIGHTS, PULL_SHARE } from "../priors";
-import { KINDS, type Expect, type Kind, type PinAssignment } from "../types";
+import { chancesBefore, FAMILY_SHARE, PULL_SHARE } from "../priors";
+import { KINDS, type Expect, type Experience, type Kind, type PinAssignment } from "../types";
 import { ln } from "../numerics";
 
 const PULLS: readonly Pull[] = ["down", "up", "up-to-supply"];
 
+type Chances = ReturnType<typeof chancesBefore>;
+
 /** Log-weights of a family's findings, normalised; the places of one finding share its weight. */
-function faultLogWeights(family: Family): readonly { place: FaultPlace; log: number }[] {
+function faultLogWeights(family: Family, { findings }: Chances): readonly { place: FaultPlace; log: number }[] {
   const places = FAULT_PLACES[family];
   const count = (code: string) => places.filter((p) => p.code === code).length;
-  const total = [...new Set(places.map((p) => p.code))].reduce((sum, code) => sum + FAULT_WEIGHTS[code], 0);
-  return places.map((place) => ({ place, log: ln(FAULT_WEIGHTS[place.code] / count(place.code) / total) }));
+  const total = [...new Set(places.map((p) => p.code))].reduce((sum, code) => sum + findings[code], 0);
+  return places.map((place) => ({ place, log: ln(findings[place.code] / count(place.code) / total) }));
 }
 
-function ofFamily(kind: Kind, family: Family, pins: PinAssignment, base: number, expect?: Expect): Candidate[] {
-  return faultLogWeights(family).flatMap(({ place, log }) => {
+function ofFamily(kind: Kind, family: Family, pins: PinAssignment, base: number, chances: Chances, expect?: Expect): Candidate[] {
+  return faultLogWeights(family, chances).flatMap(({ place, log }) => {
     const ends = place.code === "track-open" ? ([0, 1] as const) : ([0] as const);
     const states = runningStates(family, place);
     return pullsFor(family, place).flatMap((pull) => ends.flatMap((breakEnd) => states.map((running) => makeCandidate({
@@ -40,19 +42,30 @@ function pullsFor(family: Family, place: FaultPlace): readonly Pull[] {
 
 const pullShare = (family: Family, pull: Pull, place: FaultPlace) => (place.code === "pull-missing" ? 1 : PULL_SHARE[family][pull]);
 
-let unknownDevice: readonly Candidate[] | null = null;
-
-/** Every way an unknown three-wire device may be built; made once, since nothing in it depends on the readings. */
-export function candidatesForUnknown(): readonly Candidate[] {
-  unknownDevice ??= KINDS.flatMap((kind) => PERMUTATIONS.flatMap((pins) => FAMILIES[kind].flatMap((family) =>
-    ofFamily(kind, family, pins, ln(KIND_WEIGHTS[kind] * FAMILY_SHARE[family] / PERMUTATIONS.length)))));
-  return unknownDevice;
+/** The list made last, with what it was made for: making it takes longer than using it, and a check asks for the same one again and again. */
+function remembered<Key>(make: (key: Key) => readonly Candidate[]): (key: Key) => readonly Candidate[] {
+  let last: { name: string; list: readonly Candidate[] } | null = null;
+  return (key) => {
+    const name = JSON.stringify(key) ?? "";
+    if (last?.name !== name) last = { name, list: make(key) };
+    return last.list;
+  };
 }
 
-/** Every way the device of a catalogue entry may be built and wired, taking the entry at its word. */
-export function candidatesForEntry(expect: Expect): readonly Candidate[] {
+/** Every way an unknown three-wire device may be built. */
+export const candidatesForUnknown = remembered((experience: Experience | undefined): readonly Candidate[] => {
+  const chances = chancesBefore(experience);
+  return KINDS.flatMap((kind) => PERMUTATIONS.flatMap((pins) => FAMILIES[kind].flatMap((family) =>
+    ofFamily(kind, family, pins, ln(chances.kinds[kind] * FAMILY_SHARE[family] / PERMUTATIONS.length), chances))));
+});
+
+const forEntry = remembered(({ expect, experience }: { expect: Expect; experience?: Experience }): readonly Candidate[] => {
   const families = FAMILIES[expect.kind].filter((f) => !expect.output || f === expect.output);
   const total = families.reduce((sum, f) => sum + FAMILY_SHARE[f], 0);
-  return families.flatMap((family) => ofFamily(expect.kind, family, expect.pins, ln(FAMILY_SHARE[family] / total), expect));
-}
+  return families.flatMap((family) => ofFamily(expect.kind, family, expect.pins, ln(FAMILY_SHARE[family] / total), chancesBefore(experience), expect));
+});
 
+/** Every way the device of a catalogue entry may be built and wired, taking the entry at its word. */
+export function candidatesForEntry(expect: Expect, experience?: Experience): readonly Candidate[] {
+  return forEntry({ expect, experience });
+}
