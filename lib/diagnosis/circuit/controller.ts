@@ -1,10 +1,11 @@
 import { GROUND, SUPPLY, type Candidate } from "./candidate";
 import { P } from "./parameters";
 
-/** Leakage of a controller's signal input with nothing else on it, ohms (common practice: tens of megohms). */
+/** What holds a controller's signal input that has lost its pull, ohms (common practice: tens of megohms). */
 const INPUT_LEAK = 20e6;
-/** A sound wire with its two joints, ohms: a few metres of 0.75 mm2 (IEC 60228 class 5: 26 milliohm/m at most). */
-const WIRE_OHMS = 0.05;
+/** A sound wire with its joints, ohms: some metres of 0.75 mm2 (IEC 60228 class 5: 26 milliohm/m at most) and contacts that have aged; and how far one differs from another. */
+const WIRE_OHMS = 0.3;
+export const WIRE_OHMS_SPREAD = 0.2;
 /** Insulation of a broken wire, ohms: what a sound harness shows between its wires. */
 const OPEN_OHMS = 10e9;
 
@@ -32,8 +33,7 @@ function terminal(c: Candidate, x: Float64Array, role: number, on: boolean, t: T
   }
   if (c.code === "pull-missing") return set(t, 0, INPUT_LEAK);
   const pull = x[P.pull]! + (c.pull !== "down" && !on ? x[P.railOff]! : 0);
-  const share = INPUT_LEAK / (INPUT_LEAK + pull);
-  set(t, on ? railVolts(c, x) * share : 0, pull * share);
+  set(t, on ? railVolts(c, x) : 0, pull);
 }
 
 /** Which controller terminal reaches the cavity of a role: another one where two wires are exchanged. */

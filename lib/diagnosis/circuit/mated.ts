@@ -1,6 +1,6 @@
 import { NodalNetwork, THERMAL_VOLTS } from "../network/solve";
 import { GROUND, SIGNAL, SUPPLY, type Candidate } from "./candidate";
-import { cavity, supplyVolts, type Thevenin } from "./controller";
+import { cavity, supplyVolts, WIRE_OHMS_SPREAD, type Thevenin } from "./controller";
 import { clampShare, DROP_AMPERES, EMISSION } from "./device-ohms";
 import { P } from "./parameters";
 import { exp } from "../numerics";
@@ -21,16 +21,20 @@ const firstInside = (c: Candidate) => (c.code === "contact-open" ? 5 : 4);
 export interface MatedVolts {
   readonly volts: Float64Array;
   readonly swing: Float64Array;
+  /** How far the volts may be out because sound wires are not all alike, volts (one standard deviation). */
+  readonly drop: Float64Array;
   /** Chance that the device's electronics run. */
   running: number;
 }
 
 export function newMatedVolts(): MatedVolts {
-  return { volts: new Float64Array(6), swing: new Float64Array(6), running: 1 };
+  return { volts: new Float64Array(6), swing: new Float64Array(6), drop: new Float64Array(6), running: 1 };
 }
 
 const net = new NodalNetwork(6);
 const scratch: Thevenin = { volts: 0, ohms: 0 };
+/** Volts and siemens behind each cavity, as last stamped. */
+const fedVolts = new Float64Array(3), fedSiemens = new Float64Array(3);
 
 /** Node of the device's own pin: the cavity's node, unless that contact is open. */
 const pinNode = (c: Candidate, role: number) => (c.code === "contact-open" && c.at === role ? PARTED_PIN : role + 1);
@@ -41,6 +45,8 @@ function stampHarness(c: Candidate, x: Float64Array, inside: number): void {
   for (let role = 0; role < 3; role++) {
     cavity(c, x, role, true, scratch);
     net.source(role + 1, 0, scratch.volts, scratch.ohms);
+    fedVolts[role] = scratch.volts;
+    fedSiemens[role] = 1 / scratch.ohms;
     net.resistor(role + 1, 0, METER_OHMS);
   }
   if (c.code === "wires-shorted") net.resistor(c.at + 1, c.at2 + 1, x[P.fault]!);
@@ -55,7 +61,11 @@ export function solveMated(c: Candidate, x: Float64Array, out: MatedVolts): void
 }
 
 function keep(out: MatedVolts, position: number): void {
-  for (let role = 0; role < 3; role++) out.volts[position * 3 + role] = net.volts[role + 1]!;
+  for (let role = 0; role < 3; role++) {
+    const place = position * 3 + role, volts = net.volts[role + 1]!;
+    out.volts[place] = volts;
+    out.drop[place] = WIRE_OHMS_SPREAD * fedSiemens[role]! * Math.abs(fedVolts[role]! - volts);
+  }
 }
 
 function solvePotentiometer(c: Candidate, x: Float64Array, out: MatedVolts): void {

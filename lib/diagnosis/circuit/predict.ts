@@ -6,7 +6,7 @@ import { cavity, looseToGround, parallel, wireOhms, type Thevenin } from "./cont
 import { deviceOhms } from "./device-ohms";
 import { clampDuty, METER_OHMS, newMatedVolts, pulses, solveMated } from "./mated";
 import { P } from "./parameters";
-import { exp, ln } from "../numerics";
+import { exp, ln, norm } from "../numerics";
 
 export const CHECK_COUNT = ALL_CHECKS.length;
 export const CHECK_INDEX: ReadonlyMap<string, number> = new Map(ALL_CHECKS.map((c, i) => [c.code, i]));
@@ -43,7 +43,9 @@ const MAX_OHMS = 60e6;
 /** Ohms through junctions differ between devices of one type and with the meter's source (common practice: a tenth). */
 const JUNCTION_OHM_SLACK = 0.1;
 /** Volts of a device that is not running hang on leakage and junctions: a few hundredths of them, and some millivolts. */
-const IDLE_SLACK = 0.03, IDLE_VOLTS = 0.02;
+const IDLE_SLACK = 0.006, IDLE_VOLTS = 0.01;
+/** A controller's own leakage shifts an input that is held up by this share of its volts (common practice). */
+const HELD_UP_SLACK = 0.006;
 /** Change of the mean volts from rest to full that is seen as movement when a display is watched, volts. */
 const SEEN_VOLTS = 0.15;
 const TRIGGER_VOLTS = 0.8;
@@ -82,7 +84,7 @@ export function predictInto(c: Candidate, x: Float64Array, plan: Plan, groups: n
   const wanted = groups & plan.groups;
   if (wanted & GROUP.device) for (const k of plan.device) deviceCheck(c, x, k.index, roles[k.red]!, roles[k.black]!, k.full, out);
   if (wanted & GROUP.cold) for (const k of plan.cold) setOhms(out, k.index, coldOhms(c, x, roles[k.red]!));
-  if (wanted & GROUP.live) for (const k of plan.live) out.value[k.index] = liveVolts(c, x, k.spec);
+  if (wanted & GROUP.live) for (const k of plan.live) liveCheck(c, x, k.spec, k.index, out);
   if (wanted & GROUP.mated) matedChecks(c, x, plan.mated, out);
   if (wanted & GROUP.wires) for (const k of plan.wires) wireCheck(c, x, k.spec, k.index, out);
 }
@@ -114,6 +116,13 @@ function coldOhms(c: Candidate, x: Float64Array, role: number): number {
   return here.ohms;
 }
 
+function liveCheck(c: Candidate, x: Float64Array, spec: CheckSpec, index: number, out: Predictions): void {
+  const volts = out.value[index] = liveVolts(c, x, spec);
+  // Leakage in the controller takes a little off a held-up input; it matters where two volts nearly cancel.
+  const pulled = spec.place === "harness" && spec.black !== "gnd" && c.pull !== "down";
+  out.slack[index] = pulled ? HELD_UP_SLACK * Math.max(x[P.supply]!, Math.abs(volts)) : 0;
+}
+
 function liveVolts(c: Candidate, x: Float64Array, spec: CheckSpec): number {
   if (spec.place === "battery") return x[P.battery]!;
   const red = roles[spec.red as number]!;
@@ -143,7 +152,7 @@ function matedChecks(c: Candidate, x: Float64Array, items: readonly Item[], out:
   out.logState = c.running === "yes" ? ln(Math.max(mated.running, 1e-4)) : 0;
   for (const k of items) {
     const role = roles[k.red]!, place = 3 * k.full + role, volts = mated.volts[place]!;
-    if (k.spec.meter === "dc-volts") { out.value[k.index] = volts; out.slack[k.index] = out.idle && Math.abs(volts) > 0.03 ? IDLE_SLACK * Math.abs(volts) + IDLE_VOLTS : 0; }
+    if (k.spec.meter === "dc-volts") { out.value[k.index] = volts; out.slack[k.index] = norm(mated.drop[place]!, out.idle && Math.abs(volts) > 0.03 ? IDLE_SLACK * Math.abs(volts) + IDLE_VOLTS : 0); }
     else if (k.spec.meter === "watch") watch(c, role, k.index, out);
     else pulseCheck(c, x, k.spec, k.index, place, out);
   }

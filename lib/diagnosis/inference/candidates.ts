@@ -27,11 +27,21 @@ function ofFamily(kind: Kind, family: Family, pins: PinAssignment, base: number,
   });
 }
 
-/** A supply or ground that is only weak may or may not leave the electronics enough to run on. */
-function runningStates(family: Family, place: FaultPlace): readonly Running[] {
+/**
+ * Without a supply of its own a device stands still. With a supply or ground that is weak, or a ground that it finds
+ * only by way of the signal's wire, its electronics may or may not have enough to run on.
+ */
+function runningStates(family: Family, { code, at, at2 }: FaultPlace): readonly Running[] {
   if (family === "potentiometer") return ["by-volts"];
-  const weakens = (place.code === "wire-resistive" && place.at !== SIGNAL) || (place.code === "short-to-ground" && place.at === SUPPLY) || (place.code === "short-to-battery" && place.at === GROUND);
-  return weakens ? ["yes", "no"] : ["by-volts"];
+  switch (code) {
+    case "supply-missing": return ["no"];
+    case "wires-swapped": return at === SUPPLY || at2 === SUPPLY ? ["no"] : ["yes", "no"];
+    case "wire-open": case "contact-open": return at === SUPPLY ? ["no"] : at === GROUND ? ["yes", "no"] : ["by-volts"];
+    case "wire-resistive": return at === SIGNAL ? ["by-volts"] : ["yes", "no"];
+    case "short-to-ground": return at === SUPPLY ? ["yes", "no"] : ["by-volts"];
+    case "short-to-battery": return at === GROUND ? ["yes", "no"] : ["by-volts"];
+    default: return ["by-volts"];
+  }
 }
 
 /** With its pull gone an input is the same whichever way it was held. */
