@@ -12,7 +12,7 @@ export default defineConfig({
     },
   },
   test: {
-    include: ["lib/**/*.test.ts", "components/**/*.test.{ts,tsx}", "db/**/*.test.ts", "seed/**/*.test.ts", "tests/published-values/**/*.test.ts", "tests/integration/**/*.test.ts"],
+    include: ["tests/engine/**/*.test.ts", "lib/**/*.test.ts", "components/**/*.test.{ts,tsx}", "db/**/*.test.ts", "seed/**/*.test.ts", "tests/published-values/**/*.test.ts", "tests/integration/**/*.test.ts"],
     environment: "node",
     testTimeout: 30_000,
     hookTimeout: 60_000,
