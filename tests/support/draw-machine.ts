@@ -13,6 +13,8 @@ export interface DrawnMachine {
   readonly setup: Setup;
   readonly truth: { readonly kind: Kind; readonly pins: PinAssignment; readonly fault: Fault };
   readonly readings: Readonly<Record<string, ReadingValue>>;
+  /** What was drawn: the candidate and its unknowns, in standard deviations of their ranges. */
+  readonly drawn: { readonly candidate: Candidate; readonly z: Float64Array };
 }
 
 type Draw = () => number;
@@ -84,6 +86,6 @@ export function drawMachine(setup: Setup, draw: Draw): DrawnMachine {
     // A candidate that says that its electronics run counts only as far as the volts let them.
     if (draw() >= Math.exp(p.logState)) continue;
     const { kind, pins, fault } = candidate.hypothesis;
-    return { setup, truth: { kind, pins, fault }, readings: Object.fromEntries(vocabulary().map((check) => [check.code, reading(check, p, draw)])) };
+    return { setup, truth: { kind, pins, fault }, drawn: { candidate, z }, readings: Object.fromEntries(vocabulary().map((check) => [check.code, reading(check, p, draw)])) };
   }
 }
