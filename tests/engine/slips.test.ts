@@ -8,16 +8,18 @@ import { cleanRun, differs, slipRun, slipped, SLIP_KINDS, type SlipRun } from ".
  * One slip of a person in a run of a bench case. Asked for: named in 90 % of runs, sure and wrong in 3 %. The limits below are
  * what the engine does today, not what is asked; tighten them as it improves. `npm run slips` runs all cases and lists failures.
  */
-const NAMED_AT_LEAST = 12, SURE_WRONG_AT_MOST = 58;
+const NAMED_AT_LEAST = 12, SURE_WRONG_AT_MOST = 58, FALSELY_AT_MOST = 10;
 const EVERY = 8, SLIPS_A_CASE = 2;
 
 describe("one slip in a run", () => {
-  let runs: SlipRun[] = [];
+  let runs: SlipRun[] = [], falsely: string[] = [], cases = 0;
 
   beforeAll(() => {
+    cases = everyNth(benchCases(), EVERY).length;
     runs = everyNth(benchCases(), EVERY).flatMap((c, i) => {
       const clean = cleanRun(c), draw = drawer(500 + i), first = (SLIPS_A_CASE * i) % SLIP_KINDS.length;
-      return SLIP_KINDS.slice(first, first + SLIPS_A_CASE).flatMap((kind) => slipRun(c, clean, kind, draw) ?? []);
+      if (clean.named.length > 0) falsely = [...falsely, c.id];
+      return SLIP_KINDS.slice(first, first + SLIPS_A_CASE).flatMap((kind) => slipRun(c, clean.readings, kind, draw) ?? []);
     });
     process.stdout.write(`${slipTable(runs)}\n`);
   }, 300_000);
@@ -33,6 +35,10 @@ describe("one slip in a run", () => {
 
   it(`leads to a sure and wrong verdict in ${SURE_WRONG_AT_MOST} % of runs or fewer`, () => {
     expect(slipScore(runs).sureWrongPercent).toBeLessThanOrEqual(SURE_WRONG_AT_MOST);
+  });
+
+  it(`is rarely seen where there was none: in ${FALSELY_AT_MOST} % of undisturbed runs or fewer`, () => {
+    expect(100 * falsely.length / cases, falsely.join()).toBeLessThanOrEqual(FALSELY_AT_MOST);
   });
 });
 

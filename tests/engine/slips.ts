@@ -68,9 +68,10 @@ function standing(setup: Setup, readings: readonly Reading[]): Standing {
 const namedIn = (a: Standing) => (a.state === "contradictory" ? a.suspects.map((s) => s.check) : []);
 const text = (f: { code: string; pins?: readonly number[] } | undefined) => (f ? `${f.code}${f.pins ? `:${f.pins}` : ""}` : "");
 
-/** Readings of an undisturbed run, to slip in. */
-export function cleanRun(c: BenchCase): readonly Reading[] {
-  return followCheck((readings) => standing(c.setup, readings), (check) => c.readings[check]).readings;
+/** An undisturbed run, to slip in: its readings, and what was named in it though nothing was wrong. */
+export function cleanRun(c: BenchCase): { readonly readings: readonly Reading[]; readonly named: readonly string[] } {
+  const run = followCheck((readings) => standing(c.setup, readings), (check) => c.readings[check]);
+  return { readings: run.readings, named: [...new Set(run.answers.flatMap(namedIn))] };
 }
 
 /** One run with one slip of this kind at a drawn step; null where no reading of the run allows it. */
