@@ -1,0 +1,59 @@
+// npm run mutants: makes one mistake after another in a copy of the engine and says which of them the fast engine tests catch.
+// A word as argument takes only the mistakes with that word in their name or file.
+import { spawnSync } from "node:child_process";
+import { cpSync, mkdtempSync, readFileSync, rmSync, symlinkSync, writeFileSync } from "node:fs";
+import { tmpdir } from "node:os";
+import path from "node:path";
+import { fileURLToPath } from "node:url";
+import { MUTATIONS, type Mutation } from "./mutations";
+
+const ROOT = fileURLToPath(new URL("../..", import.meta.url));
+/** Tests that take seconds; the bench, slips and calibration take minutes and need not see every mistake. */
+const FAST = [
+  "tests/published-values/checks-against-spice", "tests/published-values/mated-against-spice", "tests/published-values/network-against-spice", "tests/published-values/bench-meter",
+  "tests/engine/worked-cases", "tests/engine/contradictory", "tests/engine/bayes-by-hand", "tests/engine/oracle", "tests/engine/proposals",
+];
+const SLOWEST_MS = 300_000;
+
+function copy(): string {
+  const folder = mkdtempSync(path.join(tmpdir(), "pinwright-mutants-"));
+  for (const what of ["lib/diagnosis", "tests", "vitest.config.ts", "tsconfig.json", "package.json"]) cpSync(path.join(ROOT, what), path.join(folder, what), { recursive: true });
+  symlinkSync(path.join(ROOT, "node_modules"), path.join(folder, "node_modules"));
+  return folder;
+}
+
+/** The first test that fails, or null when all pass. */
+function firstFailure(folder: string): string | null {
+  const { status, stdout } = spawnSync(process.execPath, [path.join(ROOT, "node_modules/vitest/vitest.mjs"), "run", ...FAST, "--bail=1", "--reporter=tap-flat"], { cwd: folder, encoding: "utf8", timeout: SLOWEST_MS });
+  if (status === 0) return null;
+  const line = stdout.split("\n").find((l) => l.startsWith("not ok"));
+  return line ? line.replace(/^not ok \d+ - /, "").replace(/ # time.*$/, "") : status === null ? "does not end" : "does not load";
+}
+
+function caughtBy(folder: string, { file, search, replace }: Mutation): string | null {
+  const place = path.join(folder, file), source = readFileSync(place, "utf8"), parts = source.split(search);
+  if (parts.length !== 2) throw new Error(`${file}: found ${parts.length - 1} times: ${search}`);
+  writeFileSync(place, parts.join(replace));
+  try {
+    return firstFailure(folder);
+  } finally {
+    writeFileSync(place, source);
+  }
+}
+
+const say = (text: string) => process.stdout.write(`${text}\n`);
+const word = process.argv[2] ?? "", chosen = MUTATIONS.filter(({ name, file }) => `${name} ${file}`.includes(word)), folder = copy();
+try {
+  const broken = firstFailure(folder);
+  if (broken) throw new Error(`The tests fail without any mistake: ${broken}`);
+  let caught = 0;
+  for (const m of chosen) {
+    const by = caughtBy(folder, m);
+    if (by) caught += 1;
+    say(`${by ? "caught" : "MISSED"}  ${m.file.replace("lib/diagnosis/", "")}: ${m.name}${by ? `  (${by})` : ""}`);
+  }
+  say(`${caught} of ${chosen.length} caught`);
+  process.exitCode = caught === chosen.length ? 0 : 1;
+} finally {
+  rmSync(folder, { recursive: true, force: true });
+}
