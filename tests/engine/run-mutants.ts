@@ -8,11 +8,10 @@ import { fileURLToPath } from "node:url";
 import { MUTATIONS, type Mutation } from "./mutations";
 
 const ROOT = fileURLToPath(new URL("../..", import.meta.url));
-/** Tests that take seconds; the bench, slips and calibration take minutes and need not see every mistake. */
-const FAST = [
-  "tests/published-values/checks-against-spice", "tests/published-values/mated-against-spice", "tests/published-values/network-against-spice", "tests/published-values/bench-meter",
-  "tests/engine/worked-cases", "tests/engine/contradictory", "tests/engine/bayes-by-hand", "tests/engine/oracle", "tests/engine/proposals",
-];
+/** Tests that take seconds, by what they look at; the bench, slips and calibration take minutes and need not see every mistake. */
+const CIRCUIT = ["tests/published-values/checks-against-spice", "tests/published-values/mated-against-spice", "tests/published-values/network-against-spice", "tests/engine/worked-cases"];
+const JUDGEMENT = ["tests/published-values/bench-meter", "tests/engine/worked-cases", "tests/engine/contradictory", "tests/engine/bayes-by-hand", "tests/engine/oracle", "tests/engine/proposals"];
+const testsFor = (file: string) => (/\/(circuit|network)\//.test(file) ? CIRCUIT : JUDGEMENT);
 const SLOWEST_MS = 300_000;
 
 function copy(): string {
@@ -23,8 +22,8 @@ function copy(): string {
 }
 
 /** The first test that fails, or null when all pass. */
-function firstFailure(folder: string): string | null {
-  const { status, stdout } = spawnSync(process.execPath, [path.join(ROOT, "node_modules/vitest/vitest.mjs"), "run", ...FAST, "--bail=1", "--reporter=tap-flat"], { cwd: folder, encoding: "utf8", timeout: SLOWEST_MS });
+function firstFailure(folder: string, tests: readonly string[]): string | null {
+  const { status, stdout } = spawnSync(process.execPath, [path.join(ROOT, "node_modules/vitest/vitest.mjs"), "run", ...tests, "--bail=1", "--reporter=tap-flat"], { cwd: folder, encoding: "utf8", timeout: SLOWEST_MS });
   if (status === 0) return null;
   const line = stdout.split("\n").find((l) => l.startsWith("not ok"));
   return line ? line.replace(/^not ok \d+ - /, "").replace(/ # time.*$/, "") : status === null ? "does not end" : "does not load";
@@ -35,7 +34,7 @@ function caughtBy(folder: string, { file, search, replace }: Mutation): string |
   if (parts.length !== 2) throw new Error(`${file}: found ${parts.length - 1} times: ${search}`);
   writeFileSync(place, parts.join(replace));
   try {
-    return firstFailure(folder);
+    return firstFailure(folder, testsFor(file));
   } finally {
     writeFileSync(place, source);
   }
@@ -44,7 +43,7 @@ function caughtBy(folder: string, { file, search, replace }: Mutation): string |
 const say = (text: string) => process.stdout.write(`${text}\n`);
 const word = process.argv[2] ?? "", chosen = MUTATIONS.filter(({ name, file }) => `${name} ${file}`.includes(word)), folder = copy();
 try {
-  const broken = firstFailure(folder);
+  const broken = firstFailure(folder, [...new Set([...CIRCUIT, ...JUDGEMENT])]);
   if (broken) throw new Error(`The tests fail without any mistake: ${broken}`);
   let caught = 0;
   for (const m of chosen) {
