@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
-import { assess, type Expect, type Reading, type Setup } from "@/lib/diagnosis";
+import { assess, FINDING_PRIORS, type Expect, type Reading, type Setup } from "@/lib/diagnosis";
+import { SLOW } from "../support/slow";
 
 /** Bayes' rule by hand where a reading's chances are plain numbers. Sources beside each test. */
 const POT: Expect = { kind: "potentiometer", pins: { supply: 1, ground: 2, signal: 3 }, supplyVolts: 5, totalOhms: 5000, tolerancePercent: 20, signalRatio: { rest: 0.2, full: 0.8 } };
@@ -15,7 +16,7 @@ const chances = (a: ReturnType<typeof standing>) => new Map(a.hypotheses.map(({ 
 const HARNESS: Reading[] = [["volt:harness:1-gnd", 5.003], ["volt:harness:2-gnd", 0.001], ["volt:harness:3-gnd", 0.002]];
 const MATED: Reading[] = [["volt:mated:1-gnd@rest", 5.001], ["volt:mated:2-gnd@rest", 0.002], ["volt:mated:3-gnd@rest", 0.998], ["volt:mated:3-gnd@full", 3.995]];
 
-describe("a contact tried for its grip", () => {
+describe("a contact tried for its grip", SLOW, () => {
   // Source: README of the bench: a bad contact reads "loose" 95 times in 100, a sound one 3.
   const bad = (id: string, pin: number) => id.endsWith(`/contact-open:${pin}`);
 
@@ -27,7 +28,7 @@ describe("a contact tried for its grip", () => {
   });
 });
 
-describe("a reading that everything still believed expects alike changes nothing", () => {
+describe("a reading that everything still believed expects alike changes nothing", SLOW, () => {
   it("no frequency on a potentiometer's pin: no hypothesis of the entry pulses", () => {
     const before = chances(standing([...HARNESS, ...MATED.slice(0, 3)]));
     const after = chances(standing([...HARNESS, ...MATED.slice(0, 3), ["freq:mated:3@rest", "none"], ["duty:mated:1@full", "none"]]));
@@ -47,7 +48,7 @@ describe("a reading that everything still believed expects alike changes nothing
   });
 });
 
-describe("chances before the first reading", () => {
+describe("chances before the first reading", SLOW, () => {
   it("are the same for the six orders of pins of an unknown device (symmetry)", () => {
     const { pins } = standing([], { pins: ["1", "2", "3"] });
     expect(pins).toHaveLength(6);
@@ -61,6 +62,12 @@ describe("chances before the first reading", () => {
       expect(places).toHaveLength(3);
       for (const { p } of places) expect(p).toBeCloseTo(places[0]!.p, 9);
     }
+  });
+
+  it("are those of the published table, shared out among the findings that a potentiometer can have (computed from the table)", () => {
+    const can = FINDING_PRIORS.filter(({ code }) => !code.startsWith("output-")), whole = can.reduce((sum, { share }) => sum + share, 0), { faults } = standing([]);
+    for (const { code, share } of can) expect(faults.filter((f) => f.code === code).reduce((sum, { p }) => sum + p, 0), code).toBeCloseTo(share / whole, 9);
+    expect(faults.some(({ code }) => code.startsWith("output-"))).toBe(false);
   });
 
   it("put an entry's kind and pins at 1", () => {

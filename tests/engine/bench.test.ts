@@ -1,6 +1,7 @@
 import { beforeAll, describe, expect, it } from "vitest";
 import { benchCases, everyNth } from "../support/bench";
 import { benchRow, benchScores, fixedRow, type BenchRow, type BenchScores } from "./bench-scores";
+import { SLOW } from "../support/slow";
 
 /**
  * The bench: 240 machines whose circuits were solved by a general-purpose circuit simulator outside the project (source: the
@@ -22,7 +23,7 @@ describe("the bench's 240 machines, each check followed to its end", () => {
     scores = benchScores(rows);
     say(Object.entries(scores).map(([name, value]) => `bench ${name.padEnd(13)} ${Math.round(100 * value) / 100}`).join("\n"));
     for (const r of rows.filter(({ top }) => !top)) say(`bench miss ${r.id} ${r.task}: truth ${r.truth}, said ${r.verdict} ${r.said.toFixed(3)} after ${r.readings}`);
-  }, 400_000);
+  }, SLOW.timeout);
 
   it.each(entries(AT_LEAST))("%s is at least %d", (name, limit) => {
     expect(scores[name]).toBeGreaterThanOrEqual(limit);
@@ -37,5 +38,5 @@ describe("the bench's 240 machines, each check followed to its end", () => {
     const share = benchScores(ours).effort / benchScores(fixed).effort;
     say(`bench effort of the fixed order ${benchScores(fixed).effort.toFixed(2)}, ours on the same cases ${benchScores(ours).effort.toFixed(2)}: ${(100 * share).toFixed(0)} %`);
     expect(share).toBeLessThanOrEqual(EFFORT_SHARE);
-  }, 400_000);
+  }, SLOW.timeout);
 });

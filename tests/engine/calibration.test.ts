@@ -2,6 +2,7 @@ import { beforeAll, describe, expect, it } from "vitest";
 import { drawer } from "../support/draw";
 import { drawMachine, drawSetup } from "../support/draw-machine";
 import { calibrationError, reliability, reliabilityTable, verdictOn, type Verdict } from "./calibration";
+import { SLOW } from "../support/slow";
 
 /**
  * As right as it says: machines drawn from the engine's own ranges and priors, so that its chances should come true (probability
@@ -16,7 +17,7 @@ describe(`${DRAWS} drawn machines`, () => {
     const draw = drawer(90_210);
     verdicts = Array.from({ length: DRAWS }, (_, i) => verdictOn(drawMachine(drawSetup(draw, i % 2 === 1), draw)));
     process.stdout.write(`${reliabilityTable("drawn machines", verdicts)}\n`);
-  }, 300_000);
+  }, SLOW.timeout);
 
   it(`have an expected calibration error of ${MOST_ERROR} or less`, () => {
     expect(calibrationError(verdicts)).toBeLessThanOrEqual(MOST_ERROR);

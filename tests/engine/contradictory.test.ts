@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { assess, parseCheck, type Expect, type Reading } from "@/lib/diagnosis";
+import { SLOW } from "../support/slow";
 
 /**
  * Sets of readings of one sound machine of which one cannot be so. Sources: Ohm's law for what the others say (5 kohm track, wiper at
@@ -32,7 +33,7 @@ const suspects = (readings: readonly Reading[], expected: Expect | undefined) =>
   return a.state === "contradictory" ? a.suspects : [];
 };
 
-describe.each([["with an entry", POT], ["of an unknown device", undefined]] as const)("readings of one machine, %s", (_, entry) => {
+describe.each([["with an entry", POT], ["of an unknown device", undefined]] as const)("readings of one machine, %s", SLOW, (_, entry) => {
   it("do not contradict each other", () => {
     expect(suspects(SOUND, entry)).toEqual([]);
   });

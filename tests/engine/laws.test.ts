@@ -5,6 +5,7 @@ import { drawer } from "../support/draw";
 import { drawMachine, drawSetup } from "../support/draw-machine";
 import { nonsense, shuffled, someReadings } from "../support/random-readings";
 import { renameFault, renamePins, renameReading, RENAMINGS, renameSetup } from "../support/rename-pins";
+import { SLOW } from "../support/slow";
 
 /** Laws that hold whatever the machine. Source: probability theory and the engine's own promises; machines are drawn from its model. */
 const standing = (setup: Setup, readings: readonly Reading[]) => {
@@ -37,7 +38,7 @@ function expectSound(a: ReturnType<typeof standing>): void {
   for (const n of a.next) expect(Number.isFinite(n.gainBits) && n.gainBits >= 0 && n.effort >= 1).toBe(true);
 }
 
-describe("laws of the standing", () => {
+describe("laws of the standing", SLOW, () => {
   it("does not hang on the order of the readings, to the last bit", () => {
     holds((seed) => {
       const { draw, setup, readings } = drawn(seed);

@@ -7,6 +7,7 @@ import { evidenceOf, fitCandidate } from "@/lib/diagnosis/inference/fit";
 import type { Candidate } from "@/lib/diagnosis/circuit/candidate";
 import { bruteLogEvidence, gridLogEvidence } from "../support/brute-force";
 import { drawer } from "../support/draw";
+import { SLOW } from "../support/slow";
 
 /**
  * A slow, plain oracle for the engine's integral over the unknowns (Laplace's method): the same integral by brute force, fixed seed.
@@ -37,7 +38,7 @@ function likeliest(setup: Setup, readings: readonly Reading[], most: number): Ca
 
 const fitted = (c: Candidate, readings: readonly Reading[]) => fitCandidate(c, evidenceOf(observe(readings, DEFAULT_METER), DEFAULT_METER), new Float64Array(c.ranges.mean.length)).logEvidence;
 
-describe("the engine's integral against brute force", () => {
+describe("the engine's integral against brute force", SLOW, () => {
   it.each(PROBLEMS)("%s", (_, setup, readings, most) => {
     const list = likeliest(setup, readings, most), draw = drawer(1_618);
     expect(list.length).toBeGreaterThan(1);

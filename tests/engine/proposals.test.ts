@@ -5,6 +5,7 @@ import { drawer } from "../support/draw";
 import { drawMachine, drawSetup } from "../support/draw-machine";
 import { nonsense, shuffled, someReadings } from "../support/random-readings";
 import { effortOf, followCheck } from "../support/run-check";
+import { SLOW } from "../support/slow";
 
 /** What may be proposed next, and when to stop. Source: the rules of the check (README of the bench; safety: no ohms on a live circuit, common practice). */
 const ask = (setup: Setup) => (readings: readonly Reading[]) => {
@@ -14,7 +15,7 @@ const ask = (setup: Setup) => (readings: readonly Reading[]) => {
 };
 const holds = (law: (seed: number) => void, numRuns: number) => fc.assert(fc.property(fc.integer({ min: 0, max: 2 ** 31 }), law), { numRuns, seed: 77 });
 
-describe("the next check", () => {
+describe("the next check", SLOW, () => {
   it("is open, not yet taken, not excluded, and there while not done", () => {
     holds((seed) => {
       const draw = drawer(seed), setup = drawSetup(draw, draw() < 0.5), machine = drawMachine(setup, draw);
@@ -43,7 +44,7 @@ describe("the next check", () => {
   });
 });
 
-describe("a check followed to its end", () => {
+describe("a check followed to its end", SLOW, () => {
   it("ends done, with 95 % of the chances in the open findings, and says when nothing more can be told apart", () => {
     holds((seed) => {
       const draw = drawer(seed), machine = drawMachine(drawSetup(draw, draw() < 0.5), draw);

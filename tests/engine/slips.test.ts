@@ -3,6 +3,7 @@ import { benchCases, everyNth } from "../support/bench";
 import { drawer } from "../support/draw";
 import { slipScore, slipTable } from "./slip-scores";
 import { cleanRun, differs, slipRun, slipped, SLIP_KINDS, type SlipRun } from "./slips";
+import { SLOW } from "../support/slow";
 
 /**
  * One slip of a person in a run of a bench case. Asked for: named in 90 % of runs, sure and wrong in 3 %. The limits below are
@@ -22,7 +23,7 @@ describe("one slip in a run", () => {
       return SLIP_KINDS.slice(first, first + SLIPS_A_CASE).flatMap((kind) => slipRun(c, clean.readings, kind, draw) ?? []);
     });
     process.stdout.write(`${slipTable(runs)}\n`);
-  }, 300_000);
+  }, SLOW.timeout);
 
   it("can be made in most runs, of every kind", () => {
     expect(runs.length).toBeGreaterThan(40);

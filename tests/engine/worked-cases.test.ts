@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { assess, type Expect, type Reading } from "@/lib/diagnosis";
+import { SLOW } from "../support/slow";
 
 /**
  * Cases worked by hand. Unless said otherwise the values are Ohm's law with a sound harness (a wire some tenths of an ohm, the
@@ -51,7 +52,7 @@ const CASES: readonly (readonly [string, Expect, readonly Reading[], string])[] 
   ["a voltage device that gives nothing though it is fed and its wires are whole", VOLTS, [...FEED, ["volt:harness:3-gnd", 0], ["res:harness:3-gnd", 180_000], ["volt:mated:1-gnd@rest", 5], ["volt:mated:2-gnd@rest", 0.002], ["volt:mated:3-gnd@rest", 0], ["volt:mated:3-gnd@full", 0], ...WHOLE, ...CLEAR, ...GRIPS], "output-dead"],
 ];
 
-describe("a finding worked by hand", () => {
+describe("a finding worked by hand", SLOW, () => {
   it.each(CASES)("%s", (_, entry, readings, finding) => {
     const { faults } = standing(readings, entry);
     expect(text(faults[0]!), JSON.stringify(faults.slice(0, 3))).toBe(finding);
@@ -59,7 +60,7 @@ describe("a finding worked by hand", () => {
   });
 });
 
-describe("an unknown device worked by hand", () => {
+describe("an unknown device worked by hand", SLOW, () => {
   it("is a potentiometer with its wiper on pin 3: the two parts add up to the track (identity of end, wiper and total resistance)", () => {
     const { kinds, pins } = standing(TRACK);
     expect(kinds[0]).toMatchObject({ kind: "potentiometer" });
@@ -81,7 +82,7 @@ describe("an unknown device worked by hand", () => {
   });
 });
 
-describe("what no meter can tell apart", () => {
+describe("what no meter can tell apart", SLOW, () => {
   it("an open collector that never pulls down: its output may be dead or stuck high (README of the bench: some truths read alike)", () => {
     const fed: Reading[] = [["volt:battery", 24.2], ["volt:harness:1-gnd", 24.2], ["volt:harness:3-gnd", 12], ["volt:mated:1-gnd@rest", 24.2], ["volt:mated:2-gnd@rest", 0.002], ["volt:mated:3-gnd@rest", 11.98], ["volt:mated:3-gnd@full", 11.98], ["freq:mated:3@rest", "none"]];
     const { openFindings, faults } = standing([...fed, ...WHOLE, ...CLEAR, ...GRIPS], OPEN);

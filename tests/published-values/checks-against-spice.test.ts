@@ -6,6 +6,7 @@ import { autoranged, deviceProbes, STRAIGHT, straightProbe, voltsAt, type Probe 
 import { drawCircuit, everyBuild, type DrawnCircuit } from "../engine/drawn-circuits";
 import { solveProbes } from "../engine/solve-probes";
 import { ohmsShown } from "../support/machine-netlist";
+import { SLOW } from "../support/slow";
 
 /**
  * What the engine expects of every straight check, against a general-purpose circuit simulator (SPICE): wires, loose ends, harness
@@ -39,7 +40,7 @@ describe("straight checks of every build against SPICE", () => {
   beforeAll(async () => {
     circuits.forEach((c, k) => STRAIGHT.forEach((check) => probes.set(key(k, check), straightProbe(c.description, check, c.roleOf))));
     volts = await solveProbes([...probes.values()]);
-  }, 120_000);
+  }, SLOW.timeout);
 
   it("has every finding of every family", () => {
     expect(circuits.length).toBeGreaterThan(250);
@@ -62,7 +63,7 @@ describe("ohms of the parted device against SPICE", () => {
   const probes = circuits.map((c) => checks.map((check) => deviceProbes(c.description, check, c.roleOf)));
   let volts: (node: string) => number;
 
-  beforeAll(async () => { volts = await solveProbes(probes.flat(2)); }, 120_000);
+  beforeAll(async () => { volts = await solveProbes(probes.flat(2)); }, SLOW.timeout);
 
   it("covers the four families and the breaks of a track", () => {
     expect(new Set(circuits.map(({ candidate: c }) => `${c.family} ${c.code} ${c.breakEnd}`)).size).toBeGreaterThanOrEqual(7);

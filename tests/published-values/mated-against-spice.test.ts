@@ -7,6 +7,7 @@ import type { Output } from "../support/machine-netlist";
 import { drawCircuit, everyBuild, type DrawnCircuit } from "../engine/drawn-circuits";
 import { solveProbes } from "../engine/solve-probes";
 import { matedProbe, voltsAt, type Probe } from "../engine/spice-checks";
+import { SLOW } from "../support/slow";
 
 /**
  * What the engine expects with everything connected and the power on, against SPICE: DC volts (of a pulsing output the mean of its
@@ -94,7 +95,7 @@ describe("mated checks of every build against SPICE", () => {
   beforeAll(async () => {
     volts = await solveProbes(solved.flatMap(({ a, b, idle }) => [...a, ...b, ...idle]));
     states = solved.map((s) => running(s, volts));
-  }, 120_000);
+  }, SLOW.timeout);
 
   it("has devices that run and devices that do not, few too close to call", () => {
     const count = (state: boolean | null) => states.filter((s) => s === state).length;
