@@ -26,7 +26,7 @@ const config: Config = {
       fontFamily: {
         read: ["var(--font-read)", "var(--font-read-greek)", "var(--font-read-micro)", "var(--font-maths)", "sans-serif"],
         // IBM Plex Mono has no Greek in its package, so the ohm sign comes from the sans.
-        mono: ["var(--font-mono)", "var(--font-read-greek)", "var(--font-maths)", "monospace"],
+        mono: ["var(--font-mono-point)", "var(--font-mono)", "var(--font-read-greek)", "var(--font-maths)", "monospace"],
       },
       spacing: { touch: "2.75rem", glove: "6rem" },
     },

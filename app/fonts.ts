@@ -35,6 +35,21 @@ export const mono = localFont({
   adjustFontFallback: false,
 });
 
+/**
+ * Point, comma, colon and space for readings. The monospaced face gives each of them a whole cell, so that "4.7 kΩ"
+ * falls apart into "4. 7  kΩ"; with these from the reading face a number stays one thing, and digits still align.
+ */
+export const monoPoint = localFont({
+  src: [
+    { path: "../node_modules/@fontsource-variable/atkinson-hyperlegible-next/files/atkinson-hyperlegible-next-latin-wght-normal.woff2", weight: "200 800", style: "normal" },
+  ],
+  variable: "--font-mono-point",
+  display: "swap",
+  preload: false,
+  adjustFontFallback: false,
+  declarations: [{ prop: "unicode-range", value: "U+0020,U+002C,U+002E,U+003A,U+003B,U+00A0" }],
+});
+
 /** The micro sign, which the reading face lacks. */
 export const readMicro = localFont({
   src: [{ path: "../node_modules/@fontsource/ibm-plex-sans/files/ibm-plex-sans-latin-400-normal.woff2", weight: "400", style: "normal" }],
@@ -55,4 +70,4 @@ export const maths = localFont({
 });
 
 /** Class names that declare the font variables; put them on the html element. */
-export const fontVariables = [read, readGreek, readMicro, mono, maths].map((font) => font.variable).join(" ");
+export const fontVariables = [read, readGreek, readMicro, monoPoint, mono, maths].map((font) => font.variable).join(" ");
