@@ -21,15 +21,22 @@ interface ChanceBarProps {
 export function ChanceBar({ label, chance, note }: ChanceBarProps) {
   const share = Math.min(1, Math.max(0, chance));
   return (
-    <div className="grid gap-1">
-      <div className="flex items-baseline justify-between gap-3">
-        <span className="font-bold">{label}</span>
-        <span className="font-mono whitespace-nowrap">{chanceText(share)}</span>
-      </div>
-      <svg aria-hidden="true" viewBox="0 0 100 4" preserveAspectRatio="none" className="h-3 w-full border border-rule bg-sheet text-bench">
-        <rect width={share * 100} height="4" fill="currentColor" />
-      </svg>
-      {note ? <p className="text-quiet">{note}</p> : null}
+    <div>
+      <p className="leading-snug font-bold">{label}</p>
+      <p className="flex items-center gap-2"><ChanceFigure chance={share} note={note} /></p>
     </div>
+  );
+}
+
+/** Bar, words and percent on one line; the columns of several lines stand under each other. */
+export function ChanceFigure({ chance, note }: Pick<ChanceBarProps, "chance" | "note">) {
+  return (
+    <>
+      <svg aria-hidden="true" viewBox="0 0 100 4" preserveAspectRatio="none" className="h-2.5 min-w-0 flex-1 border border-rule bg-sheet text-bench">
+        <rect width={chance * 100} height="4" fill="currentColor" />
+      </svg>
+      {note ? <span className="w-29 text-right leading-tight whitespace-nowrap text-quiet">{note}</span> : null}
+      <span className="w-13 text-right font-mono leading-tight font-bold whitespace-nowrap">{chanceText(chance)}</span>
+    </>
   );
 }

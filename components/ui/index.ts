@@ -1,5 +1,5 @@
 export { Button, ButtonLink, type ButtonSize, type ButtonTone } from "./button";
-export { ChanceBar, chanceText } from "./chance-bar";
+export { ChanceBar, ChanceFigure, chanceText } from "./chance-bar";
 export { DataTable, type Column, type Row } from "./data-table";
 export { EmptyState } from "./empty-state";
 export { Checkbox, Field, Select, TextArea, TextInput } from "./field";

@@ -20,7 +20,7 @@ function Possibilities({ title, rows }: { readonly title: string; readonly rows:
     <section className="grid content-start gap-3">
       <h2 className="text-xl font-bold">{title}</h2>
       {shown.map((row) => <ChanceBar key={row.name} label={row.name} chance={row.p} note={chanceWords(row.p)} />)}
-      {rest > 0 ? <p className="text-quiet">{rest} more, each less likely.</p> : null}
+      {rest > 0 ? <p className="text-quiet">{rest === 1 ? "1 more, less likely." : `${rest} more, each less likely.`}</p> : null}
     </section>
   );
 }

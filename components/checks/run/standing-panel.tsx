@@ -26,7 +26,7 @@ export function StandingPanel({ engine, labels, why, chosen }: StandingPanelProp
         <StandingStrip assessment={engine.latest} working={engine.current === null && !engine.failed} labels={labels} open={open} onToggle={() => setOpen(!open)} />
       </div>
       <p role="status" className="sr-only">{standingSentence(engine.current, labels)}</p>
-      <div id="standing-details" className="lg:col-start-2 lg:row-start-3">
+      <div id="standing-details" className="lg:col-start-2 lg:row-start-2">
         {open && standing ? <StandingDetails standing={standing} labels={labels} why={reason} effects={effects} /> : null}
       </div>
     </>

@@ -1,5 +1,5 @@
 import type { Assessment } from "@/lib/diagnosis";
-import { chanceText } from "@/components/ui";
+import { ChanceFigure, chanceText } from "@/components/ui";
 import { chanceWords } from "@/lib/checks/chance-words";
 import type { Labels } from "@/lib/checks/check-words";
 import { findingHeading, kindTitle } from "@/lib/checks/finding-words";
@@ -11,14 +11,14 @@ function Line({ name, chance }: LineProps) {
   return (
     <span className="block">
       <span className="block leading-tight font-bold">{name}</span>
-      <span className="flex items-center gap-2 leading-tight">
-        <svg aria-hidden="true" viewBox="0 0 100 4" preserveAspectRatio="none" className="h-2 min-w-0 flex-1 border border-rule bg-sheet text-bench">
-          <rect width={chance * 100} height="4" fill="currentColor" />
-        </svg>
-        <span className="w-40 text-right whitespace-nowrap">{chanceWords(chance)} {chanceText(chance)}</span>
-      </span>
+      <span className="flex items-center gap-2 leading-tight"><ChanceFigure chance={chance} note={chanceWords(chance)} /></span>
     </span>
   );
+}
+
+/** Stands where the finding would: nothing is worth believing while the readings do not go together. */
+function Contradiction() {
+  return <span className="block bg-straw px-1.5 py-0.5 leading-tight font-bold text-on-straw"><span aria-hidden="true">▲ </span>The readings contradict each other</span>;
 }
 
 /** The standing in one sentence, for the live region. */
@@ -44,6 +44,7 @@ interface StandingStripProps {
 export function StandingStrip({ assessment, working, labels, open, onToggle }: StandingStripProps) {
   const standing = assessment && assessment.state !== "invalid-input" ? assessment : null;
   const [kind, fault] = [standing?.kinds[0], standing?.faults[0]];
+  const contradictory = standing?.state === "contradictory";
   return (
     <button
       type="button" aria-expanded={open} aria-controls="standing-details" onClick={onToggle}
@@ -51,7 +52,7 @@ export function StandingStrip({ assessment, working, labels, open, onToggle }: S
     >
       <span className="grid min-w-0 grid-cols-1 gap-1">
         {kind ? <Line name={kindTitle(kind.kind)} chance={kind.p} /> : <span className="font-bold">Standing</span>}
-        {fault ? <Line name={findingHeading(fault, labels)} chance={fault.p} /> : <span>{working ? "Working it out …" : "Nothing is believed yet"}</span>}
+        {contradictory ? <Contradiction /> : fault ? <Line name={findingHeading(fault, labels)} chance={fault.p} /> : <span>{working ? "Working it out …" : "Nothing is believed yet"}</span>}
       </span>
       <span className="flex w-12 flex-col items-center text-base font-bold">
         <svg aria-hidden="true" viewBox="0 0 24 14" className={`w-6 ${open ? "rotate-180" : ""}`} fill="none" stroke="currentColor" strokeWidth={3}><path d="M2 2l10 10L22 2" /></svg>
