@@ -5,7 +5,7 @@ import { useForm } from "react-hook-form";
 import { Button } from "@/components/ui";
 import type { RunSetup } from "@/lib/checks/run";
 import { EMPTY_SETUP, setupOf, type SetupChoices, type SetupEntry, type SetupValues } from "@/lib/checks/setup-form";
-import { CautionsNotice } from "./cautions-notice";
+import { CautionsNotice, EntryCautions } from "./cautions-notice";
 import { EntrySearch } from "./entry-search";
 import { EntrySummary } from "./entry-summary";
 import { PlaceFields, UnknownFields } from "./setup-fields";
@@ -87,7 +87,8 @@ export function SetupForm(props: SetupFormProps) {
       {entry ? <EntrySummary entry={entry} /> : <EntrySearch />}
       {entry ? null : <UnknownFields register={register} errors={errors} choices={choices} shape={shape} />}
       <PlaceFields register={register} errors={errors} choices={choices} onMachine={onMachine} />
-      <CautionsNotice more={entry?.cautions} />
+      <EntryCautions cautions={entry?.cautions ?? []} />
+      <CautionsNotice />
       {errors.root ? <p role="alert" className="font-bold text-stop"><span aria-hidden="true">■ </span>{errors.root.message}</p> : null}
       <Button type="submit" tone="main" size="glove" busy={isSubmitting} busyLabel="Starting …" className="w-full flex-col gap-0 py-2">
         <span className="text-2xl">Start the check</span>
