@@ -74,8 +74,8 @@ export function checkPlace(spec: CheckSpec, labels: Labels): string {
 /** The meter's dial: function, and the range to choose when it does not range by itself. */
 export function meterWords(spec: CheckSpec): { readonly dial: string; readonly range: string } {
   switch (spec.meter) {
-    case "ohms": return { dial: "Ω", range: "auto, or start at the highest" };
-    case "dc-volts": return { dial: "V DC", range: "auto, or above battery voltage" };
+    case "ohms": return { dial: "Ω", range: "auto or highest" };
+    case "dc-volts": return { dial: "V DC", range: "auto or highest" };
     case "hertz": return { dial: "Hz", range: "auto" };
     case "duty": return { dial: "% duty", range: "auto" };
     case "watch": return { dial: "V DC", range: "auto; watch it move" };

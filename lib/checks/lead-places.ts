@@ -26,7 +26,7 @@ export function faceView(spec: CheckSpec, shape: ConnectorShape | undefined): Fa
     contact: "harness, mating side", mated: "harness, wire side",
   } as const;
   const caption = words[spec.place];
-  if (!shape) return { shape: null, caption: "in label order, not to shape" };
+  if (!shape) return { shape: null, caption: "not drawn to shape" };
   if (spec.place === "device") return { shape: half(shape, "receptacle"), caption };
   const plug = half(shape, "plug");
   return spec.place === "mated" ? { shape: { ...matingHalf(plug), gender: "plug" }, caption } : { shape: plug, caption };

@@ -1,7 +1,7 @@
 import { expect, test } from "@playwright/test";
 import { expectAccessible, expectNoSidewaysScroll } from "./support/accessible";
 import { signIn } from "./support/people";
-import { answerAll, machine, startUnknown } from "./support/run-check";
+import { answerAll, enter, field, machine, startUnknown } from "./support/run-check";
 
 test.describe.configure({ timeout: 240_000 });
 
@@ -62,4 +62,40 @@ test("keys and buttons of a check are 96 pixels high or more", async ({ page }) 
   if (await page.getByRole("button", { name: /^Done/ }).isVisible()) await page.getByRole("button", { name: /^Done/ }).click();
   await expect(page.getByRole("group", { name: "Keypad" })).toBeVisible();
   expect(await low()).toEqual([]);
+});
+
+test("on a phone lead card, field and the whole keypad stand on one screen, and an error stays in sight", async ({ page }, { project }) => {
+  await signIn(page, "technician");
+  await startUnknown(page);
+  if (await page.getByRole("button", { name: /^Done/ }).isVisible()) await page.getByRole("button", { name: /^Done/ }).click();
+  await expect(enter(page)).toBeVisible();
+  if (project.name === "phone") {
+    await expect(page.getByRole("heading", { level: 1 })).toBeInViewport({ ratio: 1 });
+    await expect(enter(page)).toBeInViewport({ ratio: 1 });
+  }
+  await field(page).fill("12 bananas");
+  await enter(page).click();
+  await expect(page.getByRole("alert").filter({ hasText: "bananas" })).toBeInViewport({ ratio: 1 });
+  await expect(field(page)).toBeInViewport({ ratio: 1 });
+});
+
+test("the drawing of the wiring is whole each time it is opened", async ({ page }, { project }) => {
+  await signIn(page, "technician");
+  await startUnknown(page);
+  const narrow = project.name === "phone";
+  for (let time = 0; time < 3; time += 1) {
+    if (narrow) await page.getByRole("button", { name: "Show drawing" }).click();
+    const drawing = page.getByRole("img", { name: /^Controller, three wires/ });
+    const frame = await drawing.boundingBox();
+    for (const part of ["Controller", "Device"]) {
+      const box = drawing.getByText(part, { exact: true });
+      await expect(box).toBeVisible();
+      await expect(async () => {
+        const place = await box.boundingBox();
+        expect(place && frame && place.x >= frame.x && place.y + place.height <= frame.y + frame.height).toBe(true);
+        expect(place?.height).toBeGreaterThan(15);
+      }).toPass({ timeout: 5_000 });
+    }
+    if (narrow) await page.getByRole("dialog").getByRole("button", { name: "Close" }).click();
+  }
 });

@@ -12,13 +12,15 @@ interface ContradictionBannerProps {
 export function ContradictionBanner({ assessment, labels, onAgain }: ContradictionBannerProps) {
   const suspect = assessment.suspects[0];
   return (
-    <Notice tone="ask" title="These readings contradict each other" live="polite">
-      {suspect ? (
-        <div className="grid gap-2">
-          <p>Take this one again: <strong>{checkWords(suspect.check, labels)}</strong>. {suspect.why}</p>
-          <Button size="glove" onClick={() => onAgain(suspect.check)}>Take it again</Button>
-        </div>
-      ) : <p>Take the last readings again; something was measured at another place or in another state than it says.</p>}
-    </Notice>
+    <div data-lead-in>
+      <Notice tone="ask" title="These readings contradict each other" live="polite">
+        {suspect ? (
+          <div className="grid gap-2">
+            <p>Take this one again: <strong>{checkWords(suspect.check, labels)}</strong>. {suspect.why}</p>
+            <Button size="glove" onClick={() => onAgain(suspect.check)}>Take it again</Button>
+          </div>
+        ) : <p>Take the last readings again; something was measured at another place or in another state than it says.</p>}
+      </Notice>
+    </div>
   );
 }

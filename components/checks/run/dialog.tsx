@@ -1,6 +1,6 @@
 "use client";
 
-import { useEffect, useId, useRef, type ReactNode } from "react";
+import { useId, useLayoutEffect, useRef, type ReactNode } from "react";
 import { Button } from "@/components/ui";
 
 interface DialogProps {
@@ -14,7 +14,8 @@ interface DialogProps {
 export function Dialog({ open, title, onClose, children }: DialogProps) {
   const dialog = useRef<HTMLDialogElement>(null);
   const id = useId();
-  useEffect(() => {
+  // Before other effects: what stands inside measures itself, and a dialog that is not shown yet has no size.
+  useLayoutEffect(() => {
     const element = dialog.current;
     if (open && element && !element.open) element.showModal();
     if (!open && element?.open) element.close();

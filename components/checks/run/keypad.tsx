@@ -9,7 +9,7 @@ function Key({ label, children, onPress, className = "", pressed }: KeyProps) {
   return (
     <button
       type="button" aria-label={label} aria-pressed={pressed} onClick={onPress}
-      className={`tag-cut button button-plain min-h-glove min-w-0 px-0 font-mono text-2xl select-none ${className}`}
+      className={`tag-cut button button-plain min-h-glove min-w-0 px-0 font-mono text-3xl select-none ${className}`}
     >
       {children}
     </button>
@@ -21,7 +21,7 @@ const DIGIT_PLACE = ["col-start-1 row-start-1", "col-start-2 row-start-1", "col-
 
 interface SideKey { readonly key: KeypadKey; readonly label: string; readonly face: ReactNode }
 
-const CLEAR: SideKey = { key: "clear", label: "Clear the field", face: <span className="font-read text-base">Clear</span> };
+const CLEAR: SideKey = { key: "clear", label: "Clear the field", face: <span className="font-read text-lg">Clear</span> };
 const SIGN: SideKey = { key: "sign", label: "Plus or minus", face: "\u00b1" };
 const OVER: SideKey = { key: "OL", label: "OL, over range", face: "OL" };
 const NONE: SideKey = { key: "none", label: "No reading", face: <span className="font-read text-base leading-tight">No<br />reading</span> };
@@ -51,7 +51,7 @@ export function Keypad({ unit, selected, busy, onKey, onUnit, onEnter }: KeypadP
       <Key label={upper.label} onPress={() => onKey(upper.key)} className="col-start-4 row-start-2">{upper.face}</Key>
       <Key label={lower.label} onPress={() => onKey(lower.key)} className="col-start-4 row-start-3">{lower.face}</Key>
       <div role="group" aria-label="Unit" className="col-start-5 row-span-3 row-start-1 flex flex-col gap-2">
-        {UNIT_CHOICES[unit].map((choice) => <Key key={choice} label={`Unit ${choice}`} pressed={choice === selected} onPress={() => onUnit(choice)} className="flex-1">{choice}</Key>)}
+        {UNIT_CHOICES[unit].map((choice) => <Key key={choice} label={`Unit ${choice}`} pressed={choice === selected} onPress={() => onUnit(choice)} className="flex-1 text-2xl!">{choice}</Key>)}
       </div>
       <Key label="0" onPress={() => onKey("0")} className="col-start-1 row-start-4">0</Key>
       <Key label="Decimal point" onPress={() => onKey(".")} className="col-start-2 row-start-4">.</Key>

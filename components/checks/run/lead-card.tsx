@@ -5,11 +5,11 @@ import { LeadTag, type LeadColour } from "./lead-tag";
 import { MiniFace } from "./mini-face";
 import { ScreenHeading } from "./screen-heading";
 
-function LeadLine({ colour, to, extra }: { readonly colour: LeadColour; readonly to: string; readonly extra: string | null }) {
+function LeadLine({ colour, to }: { readonly colour: LeadColour; readonly to: string }) {
   return (
     <p className="flex items-center gap-2 text-lg leading-tight">
       <LeadTag colour={colour} />
-      <span><span className="sr-only">{colour} lead on </span><strong className="text-copper">{to}</strong>{extra ? <span className="text-quiet"> {extra}</span> : null}</span>
+      <span><span className="sr-only">{colour} lead on </span><strong className="text-copper">{to}</strong></span>
     </p>
   );
 }
@@ -24,9 +24,14 @@ function positionTitle(spec: CheckSpec): string {
 function handWords(spec: CheckSpec): string | null {
   if (spec.meter === "watch") return "Move the actuator slowly from rest to full and watch the reading. Nobody near what moves.";
   if (spec.meter === "grip") return "Push a matching test terminal in and pull it out: feel whether the contact grips. Never force a probe tip in.";
-  if (spec.position === "full") return "Hold the actuator at full travel. Nobody near what moves.";
-  if (spec.place === "mated") return "Slide the probe in along the wire from behind. Never pierce insulation.";
+  if (spec.position === "full") return "Hold at full travel. Nobody near what moves.";
+  if (spec.place === "mated") return "Probe in from behind, along the wire. Never pierce insulation.";
   return null;
+}
+
+/** The machine's state in a line or two beside the face; the screen before said it in full. */
+function briefState(spec: CheckSpec): string {
+  return stateWords(spec.state).map((words) => words.replace(" connector ", " ")).join(" \u00b7 ");
 }
 
 /** Where each lead goes, what the meter is set to and what state the machine is in, in words and on the connector's face. */
@@ -36,24 +41,22 @@ export function LeadCard({ spec, setup }: { readonly spec: CheckSpec; readonly s
   const meter = meterWords(spec);
   const hands = handWords(spec);
   return (
-    <section data-check={spec.code} className="grid gap-2">
+    <section data-check={spec.code} className="grid gap-1.5">
       <ScreenHeading screen={spec.code}>{positionTitle(spec)}</ScreenHeading>
       <div className="flex items-start justify-between gap-3">
-        <div className="grid min-w-0 gap-2">
+        <div className="grid min-w-0 gap-1.5">
           {leads ? (
             <>
-              <LeadLine colour="red" to={leads.red} extra={null} />
-              <LeadLine colour="black" to={leads.black} extra={null} />
+              <LeadLine colour="red" to={leads.red} />
+              <LeadLine colour="black" to={leads.black} />
             </>
           ) : <p className="text-lg leading-tight">Test terminal into <strong className="text-copper">harness contact {typeof spec.red === "number" ? labels[spec.red - 1] : ""}</strong></p>}
-          <p className="leading-tight">Meter: <strong className="font-mono">{meter.dial}</strong> <span className="text-quiet">({meter.range})</span></p>
+          <p className="leading-tight">Meter: <strong className="font-mono">{meter.dial}</strong> <span className="text-quiet">{meter.range}</span></p>
+          <p className="leading-tight text-quiet first-letter:uppercase">{briefState(spec)}</p>
         </div>
         <MiniFace spec={spec} shape={setup.connector} labels={labels} />
       </div>
-      <p className="leading-tight text-quiet">
-        <span className="sr-only">Machine: </span>{stateWords(spec.state).join(" · ")}
-      </p>
-      {hands ? <p className="leading-tight">{hands}</p> : null}
+      {hands ? <p className="bg-straw px-2 py-1 leading-tight text-on-straw"><span aria-hidden="true">▲ </span>{hands}</p> : null}
     </section>
   );
 }

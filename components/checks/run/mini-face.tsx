@@ -89,7 +89,7 @@ export function FaceSvg({ shape, labels, title, places = null, gripped = null, p
         return (
           <g key={spot.label}>
             <Socket spot={spot} used={plain || labels.includes(spot.label)} touched={leads.length > 0 || gripped === spot.label} solid={shape?.gender === "receptacle"} />
-            {leads.map((colour) => <LeadMark key={colour} colour={colour} x={spot.x - 14} y={spot.y - HALF - 19} />)}
+            {leads.map((colour) => <LeadMark key={colour} colour={colour} x={spot.x - 14} y={spot.y - HALF - 21} />)}
           </g>
         );
       })}
@@ -105,9 +105,9 @@ export function MiniFace({ spec, shape, labels }: MiniFaceProps) {
   if (!view) return null;
   const gripped = spec.meter === "grip" && typeof spec.red === "number" ? labels[spec.red - 1] : null;
   return (
-    <figure className="m-0 shrink-0">
+    <figure className="m-0 min-w-37 shrink-0">
       <FaceSvg shape={view.shape} labels={labels} title={`Connector face: ${view.caption}`} places={leadPlaces(spec, labels)} gripped={gripped} />
-      <figcaption className="mt-1 max-w-44 text-center text-base leading-tight text-quiet">{view.caption}</figcaption>
+      <figcaption className="mt-0.5 w-0 min-w-full text-center text-base leading-tight text-balance text-quiet">{view.caption}</figcaption>
     </figure>
   );
 }

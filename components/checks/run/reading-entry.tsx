@@ -1,10 +1,11 @@
 "use client";
 
-import { useId, useState, type KeyboardEvent } from "react";
+import { useEffect, useId, useRef, useState, type KeyboardEvent } from "react";
 import type { CheckSpec, ReadingValue } from "@/lib/diagnosis";
 import { pressKey, type KeypadKey } from "@/lib/checks/keypad-text";
 import { isBareNumber, readTyped, UNIT_CHOICES } from "@/lib/checks/typed-reading";
 import type { Draft } from "@/lib/offline/draft";
+import { uncover } from "./bring-up";
 import { Keypad } from "./keypad";
 
 interface ReadingEntryProps {
@@ -55,16 +56,21 @@ interface ReadingFieldProps { readonly text: string; readonly unit: string; read
 /** The reading as it is typed, 40 px high; the selected unit stands beside a bare number only. */
 function ReadingField({ text, unit, error, onChange }: ReadingFieldProps) {
   const id = useId();
+  const place = useRef<HTMLDivElement>(null);
+  useEffect(() => {
+    // Enter may have been reached by scrolling: what is wrong must not stay behind the standing.
+    if (error && place.current) uncover(place.current);
+  }, [error]);
   return (
-    <div className="grid grid-cols-1 gap-1">
-      <label htmlFor={id} className="sr-only">Reading{unit ? `, in ${unit} unless you type another unit` : ""}</label>
-      <div className={`flex min-h-20 items-center border-2 bg-sheet ${error ? "border-4 border-stop" : "border-rule"}`}>
+    <div ref={place} className="grid grid-cols-1 gap-1">
+      <div className={`flex min-h-glove items-center border-2 bg-sheet has-focus-visible:outline-3 has-focus-visible:outline-offset-3 has-focus-visible:outline-bench ${error ? "border-4 border-stop" : "border-rule"}`}>
+        <label htmlFor={id} className="self-stretch pt-2 pl-3 text-lg text-quiet">Reading<span className="sr-only">{unit ? `, in ${unit} unless you type another unit` : ""}</span></label>
         <input
           id={id} value={text} onChange={(event) => onChange(event.target.value)} inputMode="decimal" autoComplete="off" autoCorrect="off" spellCheck={false}
-          enterKeyHint="enter" maxLength={40} placeholder="Reading" aria-invalid={error ? true : undefined} aria-describedby={error ? `${id}-error` : undefined}
-          className="min-h-24 min-w-0 flex-1 bg-transparent px-3 text-right font-mono text-[2.5rem] leading-none text-ink outline-offset-0 placeholder:font-read placeholder:text-xl placeholder:text-quiet"
+          enterKeyHint="enter" maxLength={40} aria-invalid={error ? true : undefined} aria-describedby={error ? `${id}-error` : undefined}
+          className="min-w-0 flex-1 self-stretch bg-transparent px-3 text-right font-mono text-[2.75rem] leading-none font-bold text-ink outline-none!"
         />
-        <span aria-hidden="true" className="min-w-14 pr-3 font-mono text-2xl">{text === "" || isBareNumber(text) ? unit : ""}</span>
+        <span aria-hidden="true" className="min-w-14 pr-3 font-mono text-[2.75rem] leading-none">{text === "" || isBareNumber(text) ? unit : ""}</span>
       </div>
       {error ? <p id={`${id}-error`} role="alert" className="flex gap-2 font-bold text-stop"><span aria-hidden="true">■</span><span>{error}</span></p> : null}
     </div>

@@ -43,11 +43,11 @@ export function RunBoard(props: BoardProps) {
   return (
     <div onKeyDown={typeAhead} className="mx-auto max-w-lg lg:grid lg:max-w-6xl lg:grid-cols-[minmax(0,1fr)_minmax(0,27rem)] lg:grid-rows-[auto_auto_1fr] lg:gap-x-10">
       <StandingPanel engine={board.engine} labels={run.setup.cavityLabels} why={board.why} chosen={draft.chosen !== null} />
-      <div className="grid grid-cols-1 content-start gap-4 py-3 lg:col-start-1 lg:row-span-3 lg:row-start-1">
+      <div className="grid grid-cols-1 content-start gap-3 pt-2 pb-1.5 lg:col-start-1 lg:row-span-3 lg:row-start-1">
         <Guide board={board} props={props} />
         <WideDrawing facts={board.facts} />
       </div>
-      <div className="grid grid-cols-1 content-start gap-4 pb-6 lg:col-start-2 lg:row-start-2 lg:pt-3">
+      <div className="grid grid-cols-1 content-start gap-4 pb-6 lg:col-start-2 lg:row-start-3 lg:pt-3">
         {screen.type === "reading" && active ? <ScreenAnswer spec={screen.spec} typed={draft.typed} onTyped={(typed) => board.changeDraft({ typed })} actions={actions} /> : null}
         {active ? <RunTools tools={toolsFor(spec !== null, draft.chosen !== null)} canUndo={undoable(run.steps) !== null} onTool={board.onTool} /> : null}
         <SentMark outbox={outbox} kept={kept} />

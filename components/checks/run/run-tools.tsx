@@ -15,12 +15,12 @@ interface RunToolsProps {
 /** The other things that can be done on a screen of the check, each 96 px high. On a wide screen the drawing needs no button. */
 export function RunTools({ tools, canUndo, onTool }: RunToolsProps) {
   return (
-    <div role="group" aria-label="Also" className="grid grid-cols-3 gap-2">
+    <div role="group" aria-label="Also" className="flex flex-wrap gap-2">
       {tools.map((tool) => (
         <Button
           key={tool} size="glove" aria-disabled={tool === "undo" && !canUndo ? true : undefined}
           onClick={() => { if (tool !== "undo" || canUndo) onTool(tool); }}
-          className={`px-2 text-base! leading-tight ${tool === "drawing" ? "lg:hidden" : ""}`}
+          className={`min-w-0 flex-[1_1_30%] px-2 text-lg! leading-tight ${tool === "drawing" ? "lg:hidden" : ""}`}
         >
           {FACES[tool]}
         </Button>

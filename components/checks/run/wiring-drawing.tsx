@@ -47,9 +47,13 @@ function Post({ data }: NodeProps<PostNode>) {
 
 function Meter({ data }: NodeProps<MeterNode>) {
   return (
-    <div className="w-24 border-4 border-ink bg-sheet py-2 text-center font-mono text-lg font-bold text-ink">
-      {data.dial}
-      <Handle id="red" type="source" position={Position.Left} style={{ ...HIDDEN, top: "30%" }} />
+    <div className="flex h-18 w-24 items-stretch border-4 border-ink bg-sheet text-ink">
+      <span className="grid w-7 grid-rows-2 text-center font-read text-base leading-8 font-bold">
+        <span className="bg-stop text-on-stop">R</span>
+        <span className="bg-ink text-paper">B</span>
+      </span>
+      <span className="m-auto font-mono text-lg leading-tight font-bold">{data.dial}</span>
+      <Handle id="red" type="source" position={Position.Left} style={{ ...HIDDEN, top: "25%" }} />
       <Handle id="black" type="source" position={Position.Left} style={{ ...HIDDEN, top: "75%" }} />
       <Handle id="red-bottom" type="source" position={Position.Top} style={HIDDEN} />
       <Handle id="black-top" type="source" position={Position.Bottom} style={HIDDEN} />

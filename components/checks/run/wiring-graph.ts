@@ -68,7 +68,7 @@ export function wiringNodes({ spec, labels, state, roles, finding, deviceName }:
     part("device", y.device, { title: deviceName, pins: pins([], true), marked: finding !== null && DEVICE_FAULTS.includes(finding.code), below: false }),
     { id: "positive", type: "post", position: { x: METER_X, y: 0 }, data: { label: "battery +" } },
     { id: "negative", type: "post", position: { x: METER_X, y: y.device + 48 }, data: { label: "battery \u2212" } },
-    ...(spec && spec.meter !== "grip" ? [{ id: "meter", type: "meter", position: { x: METER_X, y: middle - 30 }, data: { dial: DIALS[spec.meter] } } satisfies MeterNode] : []),
+    ...(spec && spec.meter !== "grip" ? [{ id: "meter", type: "meter", position: { x: METER_X, y: middle - 36 }, data: { dial: DIALS[spec.meter] } } satisfies MeterNode] : []),
   ];
 }
 

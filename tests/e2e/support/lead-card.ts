@@ -33,7 +33,7 @@ export function checkOnCard(title: string, card: readonly string[]): string {
   if (red.place === "battery") return "volt:battery";
   if (red.place === "wire") return `res:wire:${red.end}`;
   // The same two cavities: with the controller parted too it is the insulation that is measured.
-  const place = red.place === "harness" && card.some((line) => /controller connector parted/.test(line)) ? "loose" : red.place;
+  const place = red.place === "harness" && card.some((line) => /controller parted/i.test(line)) ? "loose" : red.place;
   return `${measure === "Resistance" ? "res" : "volt"}:${place}:${red.end}-${lead(card, "black").end}${position}`;
 }
 
