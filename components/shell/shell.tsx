@@ -1,5 +1,6 @@
 import Link from "next/link";
 import type { ReactNode } from "react";
+import { BrandMark } from "@/components/ui";
 import { hasPermission, type Person } from "@/lib/auth/permissions";
 import type { Theme } from "@/lib/theme";
 import { AccountMenu } from "./account-menu";
@@ -27,10 +28,7 @@ export function Shell({ person, theme, setTheme, signOut, children }: ShellProps
       <a href="#content" className="sr-only focus:not-sr-only focus:fixed focus:top-2 focus:left-2 focus:z-20 focus:bg-bench focus:px-4 focus:py-3 focus:font-bold focus:text-on-bench">Skip to content</a>
       <header className="sticky top-0 z-10 border-b-2 border-rule bg-paper print:hidden">
         <div className="mx-auto flex max-w-6xl items-center justify-between gap-4 px-4 py-2">
-          <Link href="/today" className="flex min-h-touch items-center gap-2 text-xl font-extrabold">
-            <svg viewBox="0 0 24 24" aria-hidden="true" className="size-7"><path d="M2 4h15l5 5v11H2Z" fill="none" stroke="currentColor" strokeWidth="2.5" /><path d="M7 9v6M12 9v6M17 11v4" stroke="currentColor" strokeWidth="2.5" /></svg>
-            Pinwright
-          </Link>
+          <Link href="/today" className="flex min-h-touch items-center"><BrandMark /></Link>
           <div className="hidden md:block"><PlaceLinks places={places} label="Places" variant="top" /></div>
           <AccountMenu name={person.name} theme={theme} setTheme={setTheme} signOut={signOut} />
         </div>

@@ -1,3 +1,4 @@
+export { BrandMark } from "./brand-mark";
 export { Button, ButtonLink, type ButtonSize, type ButtonTone } from "./button";
 export { ChanceBar, ChanceFigure, chanceText } from "./chance-bar";
 export { DataTable, type Column, type Row } from "./data-table";
