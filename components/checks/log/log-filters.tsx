@@ -1,5 +1,6 @@
 import type { ReactNode } from "react";
 import { Button, ButtonLink, Field, Select, TextInput } from "@/components/ui";
+import { dayWords } from "@/lib/checks/date-words";
 import { FINDING_TITLES, KIND_TITLES } from "@/lib/checks/finding-words";
 import type { LogChoices } from "@/lib/checks/log-choices";
 import { FAULT_CODES, KINDS } from "@/lib/diagnosis";
@@ -28,13 +29,18 @@ export function activeFilters(query: LogQuery): number {
   return Object.entries(query).filter(([key, value]) => key !== "after" && value).length;
 }
 
+/** A day as people write it; what is no day is given back as it is. */
+function dayOf(text: string): string {
+  return Number.isNaN(Date.parse(text)) ? text : dayWords(text);
+}
+
 /** The filters that are on, in words; an id that no list holds is counted as "unknown". */
 function activeWords(query: LogQuery, lists: Readonly<Partial<Record<keyof LogQuery, readonly Choice[]>>>): readonly string[] {
   const chosen = Object.entries(lists).flatMap(([key, list]) => {
     const value = query[key as keyof LogQuery];
     return value ? [list?.find((choice) => choice.id === value)?.name ?? `unknown ${key}`] : [];
   });
-  return [...chosen, ...(query.from ? [`from ${query.from}`] : []), ...(query.to ? [`to ${query.to}`] : [])];
+  return [...chosen, ...(query.from ? [`from ${dayOf(query.from)}`] : []), ...(query.to ? [`to ${dayOf(query.to)}`] : [])];
 }
 
 function Frame({ words, open, children }: { words: readonly string[]; open: boolean; children: ReactNode }) {

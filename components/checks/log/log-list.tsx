@@ -1,6 +1,8 @@
 import Link from "next/link";
 import type { Route } from "next";
+import type { ReactNode } from "react";
 import { ButtonLink, chanceText } from "@/components/ui";
+import { chanceWords } from "@/lib/checks/chance-words";
 import type { CheckRow } from "@/lib/checks/check-view";
 import { momentWords } from "@/lib/checks/date-words";
 import { kindTitle } from "@/lib/checks/finding-words";
@@ -19,18 +21,32 @@ function headline(row: CheckRow): string {
   return row.sentence ?? "Nothing settled.";
 }
 
-function Facts({ row }: { row: CheckRow }) {
-  const facts = [
-    row.findingChance === null ? null : <span key="chance" className="font-mono">{chanceText(row.findingChance)}</span>,
-    row.kind ? kindTitle(row.kind) : null,
-    row.machine ? `${row.machine.fleetNumber} ${row.machine.name}` : "no machine",
-    row.entryName ?? "unknown device", row.person.name, momentWords(row.finishedAt ?? row.startedAt),
-    row.recheckOf ? "re-check" : null,
-  ].filter((fact) => fact !== null);
+interface LineProps { readonly facts: readonly ReactNode[]; readonly className?: string }
+
+/** Facts in a row; a point stands between two of them and never begins a line. */
+function Line({ facts, className = "" }: LineProps) {
+  const shown = facts.filter((fact) => fact !== null);
   return (
-    <ul className="text-quiet">
-      {facts.map((fact, index) => <li key={index} className="inline">{fact}{index < facts.length - 1 ? <span aria-hidden="true"> · </span> : null}</li>)}
+    <ul className={className}>
+      {shown.map((fact, index) => <li key={index} className="inline">{fact}{index < shown.length - 1 ? <span aria-hidden="true">{"\u00a0\u00b7 "}</span> : null}</li>)}
     </ul>
+  );
+}
+
+/** What it was made on, then how sure it is, by whom and when. */
+function Facts({ row }: { row: CheckRow }) {
+  const { machine, entryName, kind, findingChance } = row;
+  return (
+    <>
+      <Line facts={[machine ? `${machine.fleetNumber} ${machine.name}` : null, entryName ?? "Unknown device", kind ? kindTitle(kind) : null]} />
+      <Line
+        className="text-quiet"
+        facts={[
+          findingChance === null ? null : <span key="chance">{chanceWords(findingChance)}, <span className="font-mono whitespace-nowrap">{chanceText(findingChance)}</span></span>,
+          row.recheckOf ? "re-check" : null, row.person.name, <span key="when" className="whitespace-nowrap">{momentWords(row.finishedAt ?? row.startedAt)}</span>,
+        ]}
+      />
+    </>
   );
 }
 
