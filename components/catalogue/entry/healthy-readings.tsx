@@ -8,7 +8,7 @@ export function HealthyReadings({ data }: { readonly data: EntryData }) {
       {healthyRows(data).map((row) => (
         <div key={row.name} className="grid gap-x-4 border-b border-quiet py-2.5 last:border-b-0 sm:grid-cols-[12rem_1fr]">
           <dt className="font-bold">{row.name}</dt>
-          <dd><span className="font-mono">{row.value}</span><span className="block text-quiet">{row.how}</span></dd>
+          <dd><strong className="text-lg">{row.value}</strong><span className="block text-quiet">{row.how}</span></dd>
         </div>
       ))}
     </dl>

@@ -52,9 +52,9 @@ export function EvidenceTable({ rows, labels, finding }: EvidenceTableProps) {
 
 function EvidenceItem({ row, labels, title }: { row: EvidenceRow; labels: Labels; title: string | null }) {
   return (
-    <li className="grid gap-1 border-t border-quiet py-3 first:border-t-2 first:border-rule lg:grid-cols-[minmax(0,1.2fr)_minmax(0,3fr)] lg:gap-6">
+    <li className="grid gap-1 border-t border-quiet py-3 first:border-t-2 first:border-rule lg:grid-cols-[minmax(0,1fr)_minmax(0,3fr)] lg:gap-6">
       <h3 className="font-bold">{checkName(row.check, labels)}</h3>
-      <dl className="grid grid-cols-2 gap-x-4 gap-y-2 sm:grid-cols-3 lg:grid-cols-5">
+      <dl className="grid grid-cols-2 gap-x-4 gap-y-2 sm:grid-cols-3 lg:grid-cols-[1fr_1.3fr_1.3fr_0.8fr_1.1fr]">
         {cellsOf(row, title).map((cell) => (
           <div key={cell.label} className="min-w-0">
             <dt className="text-quiet lg:sr-only">{cell.label}</dt>
@@ -69,9 +69,9 @@ function EvidenceItem({ row, labels, title }: { row: EvidenceRow; labels: Labels
 /** On a desk the terms stand once, at the top; each row still carries its own for screen readers. */
 function DeskHeader({ labels }: { labels: readonly string[] }) {
   return (
-    <div aria-hidden="true" className="hidden gap-6 pb-2 font-bold lg:grid lg:grid-cols-[minmax(0,1.2fr)_minmax(0,3fr)]">
+    <div aria-hidden="true" className="hidden gap-6 pb-2 font-bold lg:grid lg:grid-cols-[minmax(0,1fr)_minmax(0,3fr)]">
       <span>Check</span>
-      <div className="grid grid-cols-5 gap-x-4">{labels.map((label) => <span key={label} className="self-end">{label}</span>)}</div>
+      <div className="grid grid-cols-[1fr_1.3fr_1.3fr_0.8fr_1.1fr] gap-x-4">{labels.map((label) => <span key={label} className="self-end">{label}</span>)}</div>
     </div>
   );
 }

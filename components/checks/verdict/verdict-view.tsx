@@ -36,7 +36,7 @@ function Sentence({ verdict }: { verdict: Verdict }) {
         </svg>
         {verdict.contradictory ? "Contradictory" : STATE_WORDS[kind]}
       </p>
-      <p className="mt-2 max-w-[34ch] text-2xl leading-snug font-bold sm:max-w-[48ch] sm:text-3xl">{verdict.sentence}</p>
+      <p className="balanced mt-2 max-w-[34ch] text-2xl leading-snug font-bold sm:max-w-[52ch] sm:text-3xl">{verdict.sentence}</p>
     </Sheet>
   );
 }
@@ -44,13 +44,14 @@ function Sentence({ verdict }: { verdict: Verdict }) {
 function Place({ verdict, check }: { verdict: Verdict; check: CheckView }) {
   const labels = check.setup.cavityLabels;
   const open = verdict.openFindings.filter((fault) => fault.code !== "none");
+  const nothing = verdict.contradictory ? "Nothing is marked until the readings agree." : "Sound: nothing to mark.";
   return (
     <Sheet title={open.length === 0 ? "Wiring" : "Where it is"}>
       <WiringSketch labels={labels} pins={settledPins(verdict.pins)} findings={verdict.openFindings} wireColours={check.setup.wireColours} />
       <ul className="mt-3 grid gap-2">
         {verdict.openFindings.slice(0, 6).map((fault, index) => (
           <li key={findingHeading(fault, labels)}>
-            {fault.code === "none" ? "Sound: nothing to mark." : <><MarkLetter index={index} /> {findingHeading(fault, labels)}</>}
+            {fault.code === "none" ? nothing : <><MarkLetter index={index} /> {findingHeading(fault, labels)}</>}
           </li>
         ))}
       </ul>
@@ -91,25 +92,25 @@ export function VerdictView({ check, actions }: VerdictViewProps) {
       <Sentence verdict={verdict} />
       {actions}
       <TellApart verdict={verdict} labels={labels} />
-      <div className="grid items-start gap-6 lg:grid-cols-2">
+      <div className="grid gap-6 lg:grid-cols-2">
         <Place verdict={verdict} check={check} />
         <Sheet title="Pins of the device">
           <PinsTable verdict={verdict} setup={check.setup} />
           {check.setup.connector ? <div className="mt-5"><VerdictFace shape={check.setup.connector} labels={labels} pins={settledPins(verdict.pins)} findings={verdict.openFindings} /></div> : null}
         </Sheet>
       </div>
+      <Cautions lines={verdict.cautions} />
       {verdict.advice.length > 0 ? (
-        <div className="grid items-start gap-6 lg:grid-cols-2">
+        <div className="grid gap-6 lg:grid-cols-2">
           <Sheet title="What to do next"><ReadFirst verdict={verdict} /><AdviceList advice={verdict.advice} labels={labels} part="next" /></Sheet>
           <Sheet title="How to prove the repair"><AdviceList advice={verdict.advice} labels={labels} part="prove" /></Sheet>
         </div>
       ) : null}
-      <div className="grid items-start gap-6 lg:grid-cols-2">
+      <div className="grid gap-6 lg:grid-cols-2">
         <Sheet title="Findings and their chances"><FindingChances verdict={verdict} labels={labels} /></Sheet>
         <Sheet title="Kind of device"><KindChances kinds={verdict.kinds} /></Sheet>
       </div>
       <Sheet title="Evidence"><EvidenceTable rows={verdict.evidence} labels={labels} finding={verdict.evidenceFinding} /></Sheet>
-      <Cautions lines={verdict.cautions} />
     </div>
   );
 }

@@ -84,7 +84,7 @@ export function WiringSketch({ labels, pins, findings, wireColours }: WiringSket
       <ShortEnd fault={only} />
       {PINS.map((pin) => {
         const colour = wireColours?.[pin - 1];
-        return colour ? <text key={pin} x={SKETCH.controller.right + 6} y={wireY(pin) - 11} fontSize={16} className="fill-ink font-mono">{colour}</text> : null;
+        return colour ? <text key={pin} x={SKETCH.controller.right + 8} y={wireY(pin) + 21} fontSize={16} className="fill-ink font-mono">{colour}</text> : null;
       })}
       {points.map((point, index) => (point ? <Mark key={markLetter(index)} point={point} letter={markLetter(index)} /> : null))}
     </svg>
