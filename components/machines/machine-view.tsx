@@ -28,7 +28,7 @@ function Facts({ machine }: { readonly machine: Machine }) {
 function CheckRow({ check }: { readonly check: MachineCheck }) {
   return (
     <li className="relative border-b border-quiet py-3 last:border-b-0 hover:bg-[var(--hover)]">
-      <p className="text-quiet"><span className="font-mono">{dayWords(check.startedAt.toISOString())}</span> · {check.person}</p>
+      <p className="text-quiet">{dayWords(check.startedAt.toISOString())} · {check.person}</p>
       <p className="mt-1 text-lg leading-snug font-bold">
         <Link href={`/checks/${check.id}`} className="underline decoration-2 underline-offset-4 after:absolute after:inset-0 focus-visible:outline-none focus-visible:after:outline-3 focus-visible:after:outline-bench">{check.entry ?? "Unknown device"}</Link>
       </p>

@@ -5,9 +5,9 @@ import type { ReactNode } from "react";
  * @param chance probability, 0..1
  */
 export function chanceText(chance: number): string {
-  if (chance > 0.99 && chance <= 1) return "> 99 %";
-  if (chance < 0.01) return "< 1 %";
-  return `${Math.round(chance * 100)} %`;
+  if (chance > 0.99 && chance <= 1) return ">\u00a099\u00a0%";
+  if (chance < 0.01) return "<\u00a01\u00a0%";
+  return `${Math.round(chance * 100)}\u00a0%`;
 }
 
 interface ChanceBarProps {
@@ -32,7 +32,7 @@ export function ChanceBar({ label, chance, note }: ChanceBarProps) {
 export function ChanceFigure({ chance, note }: Pick<ChanceBarProps, "chance" | "note">) {
   return (
     <>
-      <svg aria-hidden="true" viewBox="0 0 100 4" preserveAspectRatio="none" className="h-2.5 min-w-0 flex-1 border border-rule bg-sheet text-bench">
+      <svg aria-hidden="true" viewBox="0 0 100 4" preserveAspectRatio="none" className="h-2.5 w-0 min-w-0 flex-1 border border-rule bg-sheet text-bench">
         <rect width={chance * 100} height="4" fill="currentColor" />
       </svg>
       {note ? <span className="w-29 text-right leading-tight whitespace-nowrap text-quiet">{note}</span> : null}

@@ -33,8 +33,14 @@ function ChangeMark({ change }: { readonly change: Change }) {
 
 function Sound({ row }: { readonly row: CompareRow }) {
   if (!row.ifSound) return <dd>not predicted</dd>;
-  const verdict = row.after === null ? null : fits(row.ifSound, row.after, row.afterLimit) ? "it fits" : "it does not fit";
-  return <dd><span className="font-mono">{expectedWords(row.ifSound)}</span>{verdict ? <span className="block">{verdict}</span> : null}</dd>;
+  const fit = row.after === null ? null : fits(row.ifSound, row.after, row.afterLimit);
+  return (
+    <dd>
+      <span className="font-mono">{expectedWords(row.ifSound)}</span>
+      {fit === true ? <span className="block">it fits</span> : null}
+      {fit === false ? <span className="block font-bold"><span aria-hidden="true">▲ </span>it does not fit</span> : null}
+    </dd>
+  );
 }
 
 function Reading({ row, labels }: { readonly row: CompareRow; readonly labels: Labels }) {
@@ -54,6 +60,12 @@ function Reading({ row, labels }: { readonly row: CompareRow; readonly labels: L
   );
 }
 
+function changedWords(changed: number, both: number): string {
+  if (both === 0) return "No reading was taken in both runs yet.";
+  if (changed === 0) return `No reading changed by more than the meter may be out; ${both === 1 ? "1 was" : `${both} were`} taken in both runs.`;
+  return `${changed} of ${both} readings taken in both runs changed by more than the meter may be out.`;
+}
+
 interface CompareViewProps { readonly first: CheckView; readonly second: CheckView; readonly rows: readonly CompareRow[] }
 
 /** Two runs side by side: the verdicts, then each reading before and after with what it should be if all is sound. */
@@ -67,7 +79,7 @@ export function CompareView({ first, second, rows }: CompareViewProps) {
         <Run title="Re-check" check={second} />
       </div>
       <Sheet title="Readings">
-        <p className="mb-3">{both === 0 ? "No reading was taken in both runs yet." : `${changed} of ${both} readings taken in both runs changed by more than the meter may be out.`}</p>
+        <p className="mb-3">{changedWords(changed, both)}</p>
         <ol className="grid">{rows.map((row) => <Reading key={row.check} row={row} labels={first.setup.cavityLabels} />)}</ol>
       </Sheet>
     </div>

@@ -1,3 +1,4 @@
+import type { ComponentProps } from "react";
 import { checkName, readingWords } from "@/lib/checks/check-name";
 import type { CheckView } from "@/lib/checks/check-view";
 import { bearing, BEARING_WORDS, expectedWords, limitWords } from "@/lib/checks/evidence-words";
@@ -5,6 +6,7 @@ import { ifFinding } from "@/lib/checks/finding-words";
 import { readingSteps, skipSteps } from "@/lib/checks/run-state";
 import type { SkipReason } from "@/lib/checks/run";
 import type { Verdict } from "@/lib/checks/verdict";
+import { EvidenceTable } from "../verdict/evidence-table";
 
 const REASONS: Readonly<Record<SkipReason, string>> = {
   "cannot-reach": "cannot be reached", "not-safe-here": "not safe here", "no-function-on-meter": "the meter has no such function",
@@ -21,7 +23,18 @@ export function ReportReadings({ check, verdict }: { readonly check: CheckView; 
   const rows = [...verdict.evidence].sort((a, b) => (order.get(a.check) ?? 0) - (order.get(b.check) ?? 0));
   const finding = verdict.evidenceFinding;
   return (
-    <div role="region" aria-label="Readings and evidence" tabIndex={0} className="overflow-x-auto print:overflow-visible">
+    <>
+      {/* Six columns do not fit a phone: there each reading stands by itself, as on the verdict. */}
+      <div className="sm:hidden print:hidden"><EvidenceTable rows={rows} labels={labels} finding={finding} /></div>
+      <ReadingsTable rows={rows} labels={labels} finding={finding} />
+    </>
+  );
+}
+
+/** The readings as they are printed. */
+function ReadingsTable({ rows, labels, finding }: ComponentProps<typeof EvidenceTable>) {
+  return (
+    <div role="region" aria-label="Readings and evidence" tabIndex={0} className="hidden overflow-x-auto sm:block print:block print:overflow-visible">
       <table className="w-full min-w-[44rem] border-collapse print:min-w-0 print:text-[9.5pt]">
         <thead>
           <tr className="border-b-2 border-ink">
