@@ -50,7 +50,7 @@ function Meter({ data }: NodeProps<MeterNode>) {
     <div className="flex h-18 w-24 items-stretch border-4 border-ink bg-sheet text-ink">
       <span className="grid w-7 grid-rows-2 text-center font-read text-base leading-8 font-bold">
         <span className="bg-stop text-on-stop">R</span>
-        <span className="bg-ink text-paper">B</span>
+        <span className="bg-black text-white">B</span>
       </span>
       <span className="m-auto font-mono text-lg leading-tight font-bold">{data.dial}</span>
       <Handle id="red" type="source" position={Position.Left} style={{ ...HIDDEN, top: "25%" }} />
