@@ -37,7 +37,8 @@ export const mono = localFont({
 
 /**
  * Point, comma, colon and space for readings. The monospaced face gives each of them a whole cell, so that "4.7 kΩ"
- * falls apart into "4. 7  kΩ"; with these from the reading face a number stays one thing, and digits still align.
+ * falls apart into "4. 7  kΩ"; with these from the reading face a number stays one thing, and digits still align. Preloaded as that face is, so that
+ * both name the same file and no line is set twice.
  */
 export const monoPoint = localFont({
   src: [
@@ -45,7 +46,6 @@ export const monoPoint = localFont({
   ],
   variable: "--font-mono-point",
   display: "swap",
-  preload: false,
   adjustFontFallback: false,
   declarations: [{ prop: "unicode-range", value: "U+0020,U+002C,U+002E,U+003A,U+003B,U+00A0" }],
 });
