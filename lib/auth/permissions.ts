@@ -7,6 +7,8 @@ export const PERMISSIONS = [
   "account:own",
   "catalogue:read", "entry:propose", "entry:edit", "entry:publish",
   "check:read", "check:run",
+  // Own checks; everybody's; the switch that sets all of them aside.
+  "check:confirm", "check:confirm-any", "experience:switch",
   "machine:read", "machine:edit", "meter:edit",
   "walkthrough:do", "walkthrough:author", "walkthrough:assign", "walkthrough:sign-off",
   "people:read", "people:manage", "audit:read", "backup:run",
@@ -17,10 +19,10 @@ export type Permission = (typeof PERMISSIONS)[number];
 const EVERYONE: readonly Permission[] = ["account:own", "catalogue:read", "check:read", "machine:read", "walkthrough:do"];
 
 const GRANTS: Readonly<Record<Role, readonly Permission[]>> = {
-  technician: ["check:run", "entry:propose"],
-  editor: ["check:run", "entry:propose", "entry:edit", "entry:publish", "machine:edit"],
-  trainer: ["check:run", "walkthrough:author", "walkthrough:assign", "walkthrough:sign-off", "people:read"],
-  administrator: ["machine:edit", "meter:edit", "people:read", "people:manage", "audit:read", "backup:run"],
+  technician: ["check:run", "check:confirm", "entry:propose"],
+  editor: ["check:run", "check:confirm", "check:confirm-any", "experience:switch", "entry:propose", "entry:edit", "entry:publish", "machine:edit"],
+  trainer: ["check:run", "check:confirm", "check:confirm-any", "walkthrough:author", "walkthrough:assign", "walkthrough:sign-off", "people:read"],
+  administrator: ["experience:switch", "machine:edit", "meter:edit", "people:read", "people:manage", "audit:read", "backup:run"],
 };
 
 /** Somebody signed in, as far as the rest of the project needs to know them. */

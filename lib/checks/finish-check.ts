@@ -8,6 +8,7 @@ import { log } from "@/lib/log";
 import { parseInput } from "@/lib/parse";
 import { recordAudit } from "@/lib/people/record-audit";
 import { assertRunning, ownCheck, stepsOf } from "./check-rows";
+import { sameExperience } from "./experience";
 import { judge } from "./judge";
 import { finishCheckSchema } from "./schemas";
 import { standingDifference } from "./standing-difference";
@@ -30,13 +31,15 @@ async function recordDifference(tx: Writer, person: Person, checkId: string, par
  */
 export async function finishCheck(person: Person, checkId: string, input: unknown, now = new Date()): Promise<Finished> {
   assertPermission(person, "check:run");
-  const { standing } = parseInput(finishCheckSchema, input);
+  const { standing, experience } = parseInput(finishCheckSchema, input);
   const before = await ownCheck(readDb(), person, checkId);
   if (before.verdict) return { id: checkId, verdict: before.verdict };
   assertRunning(before);
   const steps = await stepsOf(readDb(), checkId);
   const { assessment, verdict } = judge({ setup: before.setup, steps });
-  const difference = standing ? standingDifference(assessment, standing) : [];
+  // A phone that counted in other checks than the server (see startCheck) has to believe something else: no defect.
+  const comparable = sameExperience(experience, before.setup.experience);
+  const difference = standing && comparable ? standingDifference(assessment, standing) : [];
   return transact(async (tx) => {
     const check = await ownCheck(tx, person, checkId);
     if (check.verdict) return { id: checkId, verdict: check.verdict };

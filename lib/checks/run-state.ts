@@ -1,4 +1,5 @@
 import type { CheckSpec, MachineState, Reading, Setup } from "@/lib/diagnosis";
+import { tidyExperience } from "./experience";
 import type { Run, RunStep, SkipReason } from "./run";
 
 export type ReadingStep = Extract<RunStep, { type: "reading" }>;
@@ -98,7 +99,8 @@ export function excludedChecks(steps: readonly RunStep[], vocabulary: readonly C
 export function engineSetup(run: Pick<Run, "setup" | "steps">, vocabulary: readonly CheckSpec[]): Setup {
   const { cavityLabels, expect, meter } = run.setup;
   const excluded = excludedChecks(run.steps, vocabulary);
-  return { pins: cavityLabels, ...(expect ? { expect } : {}), ...(meter ? { meter } : {}), ...(excluded.length > 0 ? { excluded } : {}) };
+  const experience = tidyExperience(run.setup.experience);
+  return { pins: cavityLabels, ...(expect ? { expect } : {}), ...(meter ? { meter } : {}), ...(experience ? { experience } : {}), ...(excluded.length > 0 ? { excluded } : {}) };
 }
 
 /**

@@ -1,5 +1,5 @@
 import type { ConnectorShape } from "@/lib/catalogue/entry-data";
-import type { Expect, MeterSpec, ReadingValue } from "@/lib/diagnosis";
+import type { Expect, Experience, MeterSpec, ReadingValue } from "@/lib/diagnosis";
 
 /** Why a reading could not be taken; shown as choices, kept in the record. */
 export const SKIP_REASONS = ["cannot-reach", "not-safe-here", "no-function-on-meter", "cannot-part-connector", "cannot-move-actuator", "other"] as const;
@@ -23,6 +23,8 @@ export interface RunSetup {
   readonly senses?: string;
   readonly batteryVolts?: number;
   readonly recheckOf?: string;
+  /** The workshop's own confirmed checks as they were counted at the start, so that an old check never changes. */
+  readonly experience?: Experience;
   readonly note?: string;
 }
 

@@ -1,5 +1,6 @@
 import { z } from "zod";
 import { FAULT_CODES, KINDS } from "@/lib/diagnosis";
+import { experienceSchema } from "./confirm-schemas";
 import { idSchema, ulidSchema } from "./id-schemas";
 import { SKIP_REASONS } from "./run";
 import { SETUP_PARTS } from "./setup-schema";
@@ -47,8 +48,8 @@ export const standingSchema = z.object({
 });
 export type ComparedStanding = z.infer<typeof standingSchema>;
 
-/** The phone's own standing at the end, where it has one, to be compared with the server's. */
-export const finishCheckSchema = z.strictObject({ standing: standingSchema.optional() });
+/** The phone's own standing at the end, where it has one, to be compared with the server's, and the own checks it counted in. */
+export const finishCheckSchema = z.strictObject({ standing: standingSchema.optional(), experience: experienceSchema.optional() });
 
 export const attachMachineSchema = z.strictObject({ machineId: idSchema });
 export const startRecheckSchema = z.strictObject({ id: ulidSchema });

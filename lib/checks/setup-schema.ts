@@ -1,6 +1,7 @@
 import { z } from "zod";
 import { connectorShapeSchema } from "@/lib/catalogue/schemas";
 import { KINDS } from "@/lib/diagnosis";
+import { experienceSchema } from "./confirm-schemas";
 import { idSchema } from "./id-schemas";
 
 const label = z.string().trim().min(1, "Each cavity needs its label.").max(8, "A cavity label has at most 8 letters.");
@@ -53,5 +54,6 @@ export const SETUP_PARTS = {
   senses: z.string().max(120).optional(),
   batteryVolts: volts.optional(),
   recheckOf: idSchema.optional(),
+  experience: experienceSchema.optional(),
   note: z.string().max(1000).optional(),
 };

@@ -7,6 +7,7 @@ import { AppError, notFound } from "@/lib/errors";
 import { parseInput } from "@/lib/parse";
 import { recordAudit } from "@/lib/people/record-audit";
 import { visibleCheck } from "./check-rows";
+import { fixExperience } from "./experience-rows";
 import type { RunSetup } from "./run";
 import { startCheckSchema } from "./schemas";
 
@@ -33,23 +34,31 @@ function startOf(claimed: string | undefined, now: Date): Date {
   return at > now ? now : at;
 }
 
+/** What of a start is worth a note beside who and when. */
+function detailOf(setup: RunSetup, replaced: boolean): Readonly<Record<string, unknown>> {
+  return { ...(setup.recheckOf ? { recheckOf: setup.recheckOf } : {}), ...(replaced ? { experience: "replaced by the counts in force" } : {}) };
+}
+
 /**
- * Starts a check under the id that the phone made. Starting the same one again changes nothing.
+ * Starts a check under the id that the phone made. Starting the same one again changes nothing. The workshop's own
+ * counts are fixed into the setup here: those the phone judges by where the workshop once gave them out, else those in force.
  * @throws AppError invalid-input (400), not-found (404), id-in-use (409)
  */
 export async function startCheck(person: Person, input: unknown, now = new Date()): Promise<{ readonly id: string }> {
   assertPermission(person, "check:run");
-  const { id, setup, startedAt } = parseInput(startCheckSchema, input);
+  const { id, setup: claimed, startedAt } = parseInput(startCheckSchema, input);
   return transact(async (tx) => {
     const [known] = await tx.select({ personId: checks.personId }).from(checks).where(eq(checks.id, id)).limit(1);
     if (known?.personId === person.id) return { id };
     if (known) throw new AppError("id-in-use", "This id belongs to another check. Start again with a new one.", 409, "id");
-    await assertKnown(tx, person, setup);
+    await assertKnown(tx, person, claimed);
+    const { experience, replaced } = await fixExperience(tx, claimed.experience, now);
+    const setup = { ...claimed, experience };
     await tx.insert(checks).values({
       id, personId: person.id, entryId: setup.entryId, entryVersionId: setup.entryVersionId, machineId: setup.machineId,
       meterId: setup.meterId, recheckOf: setup.recheckOf, state: "running", setup, startedAt: startOf(startedAt, now),
     });
-    await recordAudit(tx, { personId: person.id, verb: "check:start", subjectType: "check", subjectId: id, detail: setup.recheckOf ? { recheckOf: setup.recheckOf } : {} }, now);
+    await recordAudit(tx, { personId: person.id, verb: "check:start", subjectType: "check", subjectId: id, detail: detailOf(setup, replaced) }, now);
     return { id };
   });
 }

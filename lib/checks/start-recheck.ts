@@ -16,7 +16,7 @@ export async function startRecheck(person: Person, firstId: string, input: unkno
   const { id } = parseInput(startRecheckSchema, input);
   const first = await visibleCheck(readDb(), person, firstId);
   if (first.state !== "finished") throw new AppError("check-running", "Finish the first check before you start its re-check.", 409);
-  // The note was about the first run; everything else still holds.
-  const setup = { ...first.setup, note: undefined, machineId: first.machineId ?? undefined, recheckOf: firstId };
+  // The note was about the first run, and the workshop may have learnt something since; everything else still holds.
+  const setup = { ...first.setup, note: undefined, experience: undefined, machineId: first.machineId ?? undefined, recheckOf: firstId };
   return startCheck(person, { id, setup }, now);
 }

@@ -24,7 +24,8 @@ async function sendSteps(store: RunStore, send: Send, run: RunRecord): Promise<S
 /** The verdict asked for, or giving the run up. */
 async function sendEnd(send: Send, run: RunRecord): Promise<SendResult> {
   if (run.finish === "abandon") return send(`/api/checks/${run.id}/abandon`, {});
-  return send(`/api/checks/${run.id}/finish`, run.standing ? { standing: run.standing } : {});
+  const { standing, setup: { experience } } = run;
+  return send(`/api/checks/${run.id}/finish`, standing ? { standing, ...(experience ? { experience } : {}) } : {});
 }
 
 /** Start, steps, end: in that order, each marked only after the server's answer, so that a replay does no harm. */

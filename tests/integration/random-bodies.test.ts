@@ -7,9 +7,12 @@ import type { Person } from "@/lib/auth/permissions";
 import { abandonCheck } from "@/lib/checks/abandon-check";
 import { appendSteps } from "@/lib/checks/append-steps";
 import { attachMachine } from "@/lib/checks/attach-machine";
+import { confirmCheck } from "@/lib/checks/confirm-check";
 import { finishCheck } from "@/lib/checks/finish-check";
 import { startCheck } from "@/lib/checks/start-check";
 import { startRecheck } from "@/lib/checks/start-recheck";
+import { switchExperience } from "@/lib/checks/switch-experience";
+import { withdrawConfirmation } from "@/lib/checks/withdraw-confirmation";
 import { eachTestOwnDatabase } from "../support/database";
 import { drawer } from "../support/draw";
 import { makePerson } from "../support/people";
@@ -60,7 +63,8 @@ function soundBodies(): readonly unknown[] {
     { id: ulid(), setup: { cavityLabels: ["A", "B", "C"], batteryVolts: 24, wireColours: ["RD", "BK", null] }, startedAt: AT },
     { steps: [readingStep(["res:device:1-2@rest", 4700]), { id: ulid(), at: AT, type: "retract", step: ulid() }] },
     { standing: { state: "ranked", kinds: [{ kind: "pwm", p: 1 }], pins: [], faults: [{ code: "none", p: 1 }], openFindings: [], done: true, inseparable: false } },
-    { machineId }, { id: ulid() },
+    { machineId }, { id: ulid() }, { finding: "wire-open:2", kind: "pwm", proof: "New wire laid, fault gone." },
+    { id: ulid(), setup: { cavityLabels: ["A", "B", "C"], experience: { kinds: { pwm: 1 }, findings: { "wire-open": 2 } } } },
     { id: "x", setup: { pins: ["1", "2", "3"] }, readings: [["res:device:1-2@rest", 4700], ["volt:battery", 12.6]] },
   ];
 }
@@ -79,7 +83,7 @@ async function ask(endpoint: Endpoint, draw: Draw): Promise<{ status: number; te
 
 describe("random bodies", () => {
   it("reach every route of the application", () => {
-    expect(endpoints.map(({ name }) => name)).toEqual(expect.arrayContaining(["POST /api/checks", "GET /api/checks", "PUT /api/checks/[id]/steps", "POST /api/checks/[id]/finish", "POST /api/assess"]));
+    expect(endpoints.map(({ name }) => name)).toEqual(expect.arrayContaining(["POST /api/checks", "GET /api/checks", "PUT /api/checks/[id]/steps", "POST /api/checks/[id]/finish", "POST /api/checks/[id]/confirm", "POST /api/confirmations/[id]/withdraw", "POST /api/assess"]));
   });
 
   it.each(endpoints)("$name answers a thousand with no defect and changes nothing", { timeout: 120_000 }, async (endpoint) => {
@@ -104,6 +108,9 @@ const VERBS: readonly Verb[] = [
   ["abandonCheck", (_input, id) => abandonCheck(me, id)],
   ["attachMachine", (input, id) => attachMachine(me, id, input)],
   ["startRecheck", (input, id) => startRecheck(me, id, input)],
+  ["confirmCheck", (input, id) => confirmCheck(me, id, input)],
+  ["withdrawConfirmation", (input) => withdrawConfirmation(me, input)],
+  ["switchExperience", (input) => switchExperience(me, input)],
 ];
 
 describe("random input to the verbs themselves", () => {
