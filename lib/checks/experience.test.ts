@@ -2,7 +2,7 @@ import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import { assess, chancesBefore, FAULT_CODES, FINDING_PRIORS, KIND_PRIORS, KINDS, PRIOR_CHECKS, vocabulary, type Experience, type Reading } from "@/lib/diagnosis";
 import { FAMILIES, FAULT_PLACES } from "@/lib/diagnosis/circuit/candidate";
-import { chanceTable } from "./chance-rows";
+import { barScale, chanceTable, shareWords, shiftWords } from "./chance-rows";
 import { experienceSchema } from "./confirm-schemas";
 import { countOutcomes, NO_EXPERIENCE, ownChecks, sameExperience, tidyExperience } from "./experience";
 import { isOfKind, OUTCOME_GROUPS, outcomeId, outcomeOf, OUTCOMES } from "./outcome-choices";
@@ -111,5 +111,12 @@ describe("the table of chances", () => {
       expect(open?.own).toBe(4);
       expect((open?.now ?? 0) > (open?.published ?? 0)).toBe(moved);
     }
+  });
+
+  it("says how far a chance was moved, and draws every bar within its scale", () => {
+    expect(shareWords(0.13514)).toBe("13.5\u00a0%");
+    expect([[0.1, 0.112], [0.1, 0.096], [0.0811, 0.0835], [0.1, 0.1], [0.1, 0.1001]].map(([published = 0, now = 0]) => shiftWords({ published, now }))).toEqual(["up 1.2 points", "down 0.4 points", "up 0.3 points", "as published", "up less than 0.1 points"]);
+    const { findings, kinds } = chanceTable({ kinds: { pwm: 900 }, findings: {} }, { kinds: { pwm: 900 }, findings: {} });
+    expect([barScale(findings), barScale(kinds)]).toEqual([0.3, 1]);
   });
 });

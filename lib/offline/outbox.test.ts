@@ -37,6 +37,15 @@ describe("flush", () => {
     expect(asked).toHaveLength(3);
   });
 
+  it("says at start and finish which own checks the phone counted in", async () => {
+    const experience = { kinds: {}, findings: { none: 2 } };
+    const standing = { state: "ranked", kinds: [], pins: [], faults: [], openFindings: [], done: true, inseparable: false } as const;
+    const store = memoryStore([run("r1", { setup: { cavityLabels: ["1", "2", "3"], experience }, finish: "asked", standing })], []);
+    const bodies: unknown[] = [];
+    await flush(store, async (_path, body) => { bodies.push(body); return ok(); }, "p1");
+    expect(bodies).toMatchObject([{ setup: { experience } }, { standing, experience }]);
+  });
+
   it("gives a run up on the server without asking for a verdict", async () => {
     const store = memoryStore([run("r1", { started: true, finish: "abandon" })], []);
     const { asked, send } = server(ok);

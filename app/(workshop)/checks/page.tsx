@@ -73,7 +73,7 @@ export default async function ChecksPage({ searchParams }: { readonly searchPara
   const mayRun = hasPermission(person, "check:run");
   return (
     <>
-      <PageHeading title="Checks" lead="Every finished check of the workshop, and your own running ones." actions={mayRun ? <StartButton /> : undefined} />
+      <PageHeading title="Checks" lead="Every finished check of the workshop, and your own running ones." actions={<><ButtonLink href="/checks/chances">Chances before the first reading</ButtonLink>{mayRun ? <StartButton /> : null}</>} />
       <LogFilters query={query} choices={choices} open={page instanceof AppError} />
       <div className="mt-6">
         {page instanceof AppError

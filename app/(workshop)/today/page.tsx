@@ -1,4 +1,5 @@
 import type { Metadata } from "next";
+import Link from "next/link";
 import { LogList } from "@/components/checks/log/log-list";
 import { ButtonLink, EmptyState, PageHeading, Sheet } from "@/components/ui";
 import { hasPermission, type Person } from "@/lib/auth/permissions";
@@ -17,6 +18,7 @@ export default async function TodayPage() {
         {mayRun ? <ButtonLink href="/checks/new" tone="main" size="glove">Start a check</ButtonLink> : null}
         <ButtonLink href="/catalogue" size="glove">Search the catalogue</ButtonLink>
       </div>
+      <p className="mt-3"><Link href="/checks/chances" className="link inline-flex min-h-touch items-center">Chances before the first reading</Link></p>
       <div className="mt-8 grid grid-cols-1 gap-8 lg:grid-cols-2 lg:items-start">
         {mayRun ? <Running person={person} /> : null}
         <Recent person={person} />

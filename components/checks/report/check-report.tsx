@@ -2,16 +2,23 @@ import type { ReactNode } from "react";
 import { chanceText } from "@/components/ui";
 import { checkName } from "@/lib/checks/check-name";
 import type { CheckView } from "@/lib/checks/check-view";
+import type { ConfirmationView } from "@/lib/checks/confirmation-view";
 import { momentWords } from "@/lib/checks/date-words";
 import { findingHeading, KIND_TITLES } from "@/lib/checks/finding-words";
 import type { Verdict } from "@/lib/checks/verdict";
 import { settledPins } from "@/lib/checks/verdict-sentence";
+import { OutcomeWords } from "../outcome/outcome-words";
 import { AdviceList } from "../verdict/advice-list";
 import { PinsTable } from "../verdict/pins-table";
 import { WiringSketch } from "../verdict/wiring-sketch";
 import { ReportReadings, ReportSkips } from "./report-readings";
 
-interface ReportProps { readonly check: CheckView; readonly verdict: Verdict }
+interface ReportProps {
+  readonly check: CheckView;
+  readonly verdict: Verdict;
+  /** What it turned out to be, where that is recorded. */
+  readonly outcome?: ConfirmationView | null;
+}
 
 function Part({ title, children }: { readonly title: string; readonly children: ReactNode }) {
   return (
@@ -87,7 +94,7 @@ function Open({ check, verdict }: ReportProps) {
 }
 
 /** The whole record of a finished check for the work order: one column, A4, readable in black and white. */
-export function CheckReport({ check, verdict }: ReportProps) {
+export function CheckReport({ check, verdict, outcome }: ReportProps) {
   const labels = check.setup.cavityLabels;
   return (
     <article className="mx-auto max-w-[50rem] print:text-[10.5pt]">
@@ -111,6 +118,7 @@ export function CheckReport({ check, verdict }: ReportProps) {
           <Part title="How to prove the repair"><AdviceList advice={verdict.advice} labels={labels} part="prove" /></Part>
         </>
       ) : null}
+      {outcome ? <Part title="What it turned out to be"><OutcomeWords one={outcome} /></Part> : null}
       <Part title="Cautions"><ul className="list-disc pl-6">{verdict.cautions.map((line) => <li key={line}>{line}</li>)}</ul></Part>
       <Signature />
     </article>

@@ -6,6 +6,7 @@ import { PageHeading } from "@/components/ui";
 import type { RunSetup } from "@/lib/checks/run";
 import type { SetupChoices, SetupEntry } from "@/lib/checks/setup-form";
 import { keepRun } from "@/lib/offline/run-store";
+import type { Experience } from "@/lib/diagnosis";
 import { LazyCheckRun, warmCheckRun } from "./check-run-lazy";
 import { OpenRuns } from "./open-runs";
 import { SetupForm } from "./setup-form";
@@ -15,6 +16,8 @@ interface NewCheckProps {
   readonly entry: SetupEntry | null;
   readonly choices: SetupChoices;
   readonly machineId: string;
+  /** The workshop's own counts in force, which this check is judged by to its end, on the phone as on the server. */
+  readonly experience: Experience;
 }
 
 /** Milliseconds after the page is there: long enough for it to be read and used first. */
@@ -43,14 +46,14 @@ function useWarmUp(): () => void {
  * Starts a check on the phone and goes straight into it, on the same page: the server need not answer.
  * The address becomes the check's own, so that a reload comes back to it.
  */
-export function NewCheck({ personId, entry, choices, machineId }: NewCheckProps) {
+export function NewCheck({ personId, entry, choices, machineId, experience }: NewCheckProps) {
   const [started, setStarted] = useState<string | null>(null);
 
   const warm = useWarmUp();
 
   const start = async (setup: RunSetup) => {
     const id = ulid();
-    await keepRun({ id, personId, setup, startedAt: new Date().toISOString(), started: false, finish: "no" });
+    await keepRun({ id, personId, setup: { ...setup, experience }, startedAt: new Date().toISOString(), started: false, finish: "no" });
     window.history.replaceState(null, "", `/checks/${id}`);
     setStarted(id);
   };

@@ -3,8 +3,15 @@ import Link from "next/link";
 import type { ReactNode } from "react";
 import type { CheckView } from "@/lib/checks/check-view";
 import { momentWords } from "@/lib/checks/date-words";
+import { ownChecks } from "@/lib/checks/experience";
 
 interface Fact { readonly label: string; readonly value: ReactNode }
+
+/** The chances that a check began with, in words. */
+function beginning(own: number): string {
+  if (own === 0) return "published chances";
+  return `published chances and ${own === 1 ? "1 own check" : `${own} own checks`}`;
+}
 
 function factsOf(check: CheckView): readonly Fact[] {
   const { machine, entry, setup } = check;
@@ -14,6 +21,7 @@ function factsOf(check: CheckView): readonly Fact[] {
     { label: "Checked by", value: check.person.name },
     { label: "Finished", value: check.finishedAt ? momentWords(check.finishedAt) : "not finished" },
     { label: "Meter", value: check.meterName ?? "a common 6000-count meter, assumed" },
+    { label: "Began with", value: <Link className="link" href="/checks/chances">{beginning(ownChecks(setup.experience))}</Link> },
     ...(setup.senses ? [{ label: "Senses", value: setup.senses }] : []),
     ...(check.recheckOf ? [{ label: "Re-check of", value: <Link className="link" href={`/checks/${check.recheckOf}` as Route}>the first run</Link> }] : []),
     ...(setup.note ? [{ label: "Note", value: setup.note }] : []),

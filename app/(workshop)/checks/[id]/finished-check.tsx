@@ -2,7 +2,9 @@ import { AttachMachine, CheckFacts, VerdictButtons, VerdictView } from "@/compon
 import { ButtonLink, EmptyState, PageHeading, Sheet } from "@/components/ui";
 import { hasPermission, type Person } from "@/lib/auth/permissions";
 import type { CheckView } from "@/lib/checks/check-view";
+import { confirmationsOf } from "@/lib/checks/list-confirmations";
 import { machineChoices } from "@/lib/checks/log-choices";
+import { Outcome, OutcomeOfVerdict } from "./outcome";
 import { attachMachineAction, recheckAction } from "./verdict-actions";
 
 interface FinishedCheckProps {
@@ -16,13 +18,14 @@ export async function FinishedCheck({ check, person }: FinishedCheckProps) {
   if (!check.verdict) return <Abandoned check={check} />;
   const mayRun = hasPermission(person, "check:run");
   const mayAttach = mayRun && (check.person.id === person.id || hasPermission(person, "machine:edit"));
-  const machines = mayAttach ? await machineChoices(person) : [];
+  const [machines, confirmations] = await Promise.all([mayAttach ? machineChoices(person) : [], confirmationsOf(person, check.id)]);
   const comparable = check.recheckOf !== null || check.rechecks.length > 0;
   return (
     <>
       <PageHeading title={check.recheckOf ? "Verdict of the re-check" : "Verdict"} />
-      <VerdictView check={check} actions={<VerdictButtons checkId={check.id} mayRun={mayRun} comparable={comparable} recheck={recheckAction} />} />
-      <div className="mt-6">
+      <VerdictView check={check} actions={<><VerdictButtons checkId={check.id} mayRun={mayRun} comparable={comparable} recheck={recheckAction} /><OutcomeOfVerdict check={check} person={person} confirmations={confirmations} /></>} />
+      <div className="mt-6 grid grid-cols-1 gap-6">
+        <Outcome check={check} verdict={check.verdict} person={person} confirmations={confirmations} />
         <Sheet title="This check">
           <CheckFacts check={check} />
           {mayAttach ? <div className="mt-5"><AttachMachine checkId={check.id} machines={machines} current={check.machine?.id ?? null} attach={attachMachineAction} /></div> : null}

@@ -7,6 +7,7 @@ import { CONNECTOR_SHAPES } from "@/lib/catalogue/connector-shapes";
 import { cavityLabels, expectOfEntry, pinsInOrder } from "@/lib/catalogue/expect-of-entry";
 import { getEntry } from "@/lib/catalogue/get-entry";
 import type { SetupEntry } from "@/lib/checks/setup-form";
+import { experienceForPhone } from "@/lib/checks/show-chances";
 import { AppError } from "@/lib/errors";
 import { listMachines } from "@/lib/machines/list-machines";
 import { listMeters } from "@/lib/machines/list-meters";
@@ -36,12 +37,12 @@ export default async function NewCheckPage({ searchParams }: { readonly searchPa
   const params = await searchParams;
   const slug = [params.entry].flat()[0] ?? "";
   const machineId = [params.machine].flat()[0] ?? "";
-  const [entry, machines, meters] = await Promise.all([slug ? entryOf(person, slug) : null, listMachines(person, {}), listMeters(person)]);
+  const [entry, machines, meters, experience] = await Promise.all([slug ? entryOf(person, slug) : null, listMachines(person, {}), listMeters(person), experienceForPhone(person)]);
   const choices = { machines, meters, shapes: CONNECTOR_SHAPES.filter((shape) => shape.gender === "plug") };
   return (
     <>
       {slug && !entry ? <Notice tone="ask" title="There is no such entry">Search for it, or carry on as unknown.</Notice> : null}
-      <NewCheck key={slug} personId={person.id} entry={entry} choices={choices} machineId={machines.some((machine) => machine.id === machineId) ? machineId : ""} />
+      <NewCheck key={slug} personId={person.id} entry={entry} choices={choices} machineId={machines.some((machine) => machine.id === machineId) ? machineId : ""} experience={experience} />
     </>
   );
 }

@@ -3,6 +3,7 @@ import { CheckReport } from "@/components/checks/report/check-report";
 import { PrintButton } from "@/components/checks/report/print-button";
 import { ButtonLink, EmptyState } from "@/components/ui";
 import { requirePermission } from "@/lib/auth/require-permission";
+import { confirmationsOf } from "@/lib/checks/list-confirmations";
 import { checkForPage } from "../check-for-page";
 
 export const metadata: Metadata = { title: "Report of a check" };
@@ -16,13 +17,14 @@ export default async function ReportPage({ params }: { readonly params: Promise<
   if (!check.verdict) {
     return <EmptyState title="No report" action={<ButtonLink href={back} tone="main">Back to the check</ButtonLink>}>A report is made from the verdict of a finished check.</EmptyState>;
   }
+  const outcome = (await confirmationsOf(person, id)).find((one) => !one.withdrawn) ?? null;
   return (
     <>
       <div className="mb-6 flex flex-wrap gap-3 print:hidden">
         <PrintButton />
         <ButtonLink href={back}>Back to the verdict</ButtonLink>
       </div>
-      <CheckReport check={check} verdict={check.verdict} />
+      <CheckReport check={check} verdict={check.verdict} outcome={outcome} />
     </>
   );
 }

@@ -1,0 +1,5 @@
+export { OutcomeBoard } from "./outcome-board";
+export { OutcomeLine } from "./outcome-line";
+export { outcomeGroups, type OutcomeGroup } from "./outcome-options";
+export { OutcomeWords } from "./outcome-words";
+export { WithdrawForm } from "./withdraw-form";

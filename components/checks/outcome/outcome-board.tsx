@@ -1,0 +1,78 @@
+"use client";
+
+import { useActionState, useEffect, useRef, type ReactNode } from "react";
+import { Notice, Sheet } from "@/components/ui";
+import type { ActionResult } from "@/lib/action";
+import type { ConfirmationView } from "@/lib/checks/confirmation-view";
+import { findingHeading } from "@/lib/checks/finding-words";
+import { ConfirmForm, type ConfirmAction } from "./confirm-form";
+import type { OutcomeGroup } from "./outcome-options";
+import { OutcomeWords } from "./outcome-words";
+import { WithdrawForm } from "./withdraw-form";
+
+type WithdrawAction = (last: ActionResult<unknown> | null, form: FormData) => Promise<ActionResult<unknown>>;
+
+interface OutcomeBoardProps {
+  readonly checkId: string;
+  /** Newest first; at most one in force. */
+  readonly confirmations: readonly ConfirmationView[];
+  readonly mayConfirm: boolean;
+  readonly groups: readonly OutcomeGroup[];
+  readonly kind: string;
+  readonly confirm: ConfirmAction;
+  readonly withdraw: WithdrawAction;
+  /** Shown where nothing is recorded and this person may not, or need not, record it here. */
+  readonly instead: ReactNode;
+}
+
+/** The button that was pressed is gone with the change it made: the focus goes to what took its place. */
+function useFocusOnChange(key: string) {
+  const place = useRef<HTMLDivElement>(null);
+  const shown = useRef(key);
+  useEffect(() => {
+    if (shown.current === key) return;
+    shown.current = key;
+    place.current?.focus();
+  }, [key]);
+  return place;
+}
+
+function Withdrawn({ rows }: { readonly rows: readonly ConfirmationView[] }) {
+  if (rows.length === 0) return null;
+  return (
+    <details className="mt-4">
+      <summary className="link flex min-h-touch w-fit cursor-pointer items-center font-bold">{rows.length === 1 ? "One record was withdrawn" : `${rows.length} records were withdrawn`}</summary>
+      <ul>{rows.map((row) => <li key={row.id} className="border-t border-quiet py-3"><OutcomeWords one={row} /></li>)}</ul>
+    </details>
+  );
+}
+
+/** What a finished check turned out to be: recorded after the repair, shown to everybody, withdrawn by those who may. */
+export function OutcomeBoard(props: OutcomeBoardProps) {
+  const { checkId, confirmations, mayConfirm, groups, kind, confirm, withdraw, instead } = props;
+  const [withdrawn, send, busy] = useActionState(withdraw, null);
+  const inForce = confirmations.find((one) => !one.withdrawn) ?? null;
+  const place = useFocusOnChange(inForce?.id ?? "");
+  return (
+    <Sheet id="outcome" title="What it turned out to be" className="scroll-mt-24">
+      {withdrawn && !withdrawn.ok ? <Notice tone="stop" title={withdrawn.error.message} live="assertive" /> : null}
+      <div ref={place} tabIndex={-1} className="grid gap-4 outline-none">
+        {inForce ? (
+          <div className="grid gap-1">
+            <p className="flex items-center gap-2 font-bold text-sound">
+              <svg viewBox="0 0 24 24" aria-hidden="true" className="size-6 fill-none stroke-current [stroke-width:2.5]"><path d="M3 3h18v18H3ZM7 12l4 4 6-8" /></svg>Confirmed
+            </p>
+            <OutcomeWords one={inForce} />
+            {inForce.mayWithdraw ? <WithdrawForm confirmationId={inForce.id} what={findingHeading(inForce.finding, inForce.labels)} send={send} busy={busy} /> : null}
+          </div>
+        ) : mayConfirm ? (
+          <>
+            <p className="max-w-prose">After the repair, record what was found. It shifts the chances that later checks start from.</p>
+            <ConfirmForm checkId={checkId} groups={groups} kind={kind} confirm={confirm} />
+          </>
+        ) : instead}
+      </div>
+      <Withdrawn rows={confirmations.filter((one) => one.withdrawn)} />
+    </Sheet>
+  );
+}
