@@ -1,9 +1,10 @@
 import { closeDatabase, readDb, transact, type Writer } from "@/db/client";
 import { migrateDatabase } from "@/db/migrate";
-import { checks, entries, machines, people } from "@/db/schema";
+import { checks, confirmations, entries, machines, people } from "@/db/schema";
 import { env } from "@/lib/env";
 import { seedCatalogue } from "./catalogue";
 import { seedChecks } from "./checks";
+import { seedConfirmations } from "./checks/confirmations";
 import { seedMachines } from "./machines";
 import { DEMO_PASSWORD, DEMO_PEOPLE, seedPeople } from "./people";
 
@@ -15,6 +16,7 @@ const PARTS: readonly Part[] = [
   { name: "machines and meters", isEmpty: async () => (await readDb().$count(machines)) === 0, seed: seedMachines },
   { name: "catalogue", isEmpty: async () => (await readDb().$count(entries)) === 0, seed: seedCatalogue },
   { name: "checks", isEmpty: async () => (await readDb().$count(checks)) === 0, seed: seedChecks },
+  { name: "confirmations", isEmpty: async () => (await readDb().$count(confirmations)) === 0, seed: seedConfirmations },
 ];
 
 /** Fill what is empty with the demo workshop; what holds anything is left alone. */

@@ -1,7 +1,9 @@
 import { eq } from "drizzle-orm";
 import { describe, expect, it } from "vitest";
 import { readDb, write } from "@/db/client";
-import { checks, checkSteps } from "@/db/schema";
+import { checks, checkSteps, confirmations } from "@/db/schema";
+import { countConfirmed, experienceInForce } from "@/lib/checks/experience-rows";
+import { isOfKind, outcomeId, outcomeOf } from "@/lib/checks/outcome-choices";
 import { appendStepsSchema, setupSchema } from "@/lib/checks/schemas";
 import { stepProblem } from "@/lib/checks/step-rules";
 import { parseCheck, type Reading } from "@/lib/diagnosis";
@@ -11,6 +13,7 @@ import { seedCatalogue } from "../catalogue";
 import { seedMachines } from "../machines";
 import { seedPeople } from "../people";
 import { demoCheckId, seedChecks } from ".";
+import { seedConfirmations } from "./confirmations";
 import { demoCheck, demoMachine } from "./demo-machine";
 import { readMeter } from "./read-meter";
 import runs from "./runs.json";
@@ -70,5 +73,22 @@ describe("the demo checks", () => {
       if (!spec) throw new Error(`no check ${code}`);
       expect(readMeter(spec, await trueValue(truth, spec, meter.spec), meter.spec, draw), code).toBe(value);
     }
+  });
+
+  it("that were proved are confirmed, one in force each, of finished first runs, as the form would have taken them", async () => {
+    const rows = new Map((await seeded()).map((row) => [row.id, row]));
+    await write(seedConfirmations);
+    const made = await readDb().select().from(confirmations);
+    for (const one of made) {
+      expect(rows.get(one.checkId)).toMatchObject({ state: "finished", recheckOf: null });
+      expect(outcomeOf(outcomeId({ code: one.findingCode, pins: one.findingPins ?? undefined }))).not.toBeNull();
+      expect(isOfKind(one.findingCode, one.kind)).toBe(true);
+      expect(one.countsKind).toBe(rows.get(one.checkId)?.setup.expect === undefined);
+      expect(one.at.getTime()).toBeGreaterThan(rows.get(one.checkId)?.finishedAt?.getTime() ?? Infinity);
+    }
+    const inForce = made.filter((one) => one.withdrawnAt === null);
+    expect(new Set(inForce.map((one) => one.checkId)).size).toBe(inForce.length);
+    expect([inForce.length, made.length]).toEqual([9, 10]);
+    expect(await experienceInForce(readDb())).toEqual(await countConfirmed(readDb()));
   });
 });

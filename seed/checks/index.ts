@@ -21,7 +21,7 @@ const LAST_LOOK = 20_000;
 const RUNS = runs as unknown as Readonly<Record<string, readonly Reading[]>>;
 
 /** A ULID that never changes: its time, then a number in place of chance. */
-const fixedId = (time: number, number: number): string => `${encodeTime(time, 10)}${String(number).padStart(16, "0")}`;
+export const fixedId = (time: number, number: number): string => `${encodeTime(time, 10)}${String(number).padStart(16, "0")}`;
 
 export function demoCheckId(check: DemoCheck): string {
   return fixedId(Date.parse(check.at), check.number);
