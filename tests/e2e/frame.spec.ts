@@ -82,7 +82,7 @@ test("night colours are kept in this browser and keep their contrast", async ({ 
   await page.goto("/account");
   await page.getByRole("button", { name: /^Night/ }).click();
   await expect(page.locator("html")).toHaveAttribute("data-theme", "night");
-  for (const path of ["/account", "/today", "/workshop", "/sign-in"]) {
+  for (const path of ["/account", "/today", "/checks/chances", "/workshop", "/sign-in"]) {
     await page.goto(path);
     await expect(page.locator("html")).toHaveAttribute("data-theme", "night");
     await expectAccessible(page, `${path} at night`);
