@@ -3,7 +3,7 @@
 import type { Route } from "next";
 import Link from "next/link";
 import { useActionState, useEffect, useRef } from "react";
-import { WithdrawForm } from "@/components/checks/outcome";
+import { againstVerdict, WithdrawForm } from "@/components/checks/outcome";
 import { Notice } from "@/components/ui";
 import type { ActionResult } from "@/lib/action";
 import type { ConfirmationView } from "@/lib/checks/confirmation-view";
@@ -20,7 +20,7 @@ function Item({ row, send, busy }: { readonly row: ConfirmationView; readonly se
   return (
     <li className="border-t border-quiet py-3 first:border-t-2 first:border-rule">
       <Link href={`/checks/${row.checkId}#outcome` as Route} className="link inline-flex min-h-touch items-center text-lg leading-snug font-bold">{what}</Link>
-      <p>{row.asVerdict ? "As the verdict said." : `The verdict had said: ${row.verdict}`}</p>
+      <p>{againstVerdict(row)}</p>
       <p className="max-w-prose break-words">Proved: {row.proof}</p>
       <p className="text-quiet">{kindTitle(row.kind)} · {row.machine ?? "no machine"} · {row.by} · {momentWords(row.at)}</p>
       {row.mayWithdraw ? <WithdrawForm confirmationId={row.id} what={what} send={send} busy={busy} /> : null}

@@ -1,5 +1,5 @@
 export { OutcomeBoard } from "./outcome-board";
 export { OutcomeLine } from "./outcome-line";
 export { outcomeGroups, type OutcomeGroup } from "./outcome-options";
-export { OutcomeWords } from "./outcome-words";
+export { againstVerdict, OutcomeWords } from "./outcome-words";
 export { WithdrawForm } from "./withdraw-form";

@@ -54,7 +54,7 @@ export function OutcomeBoard(props: OutcomeBoardProps) {
   const inForce = confirmations.find((one) => !one.withdrawn) ?? null;
   const place = useFocusOnChange(inForce?.id ?? "");
   return (
-    <Sheet id="outcome" title="What it turned out to be" className="scroll-mt-24">
+    <Sheet id="outcome" title="What it turned out to be">
       {withdrawn && !withdrawn.ok ? <Notice tone="stop" title={withdrawn.error.message} live="assertive" /> : null}
       <div ref={place} tabIndex={-1} className="grid gap-4 outline-none">
         {inForce ? (

@@ -63,7 +63,7 @@ export default async function ChancesPage({ searchParams }: { readonly searchPar
         <Sheet title="Findings"><ChanceList rows={chances.findings} first="Finding" /></Sheet>
         <Sheet title="Kinds of device"><ChanceList rows={chances.kinds} first="Kind" /></Sheet>
         <Sheet title="Sources"><ChanceSources sources={chances.sources} /></Sheet>
-        <Sheet title="Confirmations that shifted them" id="confirmed" className="scroll-mt-24"><Shifted page={page} before={before} /></Sheet>
+        <Sheet title="Confirmations that shifted them" id="confirmed"><Shifted page={page} before={before} /></Sheet>
       </div>
     </>
   );
