@@ -16,8 +16,10 @@ export const DROP_AMPERES = 2e-6;
  * `drop` is their sum at 2 microamperes, `junctions` how many there are (each rises 60 mV times its emission coefficient a decade of current).
  */
 export function ohmsThroughDiodes(ohms: number, drop: number, junctions: number): number {
-  let full = LOWEST_RANGE;
-  for (let k = 0; k < RANGES; k++, full *= 10) {
+  let full = LOWEST_RANGE, k = 0;
+  // A drop only adds to what is shown, so a range below the resistance itself never holds it.
+  for (; k < RANGES - 1 && full <= ohms; k++) full *= 10;
+  for (; k < RANGES; k++, full *= 10) {
     const amperes = currentThrough(full + ohms, drop, junctions);
     const shown = SOURCE_VOLTS / amperes - full;
     if (shown < full || k === RANGES - 1) return shown;

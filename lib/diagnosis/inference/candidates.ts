@@ -35,6 +35,7 @@ function runningStates(family: Family, { code, at, at2 }: FaultPlace): readonly 
   if (family === "potentiometer") return ["by-volts"];
   switch (code) {
     case "supply-missing": return ["no"];
+    case "wires-shorted": return at === SUPPLY ? ["yes", "no"] : ["by-volts"];
     case "wires-swapped": return at === SUPPLY || at2 === SUPPLY ? ["no"] : ["yes", "no"];
     case "wire-open": case "contact-open": return at === SUPPLY ? ["no"] : at === GROUND ? ["yes", "no"] : ["by-volts"];
     case "wire-resistive": return at === SIGNAL ? ["by-volts"] : ["yes", "no"];

@@ -11,7 +11,9 @@ export const TOGGLE_EFFORT = [2, 4, 1] as const;
 const READING_EFFORT = 1;
 
 /** Candidates and hypotheses looked into when a check is planned, and the belief that may be left out. */
-const MOST_CANDIDATES = 70, LEFT_OUT = 0.002;
+const MOST_CANDIDATES = 48, MOST_HYPOTHESES = 32, LEFT_OUT = 0.004;
+/** A build of a hypothesis counts when it holds this share of what the hypothesis' likeliest build does. */
+const COUNTS_FROM = 0.1;
 
 type Switches = readonly [boolean, boolean, boolean];
 
@@ -30,15 +32,17 @@ const switches = (s: MachineState): readonly (boolean | null)[] => [s.devicePart
 
 /** The believed candidates as rows of hypotheses, likeliest first, with what each expects of every check. */
 export function expectations(believed: readonly Believed[], meter: MeterSpec): { expected: Expected[]; priors: number[]; ids: string[] } {
-  const rows = new Map<string, number>(), priors: number[] = [], expected: Expected[] = [];
+  const rows = new Map<string, { row: number; from: number }>(), priors: number[] = [], expected: Expected[] = [];
   let held = 0;
   for (const b of believed) {
     if (expected.length >= MOST_CANDIDATES || held > 1 - LEFT_OUT) break;
-    const id = b.candidate.hypothesis.id, row = rows.get(id) ?? priors.length;
-    rows.set(id, row);
-    priors[row] = (priors[row] ?? 0) + b.p;
-    expected.push({ p: b.p, row, outlook: outlookOf(b, meter) });
     held += b.p;
+    const id = b.candidate.hypothesis.id, known = rows.get(id);
+    if (!known && priors.length === MOST_HYPOTHESES) continue;
+    const row = known?.row ?? priors.length;
+    if (!known) rows.set(id, { row, from: COUNTS_FROM * b.p });
+    priors[row] = (priors[row] ?? 0) + b.p;
+    if (!known || b.p >= known.from) expected.push({ p: b.p, row, outlook: outlookOf(b, meter) });
   }
   return { expected, priors, ids: [...rows.keys()] };
 }

@@ -1,7 +1,7 @@
 import { ALL_GROUPS, newPredictions, planFor, predictInto } from "../circuit/predict";
 import { PARAMETER_COUNT } from "../circuit/parameters";
 import type { MeterSpec, Reading } from "../types";
-import { physical } from "./fit";
+import { physical } from "./misfit";
 import { numberLogChance, observe, scalePrediction, wordLogChance, type Observation } from "./observe";
 import type { Believed } from "./posterior";
 import { norm } from "../numerics";

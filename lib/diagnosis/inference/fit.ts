@@ -1,11 +1,10 @@
 import type { Candidate } from "../circuit/candidate";
 import { PARAMETER_COUNT } from "../circuit/parameters";
-import { ALL_GROUPS, CHECK_COUNT, newPredictions, planFor, predictInto, type Plan, type Predictions } from "../circuit/predict";
-import type { MeterSpec } from "../types";
 import { factor, logDeterminant, solveFactored } from "./cholesky";
-import { movedBy, reachOf } from "./movable";
-import { numberLogChance, scalePrediction, strayNumberLogDensity, wordLogChance, type Observation } from "./observe";
-import { exp, ln, norm } from "../numerics";
+import { differentiate, evaluate, makeRoom, normalEquations, pullInFull, stillOpen, stuck, type Evidence } from "./misfit";
+import { movedBy } from "./movable";
+
+export { evidenceOf, physical } from "./misfit";
 
 /**
  * Joint fit of everything unknown to everything read. Parameters are measured in standard deviations of
@@ -21,135 +20,109 @@ export interface Fit {
   readonly precision: Float64Array;
 }
 
-/** Readings with what is needed to compare them: made once, used for every candidate. */
-export interface Evidence { readonly observations: readonly Observation[]; readonly plan: Plan; readonly meter: MeterSpec }
-
-/** Gathers observations with the plan of checks they need. */
-export function evidenceOf(observations: readonly Observation[], meter: MeterSpec): Evidence {
-  return { observations, plan: planFor(observations.map((o) => o.index)), meter };
-}
-
 const MAX_ITERATIONS = 9;
-const DIFFERENCE = 1e-3;
 const LONGEST_STEP = 2.5;
-/** Residuals beyond about this many standard uncertainties pull ever less. */
-const TAIL_SQUARED = 25;
-/** A fit this far below the best after a few steps is given up, natural-log units. */
-const HOPELESS = 30;
-
-const x = new Float64Array(PARAMETER_COUNT);
-const base: Predictions = newPredictions(), nudged: Predictions = newPredictions();
-const predicted = new Float64Array(CHECK_COUNT);
-
-/** Workspace that grows to the longest list of readings seen; overwritten by every fit. */
-let room = 0;
-let residual = new Float64Array(0), weight = residual, sds = residual, jacobian = residual, live = new Uint8Array(0);
-
-function makeRoom(observations: number): void {
-  if (observations <= room) return;
-  room = observations + 16;
-  residual = new Float64Array(room); weight = new Float64Array(room); sds = new Float64Array(room);
-  jacobian = new Float64Array(room * PARAMETER_COUNT); live = new Uint8Array(room);
-}
-
-function physicalAt(c: Candidate, i: number, z: number): number {
-  const v = c.ranges.mean[i]! + c.ranges.sd[i]! * z;
-  return c.ranges.log[i] ? exp(v) : v;
-}
-
-/** Physical values at z, written into `out`. */
-export function physical(c: Candidate, z: Float64Array, out: Float64Array): Float64Array {
-  out.set(c.middle);
-  for (let i = 0; i < PARAMETER_COUNT; i++) if (z[i] !== 0) out[i] = physicalAt(c, i, z[i]!);
-  return out;
-}
-
-/** Log-posterior density at z up to the integral; leaves residuals, weights and scaled predictions in the workspace. */
-function evaluate(c: Candidate, z: Float64Array, e: Evidence): number {
-  base.logState = 0; base.idle = false;
-  predictInto(c, physical(c, z, x), e.plan, ALL_GROUPS, base);
-  let log = base.logState;
-  for (let i = 0; i < PARAMETER_COUNT; i++) log -= 0.5 * z[i]! * z[i]!;
-  for (let i = 0; i < e.observations.length; i++) log += compare(e.observations[i]!, i, e.meter);
-  return log;
-}
-
-function compare(o: Observation, i: number, meter: MeterSpec): number {
-  live[i] = 0;
-  if (o.word !== null) return wordLogChance(o, base);
-  const shown = numberLogChance(o, base);
-  if (shown === null) return strayNumberLogDensity();
-  const slack = base.slack[o.index]!, sd = slack === 0 ? o.sd : norm(o.sd, slack);
-  predicted[o.index] = scalePrediction(o.spec, base.value[o.index]!, meter);
-  const r = (o.scaled - predicted[o.index]!) / sd, spread = 1 + r * r / TAIL_SQUARED;
-  live[i] = 1; residual[i] = r; sds[i] = sd; weight[i] = 1 / spread;
-  return shown + o.logPeak - (slack === 0 ? 0 : ln(sd / o.sd)) - 0.5 * TAIL_SQUARED * ln(spread);
-}
-
-/** Derivatives of the scaled predictions by z, over sd, by forward differences at the point last evaluated. */
-function differentiate(c: Candidate, z: Float64Array, movable: readonly number[], e: Evidence): void {
-  const m = movable.length, n = e.observations.length;
-  physical(c, z, x);
-  for (let k = 0; k < m; k++) {
-    const p = movable[k]!, kept = x[p]!, reach = reachOf(c, p, base.idle);
-    x[p] = physicalAt(c, p, z[p]! + DIFFERENCE);
-    predictInto(c, x, e.plan, reach, nudged);
-    x[p] = kept;
-    for (let i = 0; i < n; i++) {
-      const o = e.observations[i]!;
-      jacobian[i * m + k] = live[i] && o.group & reach ? (scalePrediction(o.spec, nudged.value[o.index]!, e.meter) - predicted[o.index]!) / (DIFFERENCE * sds[i]!) : 0;
-    }
-  }
-}
-
-/** Precision matrix I + J'WJ and gradient J'Wr - z. */
-function normalEquations(z: Float64Array, movable: readonly number[], n: number, precision: Float64Array, gradient: Float64Array): void {
-  const m = movable.length;
-  precision.fill(0);
-  for (let a = 0; a < m; a++) { precision[a * m + a] = 1; gradient[a] = -z[movable[a]!]!; }
-  for (let i = 0; i < n; i++) {
-    if (!live[i]) continue;
-    for (let a = 0; a < m; a++) {
-      const ja = jacobian[i * m + a]! * weight[i]!;
-      if (ja === 0) continue;
-      gradient[a]! += ja * residual[i]!;
-      for (let b = 0; b <= a; b++) precision[a * m + b]! += ja * jacobian[i * m + b]!;
-    }
-  }
-}
+/** Steps made with every residual pulling in full, so that a start far off does not leave a reading for lost. */
+const FULL_PULL_STEPS = 4;
+/** A fit is given up when this many times what its next step promises, and a little more, would not be enough. */
+const TRUST = 6, MARGIN = 8;
+const MIDDLE = new Float64Array(PARAMETER_COUNT);
 
 /**
- * Fits one candidate. `start` is a first guess of z (not changed); `toBeat` is the log-density a fit has to come
- * near to be worth finishing (-Infinity: always). Same input, same result, to the last bit.
+ * Fits one candidate. `start` is a first guess of z (not changed); `least` is the log-evidence below which the candidate
+ * does not matter: its fit is given up as soon as it cannot get there. Same input, same result, to the last bit.
  */
-export function fitCandidate(c: Candidate, e: Evidence, start: Float64Array, toBeat = -Infinity): Fit {
+export function fitCandidate(c: Candidate, e: Evidence, start: Float64Array, least = -Infinity): Fit {
   makeRoom(e.observations.length);
+  const log = evaluate(c, start, e);
+  if (log + stillOpen() < least) return givenUp(start);
+  if (!stuck(e)) return climb(c, e, start, log, least);
+  const near = pulledIn(c, e, start);
+  const fit = climb(c, e, near, evaluate(c, near, e), least);
+  if (fit.logEvidence === -Infinity || !stuck(e)) return fit;
+  return betterOf(fit, climb(c, e, start, log, Math.max(least, fit.logEvidence)), () => start.every((v) => v === 0) ? fit : afresh(c, e, Math.max(least, fit.logEvidence)));
+}
+
+/** The better of two fits, or a third where both leave a number unexplained. */
+function betterOf(a: Fit, b: Fit, third: () => Fit): Fit {
+  const better = b.logEvidence > a.logEvidence ? b : a, last = third();
+  return last.logEvidence > better.logEvidence ? last : better;
+}
+
+/** A climb from the middle of every range. */
+function afresh(c: Candidate, e: Evidence, least: number): Fit {
+  return climb(c, e, MIDDLE, evaluate(c, MIDDLE, e), least);
+}
+
+/** A start from which no residual is out of reach: some steps with every residual pulling in full. */
+function pulledIn(c: Candidate, e: Evidence, start: Float64Array): Float64Array {
+  pullInFull(true);
+  const w = workFor(c, e, start);
+  let log = evaluate(c, w.z, e);
+  for (let step = 0; step < FULL_PULL_STEPS; step++) {
+    newtonStep(c, e, w, step > 0);
+    const better = lineSearch(c, w, e, log);
+    if (better - log < 1) break;
+    log = better;
+  }
+  pullInFull(false);
+  return w.z;
+}
+
+/** What one climb works on. */
+interface Work { readonly z: Float64Array; readonly movable: readonly number[]; readonly precision: Float64Array; readonly gradient: Float64Array; readonly step: Float64Array; readonly trial: Float64Array }
+
+function workFor(c: Candidate, e: Evidence, start: Float64Array): Work {
   const movable = movedBy(c, e.plan.groups), m = movable.length;
-  const z = Float64Array.from(start), precision = new Float64Array(m * m), step = new Float64Array(m), trial = new Float64Array(PARAMETER_COUNT);
-  let log = evaluate(c, z, e);
-  for (let iteration = 0; ; iteration++) {
-    differentiate(c, z, movable, e);
-    normalEquations(z, movable, e.observations.length, precision, step);
-    factor(precision, m);
-    if (iteration === MAX_ITERATIONS || (iteration >= 3 && log < toBeat - HOPELESS)) break;
-    solveFactored(precision, m, step);
-    const better = lineSearch(c, z, movable, step, trial, e, log), gained = better - log;
+  return { z: Float64Array.from(start), movable, precision: new Float64Array(m * m), gradient: new Float64Array(m), step: new Float64Array(m), trial: new Float64Array(PARAMETER_COUNT) };
+}
+
+/** Gauss-Newton step from z and the factor of the precision there. */
+function newtonStep(c: Candidate, e: Evidence, w: Work, again: boolean): void {
+  differentiate(c, w.z, w.movable, e, again);
+  normalEquations(w.z, w.movable, e.observations.length, w.precision, w.gradient);
+  factor(w.precision, w.movable.length);
+  w.step.set(w.gradient);
+  solveFactored(w.precision, w.movable.length, w.step);
+}
+
+function climb(c: Candidate, e: Evidence, start: Float64Array, from: number, least: number): Fit {
+  const w = workFor(c, e, start);
+  let log = from;
+  // The last evaluation may have been elsewhere; residuals and weights have to be those of the start.
+  evaluate(c, w.z, e);
+  for (let iteration = 0, gained = Infinity; ; iteration++) {
+    newtonStep(c, e, w, iteration > 0);
+    if (iteration === MAX_ITERATIONS) break;
+    if (log + TRUST * Math.max(gained, promised(w.gradient, w.step)) + MARGIN < least) return givenUp(w.z);
+    const better = lineSearch(c, w, e, log);
+    gained = better - log;
     log = Math.max(log, better);
     if (gained < 0.02) break;
   }
-  return { logEvidence: log - 0.5 * logDeterminant(precision, m), z, active: movable, precision };
+  return { logEvidence: log - 0.5 * logDeterminant(w.precision, w.movable.length), z: w.z, active: w.movable, precision: w.precision };
+}
+
+const givenUp = (z: Float64Array): Fit => ({ logEvidence: -Infinity, z, active: [], precision: NOTHING });
+const NOTHING = new Float64Array(0);
+
+/** Gain of a step in the quadratic model of the misfit, natural-log units. */
+function promised(gradient: Float64Array, step: Float64Array): number {
+  let sum = 0;
+  for (let k = 0; k < step.length; k++) sum += gradient[k]! * step[k]!;
+  return 0.5 * sum;
 }
 
 /** Halves the step until the fit improves; moves z when it does. Returns the log-density reached, -Infinity if none. */
-function lineSearch(c: Candidate, z: Float64Array, movable: readonly number[], step: Float64Array, trial: Float64Array, e: Evidence, from: number): number {
+function lineSearch(c: Candidate, w: Work, e: Evidence, from: number): number {
   let longest = 0;
-  for (const s of step) longest = Math.max(longest, Math.abs(s));
+  for (const s of w.step) longest = Math.max(longest, Math.abs(s));
   let share = longest > LONGEST_STEP ? LONGEST_STEP / longest : 1;
   for (let half = 0; half < 4; half++, share /= 2) {
-    trial.set(z);
-    for (let k = 0; k < movable.length; k++) trial[movable[k]!]! += share * step[k]!;
-    const log = evaluate(c, trial, e);
-    if (log > from) { z.set(trial); return log; }
+    w.trial.set(w.z);
+    for (let k = 0; k < w.movable.length; k++) w.trial[w.movable[k]!]! += share * w.step[k]!;
+    const log = evaluate(c, w.trial, e);
+    if (log > from) { w.z.set(w.trial); return log; }
   }
   return -Infinity;
 }

@@ -5,7 +5,7 @@ import { exp } from "../numerics";
 /** One believed candidate's share and what it expects; `row` is the hypothesis it counts towards. */
 export interface Expected { readonly p: number; readonly row: number; readonly outlook: Outlook }
 
-const MOST_EDGES = 12;
+const MOST_EDGES = 8;
 /** Share of readings that fall anywhere at all: slips of lead, eye and finger (common practice: a few in a thousand). */
 const STRAY = 0.004;
 /** The logistic curve that stays within 0.01 of the normal distribution. */

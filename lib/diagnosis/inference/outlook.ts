@@ -3,7 +3,7 @@ import { PARAMETER_COUNT } from "../circuit/parameters";
 import { ALL_CHECKS } from "../checks";
 import type { MeterSpec } from "../types";
 import { forward } from "./cholesky";
-import { physical } from "./fit";
+import { physical } from "./misfit";
 import { movedBy, reachOf } from "./movable";
 import { scaledSd, scalePrediction, unscale } from "./observe";
 import type { Believed } from "./posterior";

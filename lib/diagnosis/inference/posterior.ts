@@ -2,15 +2,16 @@ import type { Candidate } from "../circuit/candidate";
 import { PARAMETER_COUNT } from "../circuit/parameters";
 import { GROUP } from "../circuit/predict";
 import type { MeterSpec } from "../types";
-import { evidenceOf, fitCandidate, type Evidence, type Fit } from "./fit";
+import { fitCandidate, type Fit } from "./fit";
+import { evidenceOf, type Evidence } from "./misfit";
 import type { Observation } from "./observe";
 import { exp } from "../numerics";
 
 /** A candidate with its fit and its share of the belief. */
 export interface Believed { readonly candidate: Candidate; readonly fit: Fit; readonly logWeight: number; p: number }
 
-/** Candidates this far (in natural-log units) behind the best are left out: less than one in a million. */
-const CUT = 14;
+/** Candidates this far (in natural-log units) behind the best are left out: less than one in twenty thousand. */
+const CUT = 10;
 const HARNESS = GROUP.cold | GROUP.live | GROUP.wires;
 const ZERO = new Float64Array(PARAMETER_COUNT);
 const NO_FIT: Fit = { logEvidence: 0, z: ZERO, active: [], precision: new Float64Array(0) };
@@ -38,7 +39,7 @@ interface Block { readonly device: Fit; readonly members: readonly Candidate[]; 
  * everything jointly, best bound first.
  */
 export function believe(candidates: readonly Candidate[], obs: readonly Observation[], meter: MeterSpec): Believed[] {
-  const parts = partsOf(obs, meter), harnessFits = new Map<string, Fit>(), out: Believed[] = [];
+  const parts = partsOf(obs, meter), harnessFits: HarnessFits = new Map(), out: Believed[] = [];
   let best = -Infinity;
   for (const block of blocksOf(candidates, parts)) {
     if (block.bound < best - CUT) break;
@@ -61,17 +62,17 @@ function blocksOf(candidates: readonly Candidate[], parts: Parts): Block[] {
   return blocks.sort((a, b) => b.bound - a.bound || byId(a.members[0]!, b.members[0]!));
 }
 
-function blockBelief(block: Block, parts: Parts, harnessFits: Map<string, Fit>, toBeat: number): Believed[] {
+function blockBelief(block: Block, parts: Parts, harnessFits: HarnessFits, toBeat: number): Believed[] {
   const scored = block.members.map((candidate) => {
     const apart = candidate.logPrior + block.device.logEvidence + parts.matedPeak;
-    const harness = harnessFit(harnessFits, candidate, parts.harness, toBeat - apart);
+    const harness = harnessFit(harnessFits, candidate, parts.harness, toBeat - CUT - apart);
     return { candidate, harness, bound: apart + harness.logEvidence };
   }).sort((a, b) => b.bound - a.bound || byId(a.candidate, b.candidate));
   const out: Believed[] = [];
   let best = toBeat;
   for (const { candidate, harness, bound } of scored) {
     if (bound < best - CUT) break;
-    const fit = parts.joint ? fitCandidate(candidate, parts.all, startOf(block.device, harness), best - candidate.logPrior) : together(block.device, harness);
+    const fit = parts.joint ? fitCandidate(candidate, parts.all, startOf(block.device, harness), best - CUT - candidate.logPrior) : together(block.device, harness);
     const logWeight = candidate.logPrior + fit.logEvidence;
     best = Math.max(best, logWeight);
     out.push({ candidate, fit, logWeight, p: 0 });
@@ -79,11 +80,14 @@ function blockBelief(block: Block, parts: Parts, harnessFits: Map<string, Fit>, 
   return out;
 }
 
-function harnessFit(cache: Map<string, Fit>, c: Candidate, evidence: Evidence, toBeat: number): Fit {
+/** Fits of the harness readings by what they hang on, each with the evidence it was asked to reach. */
+type HarnessFits = Map<string, { readonly fit: Fit; readonly least: number }>;
+
+function harnessFit(cache: HarnessFits, c: Candidate, evidence: Evidence, least: number): Fit {
   if (evidence.observations.length === 0) return NO_FIT;
-  let fit = cache.get(c.harnessKey);
-  if (!fit) cache.set(c.harnessKey, fit = fitCandidate(c, evidence, ZERO, toBeat));
-  return fit;
+  let known = cache.get(c.harnessKey);
+  if (!known || (known.fit.logEvidence === -Infinity && least < known.least)) cache.set(c.harnessKey, known = { fit: fitCandidate(c, evidence, ZERO, least), least });
+  return known.fit;
 }
 
 const byId = (a: Candidate, b: Candidate) => (a.hypothesis.id < b.hypothesis.id ? -1 : 1);

@@ -119,19 +119,4 @@ describe("planNext", () => {
     expect(() => optimalCost({ priors: [1, 1], tests: [{ id: "a", cost: 1, outcomes: [[0.5, 0.5], [0, 1]] }] })).toThrow(RangeError);
     expect(() => optimalCost({ priors: new Array<number>(21).fill(1), tests: [] })).toThrow(RangeError);
   });
-
-  it("is quick enough to be asked after every reading: 60 hypotheses, 60 tests, 6 outcomes", () => {
-    const problem: PlanProblem = {
-      priors: Array.from({ length: 60 }, (_, h) => 1 + (h % 7)),
-      tests: Array.from({ length: 60 }, (_, t) => ({ id: `t${t}`, cost: 1, outcomes: Array.from({ length: 60 }, (__, h) => {
-        const weights = Array.from({ length: 6 }, (___, o) => 1 + ((h * 7 + t * 13 + o * h * 5) % 11) ** 3);
-        const total = weights.reduce((sum, weight) => sum + weight, 0);
-        return weights.map((weight) => weight / total);
-      }) })),
-    };
-    planNext(problem);
-    const before = performance.now();
-    for (let i = 0; i < 5; i += 1) planNext(problem);
-    expect((performance.now() - before) / 5).toBeLessThan(50);
-  });
 });
