@@ -51,7 +51,7 @@ describe("making slips", () => {
   it.each([
     ["times-10", "volt:mated:1-gnd@rest", 50.2], ["times-1000", "res:device:1-2@full", 4_700_000], ["by-10", "res:device:1-2@full", 470],
     ["leads-exchanged", "res:device:1-2@full", 4710], ["leads-exchanged", "volt:harness:1-2", -5], ["leads-exchanged", "volt:mated:1-gnd@rest", null],
-    ["sign-lost", "volt:mated:1-gnd@rest", -5.02], ["sign-lost", "res:device:1-2@full", null], ["pin-beside", "res:device:1-2@full", "OL"], ["times-10", "sweep:mated:1", null],
+    ["sign-lost", "volt:mated:1-gnd@rest", -5.02], ["sign-lost", "res:device:1-2@full", null], ["pin-beside", "res:device:1-2@full", "OL"], ["times-10", "sweep:mated:1", null], ["pin-beside", "volt:harness:1-2", null],
   ] as const)("%s at %s gives %s", (kind, check, value) => {
     expect(slipped(kind, check, readings, draw)).toBe(value);
   });

@@ -32,15 +32,15 @@ export interface SlipRun {
 type Standing = Exclude<Assessment, { state: "invalid-input" }>;
 
 const SURE = 0.95;
-const other = (code: string, from: string, to: string) => code.replace(/(?<=:)[^:@]+(?=@|$)/, (pins) => pins.split("-").map((p) => (p === from ? to : p === to ? from : p)).join("-"));
+/** The check with the red lead on another pin. */
+const redOn = (code: string, pin: number) => code.replace(/(?<=:)[123](?=[-@]|$)/, String(pin));
 
 /** Value that a slip puts in place of the right one; null where this slip cannot be made at this check. */
 export function slipped(kind: SlipKind, check: string, readings: BenchCase["readings"], draw: () => number): ReadingValue | null {
   const right = readings[check]!, spec = parseCheck(check)!;
   if (kind === "pin-beside") {
     if (typeof spec.red !== "number") return null;
-    const pins = [1, 2, 3].filter((p) => p !== spec.red).map((p) => other(check, String(spec.red), String(p)));
-    const beside = pins.filter((c) => readings[c] !== undefined && c !== check);
+    const beside = [1, 2, 3].filter((pin) => pin !== spec.red && pin !== spec.black).map((pin) => redOn(check, pin)).filter((c) => readings[c] !== undefined);
     return beside.length === 0 ? null : readings[beside[Math.floor(draw() * beside.length)]!]!;
   }
   if (kind === "leads-exchanged") {
