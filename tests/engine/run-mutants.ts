@@ -1,7 +1,7 @@
 // npm run mutants: makes one mistake after another in a copy of the engine and says which of them the fast engine tests catch.
 // A word as argument takes only the mistakes with that word in their name or file.
 import { spawnSync } from "node:child_process";
-import { cpSync, mkdtempSync, readFileSync, rmSync, symlinkSync, writeFileSync } from "node:fs";
+import { cpSync, existsSync, mkdtempSync, readFileSync, rmSync, symlinkSync, writeFileSync } from "node:fs";
 import { tmpdir } from "node:os";
 import path from "node:path";
 import { fileURLToPath } from "node:url";
@@ -12,7 +12,7 @@ const ROOT = fileURLToPath(new URL("../..", import.meta.url));
 const CIRCUIT = ["tests/published-values/checks-against-spice", "tests/published-values/mated-against-spice", "tests/published-values/network-against-spice", "tests/engine/worked-cases"];
 const JUDGEMENT = ["tests/published-values/bench-meter", "tests/engine/worked-cases", "tests/engine/contradictory", "tests/engine/bayes-by-hand", "tests/engine/oracle", "tests/engine/proposals"];
 const testsFor = (file: string) => (/\/(circuit|network)\//.test(file) ? CIRCUIT : JUDGEMENT);
-const SLOWEST_MS = 300_000;
+const SLOWEST_MS = 600_000;
 
 function copy(): string {
   const folder = mkdtempSync(path.join(tmpdir(), "pinwright-mutants-"));
@@ -21,12 +21,20 @@ function copy(): string {
   return folder;
 }
 
+interface Report { readonly testResults: readonly { readonly name: string; readonly assertionResults: readonly { readonly status: string; readonly title: string }[] }[] }
+
 /** The first test that fails, or null when all pass. */
 function firstFailure(folder: string, tests: readonly string[]): string | null {
-  const { status, stdout } = spawnSync(process.execPath, [path.join(ROOT, "node_modules/vitest/vitest.mjs"), "run", ...tests, "--bail=1", "--reporter=tap-flat"], { cwd: folder, encoding: "utf8", timeout: SLOWEST_MS });
+  const report = path.join(folder, "report.json");
+  rmSync(report, { force: true });
+  const { status } = spawnSync(process.execPath, [path.join(ROOT, "node_modules/vitest/vitest.mjs"), "run", ...tests, "--bail=1", "--reporter=json", `--outputFile=${report}`], { cwd: folder, timeout: SLOWEST_MS, stdio: "ignore" });
   if (status === 0) return null;
-  const line = stdout.split("\n").find((l) => l.startsWith("not ok"));
-  return line ? line.replace(/^not ok \d+ - /, "").replace(/ # time.*$/, "") : status === null ? "does not end" : "does not load";
+  if (status === null || !existsSync(report)) return "does not end";
+  for (const { name, assertionResults } of (JSON.parse(readFileSync(report, "utf8")) as Report).testResults) {
+    const failed = assertionResults.find((one) => one.status === "failed");
+    if (failed) return `${path.basename(name, ".test.ts")}: ${failed.title}`;
+  }
+  return "does not load";
 }
 
 function caughtBy(folder: string, { file, search, replace }: Mutation): string | null {

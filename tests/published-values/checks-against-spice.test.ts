@@ -1,6 +1,7 @@
 import { beforeAll, describe, expect, it } from "vitest";
 import { meterLimit, vocabulary, type CheckSpec } from "@/lib/diagnosis";
-import { CHECK_INDEX } from "@/lib/diagnosis/circuit/predict";
+import { P } from "@/lib/diagnosis/circuit/parameters";
+import { ALL_GROUPS, CHECK_INDEX, newPredictions, predictInto, WHOLE_PLAN } from "@/lib/diagnosis/circuit/predict";
 import { drawer } from "../support/draw";
 import { autoranged, deviceProbes, STRAIGHT, straightProbe, voltsAt, type Probe } from "../engine/spice-checks";
 import { drawCircuit, everyBuild, type DrawnCircuit } from "../engine/drawn-circuits";
@@ -52,6 +53,17 @@ describe("straight checks of every build against SPICE", () => {
       const probe = probes.get(key(k, check))!, across = voltsAt(probe, volts);
       agrees(check, c, [check.unit === "ohm" ? ohmsShown(across, probe.range) : across]);
     });
+  });
+});
+
+describe("the end of the ohms ranges", () => {
+  // Source: README of the bench, a meter that shows ohms up to 60 megohm; an open collector's leak is all that the meter sees there.
+  it.each([[30e6, 0], [55e6, 0], [70e6, 1], [100e6, 1]] as const)("a leak of %d ohm is OL with chance %d", (ohms, chance) => {
+    const { candidate, x, roleOf } = drawCircuit(everyBuild().find(({ family, code }) => family === "open-collector" && code === "none")!, draw), p = newPredictions();
+    const pin = (role: number) => [1, 2, 3].find((n) => roleOf(n) === role)!;
+    x[P.leak] = ohms;
+    predictInto(candidate, x, WHOLE_PLAN, ALL_GROUPS, p);
+    expect(p.word[CHECK_INDEX.get(`res:device:${pin(2)}-${pin(1)}@rest`)!]).toBeCloseTo(chance, 1);
   });
 });
 
