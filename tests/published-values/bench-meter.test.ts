@@ -1,4 +1,5 @@
 import { describe, expect, it } from "vitest";
+import { predict } from "@/lib/diagnosis";
 import { DEFAULT_METER, meterLimit, resolutionAt, standardUncertainty } from "@/lib/diagnosis/meter";
 
 describe("the engine's meter: percent of reading plus counts", () => {
@@ -28,5 +29,10 @@ describe("the engine's meter: percent of reading plus counts", () => {
   it("takes a limit as rectangular: u = a/√3 (JCGM 100:2008, 4.3.7, from memory)", () => {
     expect(standardUncertainty(24.5)).toBeCloseTo(14.15, 2);
     expect(standardUncertainty(0.027)).toBeCloseTo(0.01559, 5);
+  });
+
+  it("expects the leads' own ohms in every reading: half an ohm more of leads, half an ohm more shown (two resistances in series, computed)", () => {
+    const middle = (leadOhms: number, check: string) => predict({ pins: ["1", "2", "3"], meter: { ...DEFAULT_METER, ohms: { ...DEFAULT_METER.ohms, leadOhms } } }, [], { code: "none" }, check)?.number?.middle ?? NaN;
+    for (const check of ["res:wire:1", "res:wire:3"]) expect(middle(0.5, check) - middle(0, check)).toBeCloseTo(0.5, 6);
   });
 });
