@@ -43,14 +43,14 @@ describe("laws of the standing", SLOW, () => {
     holds((seed) => {
       const { draw, setup, readings } = drawn(seed);
       expect(belief(standing(setup, shuffled(readings, draw)))).toStrictEqual(belief(standing(setup, readings)));
-    }, 25);
+    }, 15);
   });
 
   it("with the machine's state told, proposes the same in any order too", () => {
     holds((seed) => {
       const { draw, setup, readings } = drawn(seed), told: Setup = { ...setup, state: { deviceParted: true, controllerParted: false, powerOn: draw() < 0.5 } };
       expect(standing(told, shuffled(readings, draw))).toStrictEqual(standing(told, readings));
-    }, 12);
+    }, 8);
   });
 
   it("says the same again to the last bit, whatever was asked in between", () => {
@@ -62,14 +62,14 @@ describe("laws of the standing", SLOW, () => {
   });
 
   it("has chances from 0 to 1 that sum to 1, likeliest first, and open findings of 95 % or more", () => {
-    holds((seed) => { const { setup, readings } = drawn(seed, 20); expectSound(standing(setup, readings)); }, 25);
+    holds((seed) => { const { setup, readings } = drawn(seed, 20); expectSound(standing(setup, readings)); }, 15);
   });
 
   it("holds for readings that mean nothing: nothing thrown, nothing infinite", () => {
     holds((seed) => {
       const draw = drawer(seed), setup = drawSetup(draw, draw() < 0.5);
       expectSound(standing(setup, nonsense(1 + Math.floor(draw() * 12), draw)));
-    }, 30);
+    }, 20);
   });
 
   it("gives the same answer under other pin numbers when the pins are numbered anew", () => {
@@ -80,6 +80,6 @@ describe("laws of the standing", SLOW, () => {
       for (const f of a.faults) expect(Math.abs(f.p - (faults.get(faultKey(renameFault(f, renaming))) ?? 0)), JSON.stringify(f)).toBeLessThan(1e-9);
       for (const p of a.pins) { const { supply, ground, signal } = renamePins(p, renaming); expect(Math.abs(p.p - (pins.get(`${supply}${ground}${signal}`) ?? 0))).toBeLessThan(1e-9); }
       for (const k of a.kinds) expect(Math.abs(k.p - b.kinds.find((other) => other.kind === k.kind)!.p)).toBeLessThan(1e-9);
-    }, 25);
+    }, 15);
   });
 });

@@ -57,7 +57,7 @@ export const MUTATIONS: readonly Mutation[] = [
     ["grips read as loose", 'case "grips": return logChance(1 - word);', 'case "grips": return logChance(word);'],
     ["volts trusted a hundredfold too little", "norm(u, MODEL_VOLTS, MODEL_VOLT_SHARE * value)", "norm(100 * u, MODEL_VOLTS, MODEL_VOLT_SHARE * value)"]),
   ...inFile("inference/fit.ts",
-    ["width of the fit left out", "- 0.5 * logDeterminant(precision, m)", "- 0 * logDeterminant(precision, m)"]),
+    ["width of the fit left out", "- 0.5 * logDeterminant(", "- 0 * logDeterminant("]),
   ...inFile("inference/posterior.ts",
     ["prior left out", "const logWeight = candidate.logPrior + fit.logEvidence;", "const logWeight = fit.logEvidence;"]),
   ...inFile("inference/contradiction.ts",
