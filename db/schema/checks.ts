@@ -1,6 +1,6 @@
 import { index, integer, real, sqliteTable, text } from "drizzle-orm/sqlite-core";
 import type { RunSetup, RunStep } from "../../lib/checks/run";
-import type { Verdict } from "../../lib/checks/verdict";
+import type { StoredVerdict } from "../../lib/checks/stored-verdict";
 import { entries, entryVersions } from "./catalogue";
 import { machines, meters } from "./machines";
 import { people } from "./people";
@@ -19,7 +19,7 @@ export const checks = sqliteTable("checks", {
   startedAt: integer("started_at", { mode: "timestamp_ms" }).notNull(),
   finishedAt: integer("finished_at", { mode: "timestamp_ms" }),
   /** Computed on the server at finish; null while running. */
-  verdict: text("verdict", { mode: "json" }).$type<Verdict>(),
+  verdict: text("verdict", { mode: "json" }).$type<StoredVerdict>(),
   /** Copied out of the verdict for the log's filters. */
   kind: text("kind"),
   findingCode: text("finding_code"),

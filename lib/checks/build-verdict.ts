@@ -1,4 +1,4 @@
-import type { Assessment, EvidenceRow, Fault, FaultChance, NextCheck, Standing } from "@/lib/diagnosis";
+import { faultId, type Assessment, type Explanation, type Fault, type FaultChance, type NextCheck, type Standing } from "@/lib/diagnosis";
 import { adviceFor, cautionsFor } from "./advice";
 import type { Labels } from "./check-name";
 import type { FindingAdvice, Verdict } from "./verdict";
@@ -7,14 +7,16 @@ import { shortVerdict, SURE, verdictSentence } from "./verdict-sentence";
 /** More findings than this are listed with their chances but get no advice of their own. */
 const MAX_ADVICE = 4;
 const MAX_TELL_APART = 3;
+/** More open findings than this are listed with their chances, but their evidence is not kept. */
+const MAX_EXPLAINED = 6;
 /** A rival below this chance is not set against "sound" in the evidence table. */
 const RIVAL_FLOOR = 0.0005;
 
 export interface VerdictInput {
   readonly labels: Labels;
   readonly assessment: Exclude<Assessment, { state: "invalid-input" }>;
-  /** Rows for `evidenceFindingOf(assessment)`. */
-  readonly evidence: readonly EvidenceRow[];
+  /** Evidence for each of `explainedFindings(assessment)`, and what carries the verdict. */
+  readonly explanation: Explanation;
   /** Checks of the whole vocabulary, skipped ones too, that would tell the open findings apart; best first. */
   readonly tellApart: readonly Pick<NextCheck, "check" | "why">[];
   readonly engineVersion: string;
@@ -24,7 +26,17 @@ export interface VerdictInput {
 export function evidenceFindingOf(standing: Pick<Standing, "faults">): Fault | null {
   const best = standing.faults.find((fault) => fault.code !== "none" && fault.p >= RIVAL_FLOOR);
   if (!best) return null;
-  return best.pins ? { code: best.code, pins: best.pins } : { code: best.code };
+  return bare(best);
+}
+
+const bare = ({ code, pins }: Fault): Fault => (pins ? { code, pins } : { code });
+
+/** The findings whose evidence is kept with the verdict: those still open, the best that is not "none", and "none"; likeliest first. */
+export function explainedFindings(standing: Pick<Standing, "faults" | "openFindings">): readonly Fault[] {
+  const rival = evidenceFindingOf(standing);
+  const wanted = new Map([...standing.openFindings.slice(0, MAX_EXPLAINED).map(bare), ...(rival ? [rival] : []), { code: "none" } as const].map((fault) => [faultId(fault), fault]));
+  const place = (fault: Fault) => { const at = standing.faults.findIndex((f) => faultId(f) === faultId(fault)); return at < 0 ? Infinity : at; };
+  return [...wanted.values()].sort((a, b) => place(a) - place(b));
 }
 
 function adviceOf(open: readonly FaultChance[], labels: Labels): FindingAdvice[] {
@@ -35,13 +47,14 @@ function adviceOf(open: readonly FaultChance[], labels: Labels): FindingAdvice[]
  * Turns an assessment into what is shown, printed and stored. Pure: no clock, no chance.
  * A contradictory set of readings gets no advice on repairs, only the readings to take again.
  */
-export function buildVerdict({ labels, assessment, evidence, tellApart, engineVersion }: VerdictInput): Verdict {
+export function buildVerdict({ labels, assessment, explanation, tellApart, engineVersion }: VerdictInput): Verdict {
   const contradictory = assessment.state === "contradictory";
   const suspects = contradictory ? assessment.suspects : [];
   const open = assessment.openFindings;
   const settledKind = assessment.kinds[0] && assessment.kinds[0].p >= SURE ? assessment.kinds[0].kind : null;
   // By the whole vocabulary: a check that could not be made here would still tell them apart elsewhere.
   const inseparable = open.length > 1 && tellApart.length === 0;
+  const evidenceFinding = evidenceFindingOf(assessment), shown = faultId(evidenceFinding ?? { code: "none" });
   return {
     sentence: verdictSentence({ ...assessment, inseparable }, labels, contradictory ? suspects : null),
     short: shortVerdict(open, labels, contradictory),
@@ -54,8 +67,10 @@ export function buildVerdict({ labels, assessment, evidence, tellApart, engineVe
     contradictory,
     suspects,
     tellApart: open.length > 1 ? tellApart.slice(0, MAX_TELL_APART).map(({ check, why }) => ({ check, why })) : [],
-    evidence,
-    evidenceFinding: evidenceFindingOf(assessment),
+    evidence: explanation.evidence.find(({ finding }) => faultId(finding) === shown)?.rows ?? [],
+    evidenceFinding,
+    explained: explanation.evidence,
+    carrying: explanation.carrying,
     advice: contradictory ? [] : adviceOf(open, labels),
     cautions: cautionsFor(settledKind),
     engineVersion,

@@ -9,9 +9,10 @@ import { parseInput } from "@/lib/parse";
 import { recordAudit } from "@/lib/people/record-audit";
 import { assertRunning, ownCheck, stepsOf } from "./check-rows";
 import { sameExperience } from "./experience";
-import { judge } from "./judge";
+import { judgeInSlices } from "./judge";
 import { finishCheckSchema } from "./schemas";
 import { standingDifference } from "./standing-difference";
+import { readVerdict } from "./stored-verdict";
 import type { Verdict } from "./verdict";
 import { verdictColumns } from "./verdict-columns";
 
@@ -33,16 +34,18 @@ export async function finishCheck(person: Person, checkId: string, input: unknow
   assertPermission(person, "check:run");
   const { standing, experience } = parseInput(finishCheckSchema, input);
   const before = await ownCheck(readDb(), person, checkId);
-  if (before.verdict) return { id: checkId, verdict: before.verdict };
+  const kept = readVerdict(before.verdict);
+  if (kept) return { id: checkId, verdict: kept };
   assertRunning(before);
   const steps = await stepsOf(readDb(), checkId);
-  const { assessment, verdict } = judge({ setup: before.setup, steps });
+  const { assessment, verdict } = await judgeInSlices({ setup: before.setup, steps });
   // A phone that counted in other checks than the server (see startCheck) has to believe something else: no defect.
   const comparable = sameExperience(experience, before.setup.experience);
   const difference = standing && comparable ? standingDifference(assessment, standing) : [];
   return transact(async (tx) => {
     const check = await ownCheck(tx, person, checkId);
-    if (check.verdict) return { id: checkId, verdict: check.verdict };
+    const made = readVerdict(check.verdict);
+    if (made) return { id: checkId, verdict: made };
     assertRunning(check);
     if ((await stepsOf(tx, checkId)).length !== steps.length) throw new AppError("check-changed", "Another reading came in meanwhile. Finish again.", 409);
     await tx.update(checks).set({ state: "finished", finishedAt: now, ...verdictColumns(verdict) }).where(eq(checks.id, checkId));

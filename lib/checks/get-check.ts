@@ -5,6 +5,7 @@ import { checks, entries, entryVersions, machines, meters, people } from "@/db/s
 import { assertPermission, type Person } from "@/lib/auth/permissions";
 import { stepsOf, visibleCheck, visibleTo } from "./check-rows";
 import type { CheckView } from "./check-view";
+import { readVerdict } from "./stored-verdict";
 
 async function namesOf(check: typeof checks.$inferSelect) {
   const [row] = await readDb().select({
@@ -33,7 +34,7 @@ export async function getCheck(person: Person, id: string): Promise<CheckView> {
     id, setup: check.setup, steps: await stepsOf(readDb(), id), state: check.state,
     person: { id: check.personId, name: names?.personName ?? "" },
     startedAt: check.startedAt.toISOString(), finishedAt: check.finishedAt?.toISOString() ?? null,
-    verdict: check.verdict,
+    verdict: readVerdict(check.verdict),
     machine: check.machineId && names?.fleetNumber ? { id: check.machineId, fleetNumber: names.fleetNumber, name: names.machineName ?? "" } : null,
     entry: check.entryId && names?.slug ? { id: check.entryId, slug: names.slug, name: names.entryName ?? "", version: names.version ?? 0 } : null,
     meterName: names?.meterName ?? null,

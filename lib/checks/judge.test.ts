@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { vocabulary, type Expect, type Reading } from "@/lib/diagnosis";
-import { judge } from "./judge";
+import { judge, judgeInSlices } from "./judge";
 import type { RunSetup, RunStep } from "./run";
 import { SURE } from "./verdict-sentence";
 
@@ -75,6 +75,19 @@ describe("the verdict on a run", () => {
   it("holds open findings of at least 95 % together", () => {
     const { openFindings } = verdictOf(OPEN_B.slice(0, 3), POT);
     expect(openFindings.reduce((sum, f) => sum + f.p, 0)).toBeGreaterThanOrEqual(SURE);
+  });
+
+  it("keeps the evidence for every finding still open and for sound, and the readings that carry it", () => {
+    const verdict = verdictOf(OPEN_B, POT);
+    expect(verdict.explained.map(({ finding }) => finding.code)).toEqual(["wire-open", "none"]);
+    expect(verdict.explained[0]?.rows).toEqual(verdict.evidence);
+    expect(verdict.carrying?.checks).toContain("res:wire:2");
+    expect(verdict.engineVersion).toBe("2");
+  });
+
+  it("comes out the same in slices", async () => {
+    const run = { setup: { ...SETUP, expect: POT }, steps: steps(OPEN_B) };
+    expect(await judgeInSlices(run)).toEqual(judge(run));
   });
 
   it("needs a reading", () => {

@@ -1,30 +1,41 @@
-import { assess, evidence, tellApart, vocabulary, type Assessment } from "@/lib/diagnosis";
+import { assess, drain, explainSteps, tellApart, vocabulary, type Assessment } from "@/lib/diagnosis";
 import { AppError } from "@/lib/errors";
-import { buildVerdict, evidenceFindingOf } from "./build-verdict";
+import { buildVerdict, explainedFindings } from "./build-verdict";
+import { inSlices } from "./in-slices";
 import type { Run } from "./run";
 import { effectiveReadings, engineSetup } from "./run-state";
 import type { Verdict } from "./verdict";
 
-/** Kept with each verdict; goes up whenever the same readings could be judged differently. */
-const ENGINE_VERSION = "1";
+/** Kept with each verdict; goes up whenever the same readings could be judged differently, or more is kept of the reasons. */
+export const ENGINE_VERSION = "2";
 
 export interface Judgement { readonly assessment: Exclude<Assessment, { state: "invalid-input" }>; readonly verdict: Verdict }
+
+function* judgeSteps(run: Pick<Run, "setup" | "steps">): Generator<void, Judgement> {
+  const setup = engineSetup(run, vocabulary());
+  const readings = effectiveReadings(run.steps);
+  if (readings.length === 0) throw new AppError("no-readings", "Take at least one reading before you finish.", 409);
+  const assessment = assess(setup, readings);
+  if (assessment.state === "invalid-input") throw new AppError(assessment.code, assessment.message, 422, assessment.where);
+  yield;
+  const explanation = yield* explainSteps(setup, readings, explainedFindings(assessment));
+  const open = assessment.openFindings;
+  const verdict = buildVerdict({
+    labels: run.setup.cavityLabels, assessment, engineVersion: ENGINE_VERSION, explanation,
+    tellApart: open.length > 1 ? tellApart({ ...setup, excluded: undefined }, readings, open) : [],
+  });
+  return { assessment, verdict };
+}
 
 /**
  * The engine's verdict on a run: the same setup and readings as the phone makes of the same steps. Pure.
  * @throws AppError no-readings (409) without one; the engine's own code (422) when it cannot use them
  */
 export function judge(run: Pick<Run, "setup" | "steps">): Judgement {
-  const setup = engineSetup(run, vocabulary());
-  const readings = effectiveReadings(run.steps);
-  if (readings.length === 0) throw new AppError("no-readings", "Take at least one reading before you finish.", 409);
-  const assessment = assess(setup, readings);
-  if (assessment.state === "invalid-input") throw new AppError(assessment.code, assessment.message, 422, assessment.where);
-  const open = assessment.openFindings;
-  const verdict = buildVerdict({
-    labels: run.setup.cavityLabels, assessment, engineVersion: ENGINE_VERSION,
-    evidence: evidence(setup, readings, evidenceFindingOf(assessment) ?? { code: "none" }),
-    tellApart: open.length > 1 ? tellApart({ ...setup, excluded: undefined }, readings, open) : [],
-  });
-  return { assessment, verdict };
+  return drain(judgeSteps(run));
+}
+
+/** The same, letting others have their turn after each step: a long check takes many beliefs, and a server answers everybody. */
+export function judgeInSlices(run: Pick<Run, "setup" | "steps">): Promise<Judgement> {
+  return inSlices(judgeSteps(run));
 }

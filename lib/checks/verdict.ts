@@ -1,4 +1,4 @@
-import type { EvidenceRow, Fault, FaultChance, KindChance, NextCheck, PinsChance } from "@/lib/diagnosis";
+import type { Carrying, EvidenceRow, Fault, FaultChance, KindChance, NextCheck, PinsChance } from "@/lib/diagnosis";
 
 /** What to do about one finding that is still possible, and how to prove that it was mended. */
 export interface FindingAdvice {
@@ -8,6 +8,9 @@ export interface FindingAdvice {
   /** Readings or movements that show the repair has worked. */
   readonly prove: readonly string[];
 }
+
+/** The evidence for and against one finding that is still possible, or was until the last. */
+export interface Explained { readonly finding: Fault; readonly rows: readonly EvidenceRow[] }
 
 /** What a finished check concludes; computed on the server and stored with the check. */
 export interface Verdict {
@@ -30,6 +33,10 @@ export interface Verdict {
   readonly evidence: readonly EvidenceRow[];
   /** The finding that the evidence table sets against "sound": the best one that is not "none"; null when there is none. */
   readonly evidenceFinding: Fault | null;
+  /** Each finding still possible (six at most), the best rival and "sound", with their evidence; likeliest first. */
+  readonly explained: readonly Explained[];
+  /** The smallest set of readings that by itself leads to this verdict; null when there is none to carry. */
+  readonly carrying: Carrying | null;
   readonly advice: readonly FindingAdvice[];
   readonly cautions: readonly string[];
   readonly engineVersion: string;

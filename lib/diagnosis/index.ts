@@ -1,9 +1,10 @@
 /** The only door of the wiring-check engine. Pure: same input, same output, on server and phone. */
 export * from "./types";
+export { faultId } from "./circuit/candidate";
 export { parseCheck, vocabulary } from "./checks";
 export { DEFAULT_METER, meterLimit, standardUncertainty } from "./meter";
 export { assess } from "./assess";
 export { answerRequest, type Answer, type Refusal } from "./answer";
-export { effects, evidence, predict, tellApart } from "./explain";
+export { carrying, carryingSteps, effects, effectsSteps, evidence, evidenceSteps, explainSteps, drain, predict, tellApart, type Explanation } from "./explain";
 export { faultText, whyText } from "./words";
 export { chancesBefore, FINDING_PRIORS, KIND_PRIORS, PRIOR_CHECKS, type Prior } from "./priors";

@@ -151,7 +151,29 @@ export interface EvidenceRow {
   readonly ifFinding: Prediction;
   /** Meter's limit of error at this value, in the check's unit; null for words. */
   readonly limit: number | null;
+  /** Reading less the middle expected if the finding is true, in units of `limit`; null for words, and where a word is expected. */
+  readonly offLimits: number | null;
+  /** The same if all were sound. */
+  readonly offIfSound: number | null;
+  /** Chance of the finding with this reading over its chance without it, the others alike; 1e-6 to 1e6. Null in records of before it was kept. */
+  readonly factor: number | null;
+  /** Chance of the finding, 0..1, had this reading not been taken. Null in records of before it was kept. */
+  readonly without: number | null;
 }
+
+/** Readings that by themselves lead to the same verdict as all of them. */
+export interface Carrying {
+  /** Codes of the checks, in the order of the vocabulary. */
+  readonly checks: readonly string[];
+  /** True: no smaller set does. False: none of these can be left out, but a smaller set may exist. */
+  readonly smallest: boolean;
+}
+
+/** Part of a hypothesis, or a whole one: everything that agrees with what is stated belongs to it. */
+export interface Possibility { readonly kind?: Kind; readonly pins?: PinAssignment; readonly fault?: Fault }
+
+/** A check that would tell possibilities apart, with what each of them expects of it, in the order they were given. */
+export interface TellingCheck extends NextCheck { readonly reads: readonly Prediction[] }
 
 export interface Standing {
   readonly kinds: readonly KindChance[];
