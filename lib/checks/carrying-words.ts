@@ -18,7 +18,8 @@ export function carryingSentence({ checks, smallest }: Carrying, total: number):
 }
 
 /** From so many of the one bit that is open between two: settles it; helps. Below, it only leans one way. */
-const SETTLES = 0.7, HELPS = 0.3;
+export const SETTLES = 0.7;
+const HELPS = 0.3;
 
 /** How much a check would do to tell two things apart, in words. */
 export function tellingWords({ gainBits }: Pick<TellingCheck, "gainBits">): string {

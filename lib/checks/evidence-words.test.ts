@@ -54,8 +54,12 @@ describe("a row of the evidence, in words", () => {
   });
 
   it("says so where it agrees, and where a wide range leaves room", () => {
-    expect(evidencePhrases({ ...row, ifFinding: row.ifSound, offLimits: -0.69, factor: 3.2 })).toEqual(["It would read 4.90\u00a0V to 5.10\u00a0V, and it did (0.7 times the meter's limit of error off the middle).", "That made this about 3.2 times more likely."]);
+    expect(evidencePhrases({ ...row, ifFinding: row.ifSound, offLimits: -0.69, factor: 3.2 })).toEqual(["It would read 4.90\u00a0V to 5.10\u00a0V, and it did, 0.7 times the meter's limit of error off the middle.", "That made this about 3.2 times more likely."]);
     expect(evidencePhrases({ ...row, value: 9, limit: 0.049, ifFinding: band(VOLTS, 0, 8), offLimits: 5 / 0.049, factor: 1 })[0]).toBe("It would read 0\u00a0V to 8\u00a0V; it is about 100 times the meter's limit of error away from the middle of that.");
+  });
+
+  it("says it in words where a reading lies right in the middle", () => {
+    expect(evidencePhrases({ ...row, ifFinding: row.ifSound, offLimits: -0.01 })[0]).toBe("It would read 4.90\u00a0V to 5.10\u00a0V, and it did, right in the middle.");
   });
 
   it("counts no limits where a word stands", () => {
@@ -66,7 +70,18 @@ describe("a row of the evidence, in words", () => {
   });
 
   it.each([[1e-6, "That rules this out, unless the reading is wrong."], [1e-3, "That rules this out, unless the reading is wrong."], [0.5, "That made this about 2 times less likely."], [0.95, "Beside the other readings, that changed next to nothing."], [1, "Beside the other readings, that changed next to nothing."], [1e6, "That made this more than 1000 times more likely."], [null, null]] as const)("a factor of %s", (factor, words) => {
-    expect(movedSentence({ factor })).toBe(words);
+    // Away from the finding's band where it speaks against, inside it where it speaks for.
+    expect(movedSentence({ ...row, value: factor !== null && factor > 1 ? 0 : 4.98, factor })).toBe(words);
+  });
+
+  it("gives the reason where a reading agrees and still speaks against, or the other way round", () => {
+    expect(movedSentence({ ...row, value: 0, factor: 0.1 })).toBe("Something else expects it more closely: that made this about 10 times less likely.");
+    expect(movedSentence({ ...row, value: 0, factor: 1e-5 })).toBe("Something else expects it more closely: that rules this out, unless the reading is wrong.");
+    expect(movedSentence({ ...row, factor: 30 })).toBe("Everything else expects it even less: that made this about 30 times more likely.");
+  });
+
+  it("leaves the limit of error out where what is not known of the machine is far wider", () => {
+    expect(evidencePhrases({ ...row, value: 2, limit: 0.014, ifFinding: band(VOLTS, 0, 8), offLimits: -140 })[0]).toBe("It would read 0\u00a0V to 8\u00a0V, and it did.");
   });
 
   it("has no more digits than mean something", () => {

@@ -70,8 +70,11 @@ export function limitWords(row: Pick<EvidenceRow, "check" | "value" | "limit">):
 const MOVES = 1.1;
 /** Beyond this a factor or distance is not told in figures: the model itself is not that good. */
 const MOST_TIMES = 1000;
-/** A band this many limits of error wide, half of it, has a middle of its own; what lies well beyond it is simply "away". */
-const NARROW = 3, WELL_BEYOND = 10;
+/**
+ * Half a band, in limits of error: up to NARROW it is as good as its middle, beyond WIDE_LIMITS the meter's limit plays no part in it.
+ * What lies WELL_BEYOND halves of the band from its middle is simply "away".
+ */
+const NARROW = 3, WIDE_LIMITS = 10, WELL_BEYOND = 10;
 
 /** A positive number of times with the digits that mean something: "0.4", "1.6", "12", "170", "more than 1000". */
 export function timesWords(times: number): string {
@@ -79,13 +82,14 @@ export function timesWords(times: number): string {
   return times < 9.95 ? String(Number(times.toFixed(1))) : String(Number(times.toPrecision(2)));
 }
 
-/** How far a reading is from what is expected: ", and it did (0.4 times the meter's limit of error off the middle)". */
+/** How far a reading is from what is expected: ", and it did, 0.4 times the meter's limit of error off the middle". */
 function offWords({ value, limit }: Pick<EvidenceRow, "value" | "limit">, expected: Prediction, off: number | null): string {
   const agrees = fits(expected, value, limit);
   const did = parseCheck(expected.check)?.unit === "word" ? "was" : "did";
   if (off === null || !expected.number || !limit) return agrees ? `, and it ${did}` : `; it ${did} not`;
   const times = `${timesWords(Math.abs(off))} times the meter's limit of error`, half = (expected.number.high - expected.number.low) / 2 / limit;
-  if (agrees) return `, and it did (${times} off the middle)`;
+  if (agrees && half > WIDE_LIMITS) return ", and it did";
+  if (agrees) return Math.abs(off) < 0.05 ? ", and it did, right in the middle" : `, and it did, ${times} off the middle`;
   return `; it is ${Math.abs(off) > MOST_TIMES ? "" : "about "}${times} away${half > NARROW && Math.abs(off) < WELL_BEYOND * half ? " from the middle of that" : ""}`;
 }
 
@@ -97,16 +101,27 @@ export function expectedPhrase(row: EvidenceRow, against: "sound" | "finding"): 
   return wouldRead(expected) + offWords(row, expected, against === "sound" ? row.offIfSound : row.offLimits);
 }
 
+export type Movement = "for" | "against" | "rules" | "neither";
+
+/** Which way a reading moved the chance of the finding; where no factor was kept, whether it agrees. */
+export function movement(row: EvidenceRow): Movement {
+  if (row.factor === null) return fits(row.ifFinding, row.value, row.limit) ? "for" : "against";
+  if (row.factor * MOST_TIMES <= 1) return "rules";
+  return row.factor >= MOVES ? "for" : row.factor * MOVES <= 1 ? "against" : "neither";
+}
+
 /**
  * By how much a reading moved the chance of a finding, beside the other readings: "That made this about 50 times less likely."
  * Null for a record of before it was kept. What is all but impossible is ruled out, as far as the reading can be trusted.
  */
-export function movedSentence({ factor }: Pick<EvidenceRow, "factor">): string | null {
+export function movedSentence(row: EvidenceRow): string | null {
+  const { factor } = row;
   if (factor === null) return null;
-  if (factor * MOST_TIMES <= 1) return "That rules this out, unless the reading is wrong.";
   const times = (n: number) => (n > MOST_TIMES ? timesWords(n) : `about ${n < 9.95 ? timesWords(n) : String(Number(n.toPrecision(1)))}`);
-  if (factor >= MOVES) return `That made this ${times(factor)} times more likely.`;
-  if (factor * MOVES <= 1) return `That made this ${times(1 / factor)} times less likely.`;
+  const agrees = fits(row.ifFinding, row.value, row.limit), closer = agrees ? "Something else expects it more closely: that" : "That";
+  if (factor * MOST_TIMES <= 1) return `${closer} rules this out, unless the reading is wrong.`;
+  if (factor >= MOVES) return `${agrees ? "That" : "Everything else expects it even less: that"} made this ${times(factor)} times more likely.`;
+  if (factor * MOVES <= 1) return `${closer} made this ${times(1 / factor)} times less likely.`;
   return "Beside the other readings, that changed next to nothing.";
 }
 

@@ -1,10 +1,12 @@
 import type { ReactNode } from "react";
 import { chanceText } from "@/components/ui";
+import { carryingSentence } from "@/lib/checks/carrying-words";
 import { checkName } from "@/lib/checks/check-name";
 import type { CheckView } from "@/lib/checks/check-view";
 import type { ConfirmationView } from "@/lib/checks/confirmation-view";
 import { momentWords } from "@/lib/checks/date-words";
 import { findingHeading, KIND_TITLES } from "@/lib/checks/finding-words";
+import { effectiveReadings } from "@/lib/checks/run-state";
 import type { Verdict } from "@/lib/checks/verdict";
 import { settledPins } from "@/lib/checks/verdict-sentence";
 import { OutcomeWords } from "../outcome/outcome-words";
@@ -93,6 +95,12 @@ function Open({ check, verdict }: ReportProps) {
   );
 }
 
+/** Which readings carry the verdict, after the sentence that says how many; nothing where all of them do. */
+function carriedNames(check: CheckView, { carrying }: Verdict): string {
+  if (!carrying || carrying.checks.length === effectiveReadings(check.steps).length) return "";
+  return ` ${carrying.checks.map((code) => checkName(code, check.setup.cavityLabels)).join("; ")}.`;
+}
+
 /** The whole record of a finished check for the work order: one column, A4, readable in black and white. */
 export function CheckReport({ check, verdict, outcome }: ReportProps) {
   const labels = check.setup.cavityLabels;
@@ -109,6 +117,7 @@ export function CheckReport({ check, verdict, outcome }: ReportProps) {
       </Part>
       <Open check={check} verdict={verdict} />
       <Part title="Readings and evidence">
+        {verdict.carrying ? <p className="mb-3"><strong>{carryingSentence(verdict.carrying, effectiveReadings(check.steps).length)}</strong>{carriedNames(check, verdict)}</p> : null}
         <ReportReadings check={check} verdict={verdict} />
         <ReportSkips check={check} />
       </Part>

@@ -1,4 +1,3 @@
-import type { ComponentProps } from "react";
 import { checkName, readingWords } from "@/lib/checks/check-name";
 import type { CheckView } from "@/lib/checks/check-view";
 import { bearing, BEARING_WORDS, expectedWords, limitWords } from "@/lib/checks/evidence-words";
@@ -6,13 +5,17 @@ import { ifFinding } from "@/lib/checks/finding-words";
 import { readingSteps, skipSteps } from "@/lib/checks/run-state";
 import type { SkipReason } from "@/lib/checks/run";
 import type { Verdict } from "@/lib/checks/verdict";
-import { EvidenceTable } from "../verdict/evidence-table";
+import type { Labels } from "@/lib/checks/check-name";
+import { settledPins } from "@/lib/checks/verdict-sentence";
+import type { EvidenceRow, Fault } from "@/lib/diagnosis";
+import { EvidenceList } from "../evidence";
 
 const REASONS: Readonly<Record<SkipReason, string>> = {
   "cannot-reach": "cannot be reached", "not-safe-here": "not safe here", "no-function-on-meter": "the meter has no such function",
   "cannot-part-connector": "the connector cannot be parted", "cannot-move-actuator": "the actuator cannot be moved", other: "another reason",
 };
 
+const SOUND: Fault = { code: "none" };
 const TH = "px-1.5 py-1 text-left align-bottom font-bold first:pl-0";
 const TD = "px-1.5 py-1.5 align-top first:pl-0";
 
@@ -25,14 +28,16 @@ export function ReportReadings({ check, verdict }: { readonly check: CheckView; 
   return (
     <>
       {/* Six columns do not fit a phone: there each reading stands by itself, as on the verdict. */}
-      <div className="sm:hidden print:hidden"><EvidenceTable rows={rows} labels={labels} finding={finding} /></div>
+      <div className="sm:hidden print:hidden"><EvidenceList rows={rows} labels={labels} finding={finding ?? SOUND} pins={settledPins(verdict.pins)} /></div>
       <ReadingsTable rows={rows} labels={labels} finding={finding} />
     </>
   );
 }
 
+interface ReadingsTableProps { readonly rows: readonly EvidenceRow[]; readonly labels: Labels; readonly finding: Fault | null }
+
 /** The readings as they are printed. */
-function ReadingsTable({ rows, labels, finding }: ComponentProps<typeof EvidenceTable>) {
+function ReadingsTable({ rows, labels, finding }: ReadingsTableProps) {
   return (
     <div role="region" aria-label="Readings and evidence" tabIndex={0} className="hidden overflow-x-auto sm:block print:block print:overflow-visible">
       <table className="w-full min-w-[44rem] border-collapse print:min-w-0 print:text-[9.5pt]">

@@ -1,9 +1,11 @@
+import type { ReactNode } from "react";
 import { ChanceBar } from "@/components/ui";
 import type { Assessment, ReadingEffect } from "@/lib/diagnosis";
 import { chanceWords } from "@/lib/checks/chance-words";
 import { readingWords } from "@/lib/checks/check-name";
 import { checkWords, type Labels } from "@/lib/checks/check-words";
 import { findingHeading, kindTitle } from "@/lib/checks/finding-words";
+import type { Explained } from "./use-engine";
 
 /** Below this chance a possibility is counted, not listed. */
 const LISTED = 0.005;
@@ -53,15 +55,22 @@ function EffectRow({ effect, labels }: { readonly effect: ReadingEffect; readonl
   );
 }
 
+function Effects({ effects, labels }: { readonly effects: readonly ReadingEffect[]; readonly labels: Labels }) {
+  if (effects.length === 0) return <p>Nothing is read yet.</p>;
+  return <ol>{effects.map((effect) => <EffectRow key={effect.check} effect={effect} labels={labels} />)}</ol>;
+}
+
 interface StandingDetailsProps {
   readonly standing: Standing;
   readonly labels: Labels;
   readonly why: string | null;
-  readonly effects: readonly ReadingEffect[] | null;
+  readonly effects: Explained<readonly ReadingEffect[]>;
+  /** The evidence for any one finding, and what tells two apart. */
+  readonly evidence: ReactNode;
 }
 
 /** All that is believed so far: kinds, findings, pins, why this reading, and what each reading speaks for and against. */
-export function StandingDetails({ standing, labels, why, effects }: StandingDetailsProps) {
+export function StandingDetails({ standing, labels, why, effects, evidence }: StandingDetailsProps) {
   const pin = (n: number): string => labels[n - 1] ?? "";
   return (
     <div className="grid gap-6 py-4">
@@ -71,10 +80,9 @@ export function StandingDetails({ standing, labels, why, effects }: StandingDeta
       <Possibilities title="Pins" rows={standing.pins.map((pins) => ({ name: `+V ${pin(pins.supply)} \u00b7 0V ${pin(pins.ground)} \u00b7 SIG ${pin(pins.signal)}`, p: pins.p }))} />
       <section>
         <h2 className="text-xl font-bold">What each reading says</h2>
-        {effects === null ? <p>Working it out …</p> : null}
-        {effects?.length === 0 ? <p>Nothing is read yet.</p> : null}
-        <ol>{effects?.map((effect) => <EffectRow key={effect.check} effect={effect} labels={labels} />)}</ol>
+        {effects.state === "ready" ? <Effects effects={effects.value} labels={labels} /> : <p>{effects.state === "failed" ? "It could not be worked out." : "Working it out …"}</p>}
       </section>
+      {evidence}
     </div>
   );
 }

@@ -1,10 +1,11 @@
 "use client";
 
 import { useEffect, useMemo, useRef, useState } from "react";
-import { vocabulary, type Assessment, type Reading, type ReadingEffect, type Setup } from "@/lib/diagnosis";
+import { vocabulary, type Assessment, type Reading, type Setup } from "@/lib/diagnosis";
 import type { Run } from "@/lib/checks/run";
 import { effectiveReadings, engineSetup } from "@/lib/checks/run-state";
 import { startEngine, type EngineClient } from "./engine-client";
+import type { EngineJob, ResultOf } from "./engine-messages";
 
 export interface EngineState {
   /** The answer to exactly the present steps; null while it is worked out. */
@@ -38,7 +39,7 @@ export function useEngine(run: Run): EngineState {
     asked.current = key;
     const [askedSetup, askedReadings] = JSON.parse(key) as [Setup, Reading[]];
     const settle = (value: Assessment | null) => { if (asked.current === key) setAnswer((before) => ({ key, value: value ?? before.value })); };
-    sharedEngine().assess(askedSetup, askedReadings).then(settle, () => {
+    sharedEngine().ask({ task: "assess" }, askedSetup, askedReadings).then(settle, () => {
       if (asked.current === key) setAnswer({ key: `failed ${key}`, value: null });
     });
   }, [key]);
@@ -46,21 +47,25 @@ export function useEngine(run: Run): EngineState {
   return { current: answer.key === key ? answer.value : null, latest: answer.value, failed: answer.key === `failed ${key}`, setup, readings };
 }
 
-/** What each reading speaks for and against; worked out only while `wanted`. */
-export function useEffects(setup: Setup, readings: readonly Reading[], wanted: boolean): readonly ReadingEffect[] | null {
-  const key = JSON.stringify([setup, readings]);
-  const [answer, setAnswer] = useState<Answer<readonly ReadingEffect[]>>({ key: "", value: null });
+/** Not asked; being worked out; worked out; or not to be had. */
+export type Explained<T> = { readonly state: "idle" | "working" | "failed" } | { readonly state: "ready"; readonly value: T };
+
+/** An explanation of the present readings, worked out on the phone, only while a job is given. */
+export function useExplained<Job extends EngineJob>(job: Job | null, setup: Setup, readings: readonly Reading[]): Explained<ResultOf<Job>> {
+  const key = job ? JSON.stringify([job, setup, readings]) : "";
+  const [answer, setAnswer] = useState<{ readonly key: string; readonly explained: Explained<ResultOf<Job>> }>({ key: "", explained: { state: "idle" } });
 
   useEffect(() => {
-    if (!wanted) return;
+    if (key === "") return;
     let gone = false;
-    const [askedSetup, askedReadings] = JSON.parse(key) as [Setup, Reading[]];
-    void sharedEngine().effects(askedSetup, askedReadings).then(
-      (value) => { if (!gone) setAnswer({ key, value }); },
-      () => { if (!gone) setAnswer({ key, value: [] }); },
+    const [askedJob, askedSetup, askedReadings] = JSON.parse(key) as [Job, Setup, Reading[]];
+    void sharedEngine().ask(askedJob, askedSetup, askedReadings).then(
+      (value) => { if (!gone) setAnswer({ key, explained: { state: "ready", value } }); },
+      () => { if (!gone) setAnswer({ key, explained: { state: "failed" } }); },
     );
     return () => { gone = true; };
-  }, [key, wanted]);
+  }, [key]);
 
-  return answer.key === key ? answer.value : null;
+  if (key === "") return { state: "idle" };
+  return answer.key === key ? answer.explained : { state: "working" };
 }

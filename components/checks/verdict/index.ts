@@ -1,5 +1,5 @@
 export { CheckFacts } from "./check-facts";
-export { EvidenceTable } from "./evidence-table";
+export { ApartSection, type Apart } from "./apart-section";
 export { PinsTable } from "./pins-table";
 export { AttachMachine, VerdictButtons } from "./verdict-buttons";
 export { VerdictView } from "./verdict-view";

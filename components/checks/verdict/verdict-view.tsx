@@ -7,7 +7,7 @@ import type { Verdict } from "@/lib/checks/verdict";
 import { settledPins } from "@/lib/checks/verdict-sentence";
 import { AdviceList } from "./advice-list";
 import { FindingChances, KindChances, MarkLetter } from "./chances";
-import { EvidenceTable } from "./evidence-table";
+import { EvidenceSection } from "./evidence-section";
 import { PinsTable } from "./pins-table";
 import { VerdictFace } from "./verdict-face";
 import { WiringSketch } from "./wiring-sketch";
@@ -16,6 +16,10 @@ interface VerdictViewProps {
   readonly check: CheckView;
   /** Buttons that belong to the verdict: report, re-check, attach, back. */
   readonly actions?: ReactNode;
+  /** Id of the finding whose evidence is shown; the likeliest one's when absent. */
+  readonly finding?: string;
+  /** "What would tell two apart", from the page. */
+  readonly apart?: ReactNode;
 }
 
 function tone(verdict: Verdict): "sound" | "stop" | "plain" {
@@ -83,7 +87,7 @@ function TellApart({ verdict, labels }: { verdict: Verdict; labels: Labels }) {
 }
 
 /** The verdict of a finished check, read-only. Server-rendered; the buttons come from the page. */
-export function VerdictView({ check, actions }: VerdictViewProps) {
+export function VerdictView({ check, actions, finding, apart }: VerdictViewProps) {
   const { verdict } = check;
   const labels: Labels = check.setup.cavityLabels;
   if (!verdict) return <Notice tone="plain" title="This check has no verdict yet." />;
@@ -110,7 +114,8 @@ export function VerdictView({ check, actions }: VerdictViewProps) {
         <Sheet title="Findings and their chances"><FindingChances verdict={verdict} labels={labels} /></Sheet>
         <Sheet title="Kind of device"><KindChances kinds={verdict.kinds} /></Sheet>
       </div>
-      <Sheet title="Evidence"><EvidenceTable rows={verdict.evidence} labels={labels} finding={verdict.evidenceFinding} /></Sheet>
+      <EvidenceSection check={check} verdict={verdict} finding={finding} />
+      {apart}
     </div>
   );
 }

@@ -1,10 +1,8 @@
 import { beliefs } from "../assess";
 import { parseCheck } from "../checks";
 import { faultId, type Candidate } from "../circuit/candidate";
-import { PARAMETER_COUNT } from "../circuit/parameters";
 import { CHECK_INDEX } from "../circuit/predict";
 import { candidatesForEntry, candidatesForUnknown } from "../inference/candidates";
-import { evidenceOf, fitCandidate } from "../inference/fit";
 import { observe } from "../inference/observe";
 import { outlookOf } from "../inference/outlook";
 import { believe, type Believed } from "../inference/posterior";
@@ -12,13 +10,14 @@ import { DEFAULT_METER, meterLimit } from "../meter";
 import type { EvidenceRow, Fault, Prediction, Reading, Setup } from "../types";
 import { factorOf } from "./effects";
 import { drain, leavingOut } from "./leaving-out";
-import { predictionOf } from "./prediction";
+import { predictionOf, type Piece } from "./prediction";
 
-const START = new Float64Array(PARAMETER_COUNT);
 /** From this chance on a finding is shown as the kind and pins that make it likeliest; below it, as the verdict's own. */
 const POSSIBLE = 0.01;
+/** Share of a finding, 0..1, that may be left out of what it expects, and most ways of building it that are looked into. */
+const LEFT_OUT = 0.02, MOST_PIECES = 4;
 
-const having = (id: string) => (c: Candidate) => faultId(c.hypothesis.fault) === id;
+const isOf = (id: string) => (c: Candidate) => faultId(c.hypothesis.fault) === id;
 
 /** Chance of a finding, 0..1. */
 function chanceOf(believed: readonly Believed[], id: string): number {
@@ -26,24 +25,29 @@ function chanceOf(believed: readonly Believed[], id: string): number {
 }
 
 /**
- * The candidate that stands for a finding: while it is possible, its likeliest build; else, of the likeliest kind and
- * pins that can have it, the build that fits best. Null when this device cannot have it.
+ * The candidates that stand for a finding: of one kind and one set of pins, in every build. While the finding is possible these
+ * are its likeliest; else those of the likeliest hypothesis that can have it. Empty when this device cannot have it.
  */
-function standIn(setup: Setup, readings: readonly Reading[], all: readonly Believed[], fault: Fault): Candidate | null {
-  const meter = setup.meter ?? DEFAULT_METER, top = all[0]!.candidate, has = having(faultId(fault));
-  const likeliest = all.find((b) => has(b.candidate));
-  if (likeliest && chanceOf(all, faultId(fault)) >= POSSIBLE) return likeliest.candidate;
-  const alike = (c: Candidate) => c.hypothesis.kind === top.hypothesis.kind && `${c.pinOf}` === `${top.pinOf}`;
+function standIns(setup: Setup, all: readonly Believed[], fault: Fault): readonly Candidate[] {
+  const id = faultId(fault), has = isOf(id), likeliest = all.find((b) => has(b.candidate));
+  const model = (likeliest && chanceOf(all, id) >= POSSIBLE ? likeliest : all[0]!).candidate;
+  const alike = (c: Candidate) => c.hypothesis.kind === model.hypothesis.kind && `${c.pinOf}` === `${model.pinOf}`;
   const byEntry = setup.expect ? candidatesForEntry(setup.expect, setup.experience).filter(has).filter(alike) : [];
-  const any = byEntry.length > 0 ? [] : candidatesForUnknown(setup.experience).filter(has), near = any.filter(alike);
-  const list = byEntry.length > 0 ? byEntry : near.length > 0 ? near : any;
-  return list.length === 0 ? null : believe(list, observe(readings, meter), meter)[0]!.candidate;
+  if (byEntry.length > 0) return byEntry;
+  const any = candidatesForUnknown(setup.experience).filter(has), near = any.filter(alike);
+  return near.length > 0 ? near : any;
 }
 
-/** What a candidate, fitted to these readings, expects of a check. */
-function expectedOf(candidate: Candidate, setup: Setup, readings: readonly Reading[], check: string): Prediction {
-  const meter = setup.meter ?? DEFAULT_METER, fit = fitCandidate(candidate, evidenceOf(observe(readings, meter), meter), START);
-  return predictionOf([{ p: 1, outlook: outlookOf({ candidate, fit, logWeight: fit.logEvidence, p: 1 }, meter) }], CHECK_INDEX.get(check)!);
+/** What the candidates of a finding expect of a check, given the other readings: in the builds which these make likely. */
+function expectedOf(candidates: readonly Candidate[], setup: Setup, others: readonly Reading[], check: string): Prediction {
+  const meter = setup.meter ?? DEFAULT_METER, pieces: Piece[] = [];
+  let held = 0;
+  for (const b of believe(candidates, observe(others, meter), meter)) {
+    if (pieces.length >= MOST_PIECES || held > 1 - LEFT_OUT) break;
+    pieces.push({ p: b.p, outlook: outlookOf(b, meter) });
+    held += b.p;
+  }
+  return predictionOf(pieces, CHECK_INDEX.get(check)!);
 }
 
 /**
@@ -51,8 +55,8 @@ function expectedOf(candidate: Candidate, setup: Setup, readings: readonly Readi
  * Returns null for an unknown check or a finding that this device cannot have.
  */
 export function predict(setup: Setup, readings: readonly Reading[], fault: Fault, check: string): Prediction | null {
-  const candidate = parseCheck(check) && standIn(setup, readings, beliefs(setup, readings), fault);
-  return candidate ? expectedOf(candidate, setup, readings.filter(([c]) => c !== check), check) : null;
+  const candidates = parseCheck(check) ? standIns(setup, beliefs(setup, readings), fault) : [];
+  return candidates.length === 0 ? null : expectedOf(candidates, setup, readings.filter(([c]) => c !== check), check);
 }
 
 /** Signed distance of a reading from the middle expected, in limits of error; null where either is a word, or the meter has no limit there. */
@@ -63,17 +67,19 @@ function distance(value: Reading[1], expected: Prediction, limit: number | null)
 /** The same as `evidence`, in steps of at most one belief each. */
 export function* evidenceSteps(setup: Setup, readings: readonly Reading[], fault: Fault): Generator<void, EvidenceRow[]> {
   const { all, without } = yield* leavingOut(setup, readings), meter = setup.meter ?? DEFAULT_METER, id = faultId(fault);
-  const sound = standIn(setup, readings, all, { code: "none" }), found = standIn(setup, readings, all, fault), chance = chanceOf(all, id);
-  if (!sound || !found) return [];
-  return readings.map(([check, value], i) => {
+  const sound = standIns(setup, all, { code: "none" }), found = standIns(setup, all, fault), chance = chanceOf(all, id), rows: EvidenceRow[] = [];
+  if (sound.length === 0 || found.length === 0) return [];
+  for (const [i, [check, value]] of readings.entries()) {
+    yield;
     const others = readings.filter((_, k) => k !== i);
-    const ifSound = expectedOf(sound, setup, others, check), ifFinding = found === sound ? ifSound : expectedOf(found, setup, others, check);
+    const ifSound = expectedOf(sound, setup, others, check), ifFinding = fault.code === "none" ? ifSound : expectedOf(found, setup, others, check);
     const limit = typeof value === "number" ? meterLimit(parseCheck(check)!, value, meter) : null, left = chanceOf(without[i]!, id);
-    return {
+    rows.push({
       check, value, ifSound, ifFinding, limit, offLimits: distance(value, ifFinding, limit), offIfSound: distance(value, ifSound, limit),
       factor: factorOf(chance, left), without: Math.min(1, left),
-    };
-  });
+    });
+  }
+  return rows;
 }
 
 /**

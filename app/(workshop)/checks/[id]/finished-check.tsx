@@ -1,20 +1,26 @@
-import { AttachMachine, CheckFacts, VerdictButtons, VerdictView } from "@/components/checks/verdict";
+import { ApartSection, AttachMachine, CheckFacts, VerdictButtons, VerdictView } from "@/components/checks/verdict";
 import { ButtonLink, EmptyState, PageHeading, Sheet } from "@/components/ui";
 import { hasPermission, type Person } from "@/lib/auth/permissions";
 import type { CheckView } from "@/lib/checks/check-view";
 import { confirmationsOf } from "@/lib/checks/list-confirmations";
 import { machineChoices } from "@/lib/checks/log-choices";
+import { chosenPair, possibilityChoices } from "@/lib/checks/possibilities";
+import { tellTwoApart } from "@/lib/checks/tell-two-apart";
 import { Outcome, OutcomeOfVerdict } from "./outcome";
 import { attachMachineAction, recheckAction } from "./verdict-actions";
+
+/** What the address asks to be shown of a verdict; anything unknown is passed over. */
+export interface Asked { readonly finding?: string; readonly one?: string; readonly other?: string }
 
 interface FinishedCheckProps {
   readonly check: CheckView;
   /** Already authorised to read this check by the page. */
   readonly person: Person;
+  readonly asked: Asked;
 }
 
 /** A finished check, read-only: its verdict, and what can be done after it. */
-export async function FinishedCheck({ check, person }: FinishedCheckProps) {
+export async function FinishedCheck({ check, person, asked }: FinishedCheckProps) {
   if (!check.verdict) return <Abandoned check={check} />;
   const mayRun = hasPermission(person, "check:run");
   const mayAttach = mayRun && (check.person.id === person.id || hasPermission(person, "machine:edit"));
@@ -23,7 +29,10 @@ export async function FinishedCheck({ check, person }: FinishedCheckProps) {
   return (
     <>
       <PageHeading title={check.recheckOf ? "Verdict of the re-check" : "Verdict"} />
-      <VerdictView check={check} actions={<><VerdictButtons checkId={check.id} mayRun={mayRun} comparable={comparable} recheck={recheckAction} /><OutcomeOfVerdict check={check} person={person} confirmations={confirmations} /></>} />
+      <VerdictView
+        check={check} finding={asked.finding} apart={<TwoApart check={check} asked={asked} />}
+        actions={<><VerdictButtons checkId={check.id} mayRun={mayRun} comparable={comparable} recheck={recheckAction} /><OutcomeOfVerdict check={check} person={person} confirmations={confirmations} /></>}
+      />
       <div className="mt-6 grid grid-cols-1 gap-6">
         <Outcome check={check} verdict={check.verdict} person={person} confirmations={confirmations} />
         <Sheet title="This check">
@@ -33,6 +42,13 @@ export async function FinishedCheck({ check, person }: FinishedCheckProps) {
       </div>
     </>
   );
+}
+
+/** The two possibilities that the address names, set apart by the engine now; what the verdict says of them does not change. */
+function TwoApart({ check, asked }: { readonly check: CheckView; readonly asked: Asked }) {
+  if (!check.verdict || check.verdict.contradictory) return null;
+  const choices = possibilityChoices(check.verdict, check.setup.cavityLabels), pair = chosenPair(choices, [asked.one, asked.other]);
+  return <ApartSection checkId={check.id} choices={choices} apart={pair ? { pair, checks: tellTwoApart(check, pair) } : null} finding={asked.finding} labels={check.setup.cavityLabels} />;
 }
 
 function Abandoned({ check }: { readonly check: CheckView }) {

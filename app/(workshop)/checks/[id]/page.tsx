@@ -6,7 +6,7 @@ import { requirePermission } from "@/lib/auth/require-permission";
 import type { CheckView } from "@/lib/checks/check-view";
 import { getCheck } from "@/lib/checks/get-check";
 import { AppError } from "@/lib/errors";
-import { FinishedCheck } from "./finished-check";
+import { FinishedCheck, type Asked } from "./finished-check";
 
 export const metadata: Metadata = { title: "Check" };
 
@@ -20,8 +20,19 @@ async function checkOf(person: Person, id: string): Promise<CheckView | null> {
   }
 }
 
+interface CheckPageProps {
+  readonly params: Promise<{ id: string }>;
+  readonly searchParams: Promise<Readonly<Record<string, string | string[] | undefined>>>;
+}
+
+/** What the address asks to be shown; a name given twice counts as not given. */
+function askedOf(given: Awaited<CheckPageProps["searchParams"]>): Asked {
+  const text = (name: string) => { const value = given[name]; return typeof value === "string" ? value : undefined; };
+  return { finding: text("finding"), one: text("one"), other: text("other") };
+}
+
 /** A check: led reading by reading while it runs, its verdict once it is finished. */
-export default async function CheckPage({ params }: { readonly params: Promise<{ id: string }> }) {
+export default async function CheckPage({ params, searchParams }: CheckPageProps) {
   const person = await requirePermission("check:read");
   const { id } = await params;
   const check = await checkOf(person, id);
@@ -29,7 +40,7 @@ export default async function CheckPage({ params }: { readonly params: Promise<{
     return (
       <>
         <SettleRun id={id} />
-        <FinishedCheck check={check} person={person} />
+        <FinishedCheck check={check} person={person} asked={askedOf(await searchParams)} />
       </>
     );
   }

@@ -1,0 +1,3 @@
+export { CarryingNote } from "./carrying-note";
+export { EvidenceList } from "./evidence-list";
+export { TellingList } from "./telling-list";
