@@ -62,6 +62,8 @@ describe("the verdict on a run", () => {
     expect(verdict.advice).toEqual([]);
     expect(verdict.short).toBe("Readings contradict each other.");
     expect(verdict.suspects.map((s) => s.check)).toContain("res:device:1-2@rest");
+    expect(verdict.carrying).toBeNull();
+    expect(verdict.evidence.every((row) => row.factor === null)).toBe(true);
   });
 
   it("is the same for the same steps, sent in any order, with a reading that was taken back left out", () => {

@@ -1,5 +1,5 @@
 import { eq } from "drizzle-orm";
-import { describe, expect, it } from "vitest";
+import { describe, expect, it, vi } from "vitest";
 import { readDb, write } from "@/db/client";
 import { checks, checkSteps, confirmations } from "@/db/schema";
 import { countConfirmed, experienceInForce } from "@/lib/checks/experience-rows";
@@ -23,6 +23,8 @@ import { DEMO_CHECKS } from "./specs";
 const RUNS = runs as unknown as Readonly<Record<string, readonly Reading[]>>;
 
 eachTestOwnDatabase();
+// Every demo check is judged once, with its reasons.
+vi.setConfig({ testTimeout: 180_000 });
 
 async function seeded(): Promise<(typeof checks.$inferSelect)[]> {
   for (const part of [seedPeople, seedMachines, seedCatalogue, seedChecks]) await write(part);

@@ -6,6 +6,7 @@ import { judge } from "@/lib/checks/judge";
 import type { RunSetup, RunStep } from "@/lib/checks/run";
 import { machineState } from "@/lib/checks/run-state";
 import { transition } from "@/lib/checks/run-transition";
+import type { Verdict } from "@/lib/checks/verdict";
 import { verdictColumns } from "@/lib/checks/verdict-columns";
 import { parseCheck, type Reading } from "@/lib/diagnosis";
 import { DEMO_PEOPLE } from "../people";
@@ -56,6 +57,15 @@ function stepsOf(check: DemoCheck): readonly RunStep[] {
   return steps;
 }
 
+/** Verdicts by the demo check's number: judging takes a second for a long check, and the same steps always give the same. */
+const judged = new Map<number, Verdict>();
+
+function verdictOf(check: DemoCheck, setup: RunSetup, steps: readonly RunStep[]): Verdict {
+  const verdict = judged.get(check.number) ?? judge({ setup, steps }).verdict;
+  judged.set(check.number, verdict);
+  return verdict;
+}
+
 function rowOf(check: DemoCheck, steps: readonly RunStep[]): typeof checks.$inferInsert {
   const setup = setupOf(check);
   const person = DEMO_PEOPLE.find((p) => p.email.startsWith(`${check.person}@`));
@@ -66,7 +76,7 @@ function rowOf(check: DemoCheck, steps: readonly RunStep[]): typeof checks.$infe
   };
   if (check.running) return { ...common, state: "running" };
   const finishedAt = new Date(Date.parse(steps.at(-1)?.at ?? check.at) + LAST_LOOK);
-  return { ...common, state: "finished", finishedAt, ...verdictColumns(judge({ setup, steps }).verdict) };
+  return { ...common, state: "finished", finishedAt, ...verdictColumns(verdictOf(check, setup, steps)) };
 }
 
 /**

@@ -8,7 +8,7 @@ import type { Reading, Setup } from "../types";
 import { holds, type Claim } from "./claim";
 
 /** The likeliest so many candidates against the claim, of a set that fails, are kept as rivals for the sets to come. */
-const RIVALS_A_SET = 3;
+const RIVALS_A_SET = 12;
 /** Fits stop a little short of their end when they are hopeless: this near the mark the rivals alone decide nothing. */
 const MARGIN = 0.01;
 
@@ -18,6 +18,8 @@ const MARGIN = 0.01;
  * Only sets that pass are put before every candidate, and those that fail there name new rivals.
  */
 export class Court {
+  /** Sets put before every candidate so far. */
+  full = 0;
   private readonly rulings = new Map<string, boolean>();
   private readonly failed: ReadonlySet<number>[] = [];
   private readonly rivals = new Set<Candidate>();
@@ -41,13 +43,26 @@ export class Court {
     return this.failed.some((larger) => set.every((i) => larger.has(i)));
   }
 
+  /** False: the set does not carry. True: nothing known so far speaks against it. Quick. */
+  mayCarry(set: readonly number[]): boolean {
+    const known = this.rulings.get(nameOf(set));
+    if (known !== undefined) return known;
+    if (this.own.length === 0) return this.carries(set);
+    return this.share(this.of(set)) >= this.claim.leastShare - MARGIN || this.rule(set, false, []);
+  }
+
+  /** Does the set carry? As slow as a belief over everything, unless the rivals known so far decide it. */
   carries(set: readonly number[]): boolean {
     const known = this.rulings.get(nameOf(set));
     if (known !== undefined) return known;
-    const readings = this.readings.filter((_, i) => set.includes(i));
-    if (this.own.length > 0 && this.share(readings) < this.claim.leastShare - MARGIN) return this.rule(set, false, []);
-    const believed = beliefs(this.setup, readings);
+    if (this.own.length > 0 && !this.mayCarry(set)) return false;
+    this.full++;
+    const believed = beliefs(this.setup, this.of(set));
     return this.rule(set, holds(this.claim, believed), believed);
+  }
+
+  private of(set: readonly number[]): readonly Reading[] {
+    return this.readings.filter((_, i) => set.includes(i));
   }
 
   private rule(set: readonly number[], carried: boolean, believed: readonly Believed[]): boolean {

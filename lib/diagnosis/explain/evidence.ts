@@ -1,15 +1,15 @@
-import { beliefs } from "../assess";
 import { parseCheck } from "../checks";
 import { faultId, type Candidate } from "../circuit/candidate";
 import { CHECK_INDEX } from "../circuit/predict";
 import { candidatesForEntry, candidatesForUnknown } from "../inference/candidates";
+import { contradictions } from "../inference/contradiction";
 import { observe } from "../inference/observe";
 import { outlookOf } from "../inference/outlook";
 import { believe, type Believed } from "../inference/posterior";
 import { DEFAULT_METER, meterLimit } from "../meter";
 import type { EvidenceRow, Fault, Prediction, Reading, Setup } from "../types";
 import { factorOf } from "./effects";
-import { drain, leavingOut } from "./leaving-out";
+import { believedOf, drain, leavingOut, type LeavingOut } from "./leaving-out";
 import { predictionOf, type Piece } from "./prediction";
 
 /** From this chance on a finding is shown as the kind and pins that make it likeliest; below it, as the verdict's own. */
@@ -55,7 +55,7 @@ function expectedOf(candidates: readonly Candidate[], setup: Setup, others: read
  * Returns null for an unknown check or a finding that this device cannot have.
  */
 export function predict(setup: Setup, readings: readonly Reading[], fault: Fault, check: string): Prediction | null {
-  const candidates = parseCheck(check) ? standIns(setup, beliefs(setup, readings), fault) : [];
+  const candidates = parseCheck(check) ? standIns(setup, believedOf(setup, readings), fault) : [];
   return candidates.length === 0 ? null : expectedOf(candidates, setup, readings.filter(([c]) => c !== check), check);
 }
 
@@ -64,19 +64,27 @@ function distance(value: Reading[1], expected: Prediction, limit: number | null)
   return typeof value === "number" && expected.number && limit !== null && limit > 0 ? (value - expected.number.middle) / limit : null;
 }
 
+/** Belief with all readings and with each left out; of readings that contradict each other only the former, for what they move means nothing. */
+function* weighed(setup: Setup, readings: readonly Reading[]): Generator<void, { all: readonly Believed[]; without: LeavingOut["without"] | null }> {
+  const all = believedOf(setup, readings);
+  if (contradictions(all[0]!, readings, setup.meter ?? DEFAULT_METER).length > 0) return { all, without: null };
+  return yield* leavingOut(setup, readings);
+}
+
 /** The same as `evidence`, in steps of at most one belief each. */
 export function* evidenceSteps(setup: Setup, readings: readonly Reading[], fault: Fault): Generator<void, EvidenceRow[]> {
-  const { all, without } = yield* leavingOut(setup, readings), meter = setup.meter ?? DEFAULT_METER, id = faultId(fault);
+  const meter = setup.meter ?? DEFAULT_METER, id = faultId(fault), { all, without } = yield* weighed(setup, readings);
   const sound = standIns(setup, all, { code: "none" }), found = standIns(setup, all, fault), chance = chanceOf(all, id), rows: EvidenceRow[] = [];
   if (sound.length === 0 || found.length === 0) return [];
   for (const [i, [check, value]] of readings.entries()) {
     yield;
     const others = readings.filter((_, k) => k !== i);
     const ifSound = expectedOf(sound, setup, others, check), ifFinding = fault.code === "none" ? ifSound : expectedOf(found, setup, others, check);
-    const limit = typeof value === "number" ? meterLimit(parseCheck(check)!, value, meter) : null, left = chanceOf(without[i]!, id);
+    const limit = typeof value === "number" ? meterLimit(parseCheck(check)!, value, meter) : null;
+    const left = without ? chanceOf(without[i]!, id) : null;
     rows.push({
       check, value, ifSound, ifFinding, limit, offLimits: distance(value, ifFinding, limit), offIfSound: distance(value, ifSound, limit),
-      factor: factorOf(chance, left), without: Math.min(1, left),
+      factor: left === null ? null : factorOf(chance, left), without: left === null ? null : Math.min(1, left),
     });
   }
   return rows;
@@ -85,7 +93,7 @@ export function* evidenceSteps(setup: Setup, readings: readonly Reading[], fault
 /**
  * The evidence for and against one finding: each reading beside what it should have been if all were sound and if the finding
  * is true (the other readings given), how far off it is in limits of error (JCGM 100:2008 4.3.7 half-widths), and by how
- * much it moved the chance of the finding. Empty when this device cannot have the finding.
+ * much it moved the chance of the finding. Empty when this device cannot have the finding; no factors where readings contradict each other.
  */
 export function evidence(setup: Setup, readings: readonly Reading[], fault: Fault): EvidenceRow[] {
   return drain(evidenceSteps(setup, readings, fault));

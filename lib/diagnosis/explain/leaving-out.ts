@@ -5,6 +5,15 @@ import type { Reading, Setup } from "../types";
 /** Belief with all readings, and with each of them left out in turn (same order as the readings). */
 export interface LeavingOut { readonly all: readonly Believed[]; readonly without: readonly (readonly Believed[])[] }
 
+/** Belief with all readings, made once for all explanations of them. */
+let whole: { readonly name: string; readonly all: readonly Believed[] } | null = null;
+
+export function believedOf(setup: Setup, readings: readonly Reading[]): readonly Believed[] {
+  const name = JSON.stringify([setup, readings]);
+  if (whole?.name !== name) whole = { name, all: beliefs(setup, readings) };
+  return whole.all;
+}
+
 /** The last one made: every explanation of the same readings starts from it, and it costs one belief a reading. */
 let last: { readonly name: string; readonly made: LeavingOut } | null = null;
 
@@ -15,7 +24,7 @@ let last: { readonly name: string; readonly made: LeavingOut } | null = null;
 export function* leavingOut(setup: Setup, readings: readonly Reading[]): Generator<void, LeavingOut> {
   const name = JSON.stringify([setup, readings]);
   if (last?.name === name) return last.made;
-  const all = beliefs(setup, readings), without: (readonly Believed[])[] = [];
+  const all = believedOf(setup, readings), without: (readonly Believed[])[] = [];
   for (let i = 0; i < readings.length; i++) {
     yield;
     without.push(beliefs(setup, readings.filter((_, k) => k !== i)));

@@ -1,4 +1,3 @@
-import { beliefs } from "../assess";
 import { ALL_CHECKS, parseCheck } from "../checks";
 import { faultId, type Candidate } from "../circuit/candidate";
 import { candidatesForEntry, candidatesForUnknown } from "../inference/candidates";
@@ -11,6 +10,7 @@ import { DEFAULT_METER } from "../meter";
 import { rankTests } from "../planning";
 import { ROLES, type Fault, type MachineState, type Possibility, type Reading, type Setup, type TellingCheck } from "../types";
 import { whyText } from "../words";
+import { believedOf } from "./leaving-out";
 import { predictionOf, type Piece } from "./prediction";
 
 /** Least information, bits, for a check to be named as one that tells possibilities apart. */
@@ -56,7 +56,7 @@ const switches = (s: MachineState): readonly (boolean | null)[] => [s.devicePart
  * Method: expected information per effort, as for the next check (de Kleer & Williams 1987).
  */
 export function tellApart(setup: Setup, readings: readonly Reading[], among: readonly (Fault | Possibility)[]): TellingCheck[] {
-  const all = beliefs(setup, readings);
+  const all = believedOf(setup, readings);
   const sides = among.map((possibility) => piecesOf(setup, readings, all, possibility)), rows = sides.length;
   if (rows < 2 || sides.some((pieces) => pieces.length === 0)) return [];
   const expected: Expected[] = sides.flatMap((pieces, row) => pieces.map(({ p, outlook }) => ({ p: p / rows, row, outlook }))).sort((a, b) => b.p - a.p);
