@@ -7,7 +7,7 @@ import { DEFAULT_METER } from "../meter";
 import type { Reading, Setup } from "../types";
 import { holds, type Claim } from "./claim";
 
-/** The likeliest so many candidates against the claim, of a set that fails, are kept as rivals for the sets to come. */
+/** The likeliest so many candidates against the claim, of a set put before every candidate, are kept as rivals for the sets to come. */
 const RIVALS_A_SET = 12;
 /** Fits stop a little short of their end when they are hopeless: this near the mark the rivals alone decide nothing. */
 const MARGIN = 0.01;
@@ -15,7 +15,7 @@ const MARGIN = 0.01;
 /**
  * Decides which sets of readings carry a claim; sets are places in the list of readings. Most sets do not, and a few rivals are
  * enough to see that: the claim's share among its own candidates and some rivals is an upper bound of its share among all.
- * Only sets that pass are put before every candidate, and those that fail there name new rivals.
+ * Only sets that pass are put before every candidate, and those name new rivals.
  */
 export class Court {
   /** Sets put before every candidate so far. */
@@ -67,10 +67,9 @@ export class Court {
 
   private rule(set: readonly number[], carried: boolean, believed: readonly Believed[]): boolean {
     this.rulings.set(nameOf(set), carried);
-    if (carried) return true;
-    this.failed.push(new Set(set));
+    if (!carried) this.failed.push(new Set(set));
     for (const b of believed.filter((one) => !this.claim.includes(one.candidate)).slice(0, RIVALS_A_SET)) this.rivals.add(b.candidate);
-    return false;
+    return carried;
   }
 
   /** The claim's share among its own candidates and the rivals known so far, 0..1. */
