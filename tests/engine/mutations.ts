@@ -70,5 +70,5 @@ export const MUTATIONS: readonly Mutation[] = [
   ...inFile("meter.ts", ["limit taken as one standard deviation", "return limit / Math.sqrt(3);", "return limit;"]),
   ...inFile("checks.ts",
     ["ohms with the power on", "HARNESS_COLD: MachineState = { deviceParted: true, controllerParted: false, powerOn: false }", "HARNESS_COLD: MachineState = { deviceParted: true, controllerParted: false, powerOn: true }"],
-    ["leads exchanged on the parted device", "[[a, b], [b, a]] as const).map(([red, black])", "[[a, b], [b, a]] as const).map(([black, red])"]),
+    ["leads exchanged on the parted device", '{ place: "device", meter: "ohms", red, black, position,', '{ place: "device", meter: "ohms", red: black, black: red, position,']),
 ];

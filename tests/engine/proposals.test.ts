@@ -44,6 +44,16 @@ describe("the next check", SLOW, () => {
   });
 });
 
+describe("a check's name", () => {
+  // Source: README of the bench: the red lead on A, the black one on B or on battery negative; actuator at P.
+  it("says where each lead goes, and where the actuator stands", () => {
+    for (const { code, red, black, position } of vocabulary().filter(({ meter }) => meter === "ohms" || meter === "dc-volts")) {
+      const [leads = "", at = null] = code.split(":").at(-1)!.split("@"), [a, b] = leads.split("-");
+      expect(code === "volt:battery" ? [red, black] : [String(red), String(black), position], code).toEqual(code === "volt:battery" ? ["battery", "gnd"] : [a, b ?? a, at]);
+    }
+  });
+});
+
 describe("a check followed to its end", SLOW, () => {
   it("ends done, with 95 % of the chances in the open findings, and says when nothing more can be told apart", () => {
     holds((seed) => {
