@@ -2,9 +2,10 @@ import { ALL_CHECKS } from "./checks";
 import { CHECK_INDEX } from "./circuit/predict";
 import { candidatesForEntry, candidatesForUnknown } from "./inference/candidates";
 import { rankChecks } from "./inference/choose";
-import { contradictions, fitsBadly } from "./inference/contradiction";
+import { contradictions, FAR, fitsBadly, misfits } from "./inference/contradiction";
 import { observe } from "./inference/observe";
 import { believe, type Believed } from "./inference/posterior";
+import { weighSlips, type Weighed } from "./inference/slips";
 import { marginals, type Marginals } from "./inference/standing";
 import { DEFAULT_METER } from "./meter";
 import type { PlannedTest } from "./planning";
@@ -19,8 +20,10 @@ const SETTLED = 0.985;
 /** Bits per unit of effort below which a further check is not worth a technician's while. */
 const WORTH_WHILE = 0.012;
 const MOST_NEXT = 5;
+/** Readings up to which each is weighed as wrong: more of them hold one another up, and take longer. */
+const MOST_WEIGHED = 16;
 
-/** Belief over everything that may be true of the machine, likeliest first. */
+/** Belief over everything that may be true of the machine, all readings taken as right, likeliest first. */
 export function beliefs(setup: Setup, readings: readonly Reading[]): Believed[] {
   const meter = setup.meter ?? DEFAULT_METER, observations = observe(readings, meter);
   if (!setup.expect) return believe(candidatesForUnknown(setup.experience), observations, meter);
@@ -29,6 +32,18 @@ export function beliefs(setup: Setup, readings: readonly Reading[]): Believed[] 
   // The entry cannot explain the readings: another device may be fitted, or its pins may differ.
   const shifted = (list: ReturnType<typeof candidatesForEntry>, share: number) => list.map((c) => ({ ...c, logPrior: c.logPrior + ln(share) }));
   return believe([...shifted(candidatesForEntry(setup.expect, setup.experience), ENTRY_IS_RIGHT), ...shifted(candidatesForUnknown(setup.experience), 1 - ENTRY_IS_RIGHT)], observations, meter);
+}
+
+/** The belief, with the chance that one reading is wrong counted in where it matters: before a verdict, and where something does not fit. */
+function weighed(setup: Setup, readings: readonly Reading[]): Weighed {
+  const meter = setup.meter ?? DEFAULT_METER, observations = observe(readings, meter), believed = beliefs(setup, readings);
+  const far = misfits(believed[0]!, observations, meter), odd = far.some((f) => f > FAR);
+  if (readings.length < 2 || readings.length > MOST_WEIGHED || !(odd || settled(marginals(believed)))) return { believed, slips: observations.map(() => 0) };
+  const everything = setup.expect ? candidatesForEntry(setup.expect, setup.experience) : candidatesForUnknown(setup.experience);
+  // Every device there is takes a while to look through: that is done without the reading that fits worst. Without any other, the device stands as identified.
+  const worst = odd ? far.indexOf(Math.max(...far)) : -1, { family, pinOf } = believed[0]!.candidate;
+  const likely = everything.filter((c) => c.family === family && `${c.pinOf}` === `${pinOf}`);
+  return weighSlips((i) => (i === worst || likely.length === 0 ? everything : likely), observations, meter, believed);
 }
 
 /**
@@ -40,7 +55,7 @@ export function beliefs(setup: Setup, readings: readonly Reading[]): Believed[] 
 export function assess(setup: Setup, readings: readonly Reading[]): Assessment {
   const problem = validate(setup, readings);
   if (problem) return { state: "invalid-input", ...problem };
-  const meter = setup.meter ?? DEFAULT_METER, believed = beliefs(setup, readings), m = marginals(believed);
+  const meter = setup.meter ?? DEFAULT_METER, { believed, slips } = weighed(setup, readings), m = marginals(believed);
   const ranked = rankChecks(setup, readings, believed, meter);
   const answered = settled(m), worth = ranked.filter((r) => r.gainBits / r.effort >= WORTH_WHILE);
   const done = answered || worth.length === 0;
@@ -48,7 +63,7 @@ export function assess(setup: Setup, readings: readonly Reading[]): Assessment {
     ...m, done, inseparable: done && m.openFindings.length > 1 && worth.length === 0,
     next: ranked.slice(0, MOST_NEXT).map((r) => nextCheck(r, setup)),
   };
-  const suspects = contradictions(believed[0]!, readings, meter);
+  const suspects = contradictions(believed[0]!, readings, meter, slips);
   if (suspects.length > 0) return { state: "contradictory", suspects, ...standing };
   return { state: readings.length === 0 ? "needs-reading" : "ranked", ...standing };
 }

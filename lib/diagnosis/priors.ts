@@ -68,3 +68,9 @@ export const ENTRY_IS_RIGHT = 0.97;
 /** A test terminal tried in a contact: a bad contact feels loose 95 times in 100, a sound one 3 (common practice). */
 export const LOOSE_IF_BAD = 0.95;
 export const LOOSE_IF_SOUND = 0.03;
+
+/**
+ * Chance that a reading is entered wrong, a check: by a power of ten, on another pin, with its sign lost, or otherwise
+ * (common practice: about one entry in a hundred).
+ */
+export const SLIP = { decimal: 0.003, pin: 0.003, sign: 0.001, other: 0.003 } as const;

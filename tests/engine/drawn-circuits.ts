@@ -3,7 +3,7 @@ import { beliefs } from "@/lib/diagnosis/assess";
 import type { Candidate } from "@/lib/diagnosis/circuit/candidate";
 import { P, PARAMETER_COUNT } from "@/lib/diagnosis/circuit/parameters";
 import { ALL_GROUPS, newPredictions, predictInto, WHOLE_PLAN, type Predictions } from "@/lib/diagnosis/circuit/predict";
-import { physical } from "@/lib/diagnosis/inference/fit";
+import { physical } from "@/lib/diagnosis/inference/misfit";
 import { normal } from "../support/draw-machine";
 import type { Description } from "../support/machine-netlist";
 

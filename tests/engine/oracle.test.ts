@@ -3,7 +3,8 @@ import { DEFAULT_METER, type Expect, type Reading, type Setup } from "@/lib/diag
 import { beliefs } from "@/lib/diagnosis/assess";
 import { P } from "@/lib/diagnosis/circuit/parameters";
 import { observe } from "@/lib/diagnosis/inference/observe";
-import { evidenceOf, fitCandidate } from "@/lib/diagnosis/inference/fit";
+import { fitCandidate } from "@/lib/diagnosis/inference/fit";
+import { evidenceOf } from "@/lib/diagnosis/inference/misfit";
 import type { Candidate } from "@/lib/diagnosis/circuit/candidate";
 import { bruteLogEvidence, gridLogEvidence } from "../support/brute-force";
 import { drawer } from "../support/draw";

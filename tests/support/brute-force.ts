@@ -2,7 +2,7 @@ import { DEFAULT_METER, meterLimit, parseCheck, type Reading } from "@/lib/diagn
 import type { Candidate } from "@/lib/diagnosis/circuit/candidate";
 import { PARAMETER_COUNT } from "@/lib/diagnosis/circuit/parameters";
 import { ALL_GROUPS, CHECK_INDEX, newPredictions, planFor, predictInto } from "@/lib/diagnosis/circuit/predict";
-import { physical } from "@/lib/diagnosis/inference/fit";
+import { physical } from "@/lib/diagnosis/inference/misfit";
 import { normal } from "./draw-machine";
 
 type Draw = () => number;

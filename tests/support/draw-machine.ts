@@ -4,7 +4,7 @@ import { beliefs } from "@/lib/diagnosis/assess";
 import type { Candidate } from "@/lib/diagnosis/circuit/candidate";
 import { PARAMETER_COUNT } from "@/lib/diagnosis/circuit/parameters";
 import { ALL_GROUPS, CHECK_INDEX, newPredictions, predictInto, WHOLE_PLAN, type Predictions } from "@/lib/diagnosis/circuit/predict";
-import { physical } from "@/lib/diagnosis/inference/fit";
+import { physical } from "@/lib/diagnosis/inference/misfit";
 import { scalePrediction, unscale } from "@/lib/diagnosis/inference/observe";
 import { resolutionAt } from "@/lib/diagnosis/meter";
 

@@ -7,7 +7,7 @@ import type { Believed } from "./posterior";
 import { norm } from "../numerics";
 
 /** A reading this many standard uncertainties from what the best explanation expects contradicts it. */
-const FAR = 7;
+export const FAR = 7;
 /** Log-chance of a word below which it contradicts (a loose fit in a sound contact, 3 in 100, does not). */
 const UNLIKELY_WORD = -6;
 
@@ -30,9 +30,14 @@ export function fitsBadly(b: Believed, observations: readonly Observation[], met
   return misfits(b, observations, meter).some((r) => r > FAR);
 }
 
-/** Readings that the best explanation cannot account for, worst first: those to take again. */
-export function contradictions(b: Believed, readings: readonly Reading[], meter: MeterSpec): { check: string; why: string }[] {
-  const observations = observe(readings, meter), far = misfits(b, observations, meter);
-  return observations.map((o, i) => ({ check: o.spec.code, far: far[i]! })).filter((s) => s.far > FAR).sort((a, b2) => b2.far - a.far)
+/** Chance of a slip from which a reading is named. */
+const NAMED_FROM = 0.5;
+
+/** Readings to take again, worst first: those most likely entered wrong, and those that the best explanation cannot account for. */
+export function contradictions(b: Believed, readings: readonly Reading[], meter: MeterSpec, slips: readonly number[] = []): { check: string; why: string }[] {
+  const observations = observe(readings, meter), far = misfits(b, observations, meter), slipped = slips.some((p) => p > NAMED_FROM);
+  // Where one slip explains all, what the best explanation is off elsewhere is not held against other readings.
+  return observations.map((o, i) => ({ check: o.spec.code, slip: slips[i] ?? 0, far: far[i]! })).filter((s) => (slipped ? s.slip > NAMED_FROM : s.far > FAR))
+    .sort((a, b2) => b2.slip - a.slip || b2.far - a.far)
     .map(({ check }) => ({ check, why: "No single explanation fits this reading together with the others. Take it again." }));
 }

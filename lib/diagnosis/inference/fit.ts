@@ -4,8 +4,6 @@ import { factor, logDeterminant, solveFactored } from "./cholesky";
 import { differentiate, evaluate, makeRoom, normalEquations, pullInFull, stillOpen, stuck, type Evidence } from "./misfit";
 import { movedBy } from "./movable";
 
-export { evidenceOf, physical } from "./misfit";
-
 /**
  * Joint fit of everything unknown to everything read. Parameters are measured in standard deviations of
  * their range (z); the misfit is robust (a single wild reading pulls with bounded force); the integral over
@@ -36,17 +34,14 @@ export function fitCandidate(c: Candidate, e: Evidence, start: Float64Array, lea
   makeRoom(e.observations.length);
   const log = evaluate(c, start, e);
   if (log + stillOpen() < least) return givenUp(start);
-  if (!stuck(e)) return climb(c, e, start, log, least);
-  const near = pulledIn(c, e, start);
-  const fit = climb(c, e, near, evaluate(c, near, e), least);
-  if (fit.logEvidence === -Infinity || !stuck(e)) return fit;
-  return betterOf(fit, climb(c, e, start, log, Math.max(least, fit.logEvidence)), () => start.every((v) => v === 0) ? fit : afresh(c, e, Math.max(least, fit.logEvidence)));
-}
-
-/** The better of two fits, or a third where both leave a number unexplained. */
-function betterOf(a: Fit, b: Fit, third: () => Fit): Fit {
-  const better = b.logEvidence > a.logEvidence ? b : a, last = third();
-  return last.logEvidence > better.logEvidence ? last : better;
+  const direct = climb(c, e, start, log, least);
+  if (direct.logEvidence === -Infinity || !stuck(e)) return direct;
+  const reach = Math.max(least, direct.logEvidence), near = pulledIn(c, e, start);
+  const pulled = climb(c, e, near, evaluate(c, near, e), reach);
+  const better = pulled.logEvidence > direct.logEvidence ? pulled : direct;
+  if (!stuck(e) || start.every((v) => v === 0)) return better;
+  const fresh = afresh(c, e, Math.max(least, better.logEvidence));
+  return fresh.logEvidence > better.logEvidence ? fresh : better;
 }
 
 /** A climb from the middle of every range. */

@@ -10,6 +10,8 @@ export interface Observation {
   readonly spec: CheckSpec;
   readonly group: number;
   readonly word: string | null;
+  /** Number as read, in the check's unit; 0 where a word was entered. */
+  readonly value: number;
   readonly scaled: number;
   readonly sd: number;
   readonly logPeak: number;
@@ -57,9 +59,9 @@ export function observe(readings: readonly Reading[], meter: MeterSpec = DEFAULT
 
 function observation(index: number, value: Reading[1], meter: MeterSpec): Observation {
   const spec = ALL_CHECKS[index]!, group = CHECK_GROUP[index]!;
-  if (typeof value === "string") return { index, spec, group, word: value, scaled: 0, sd: 1, logPeak: 0 };
+  if (typeof value === "string") return { index, spec, group, word: value, value: 0, scaled: 0, sd: 1, logPeak: 0 };
   const sd = scaledSd(spec, value, meter);
-  return { index, spec, group, word: null, scaled: scale(spec, value), sd, logPeak: -ln(sd) - LOG_ROOT_TWO_PI };
+  return { index, spec, group, word: null, value, scaled: scale(spec, value), sd, logPeak: -ln(sd) - LOG_ROOT_TWO_PI };
 }
 
 /** Least log-chance given to a word that a candidate rules out: people misread and mistype. */

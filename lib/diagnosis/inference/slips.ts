@@ -1,0 +1,96 @@
+import { ALL_CHECKS } from "../checks";
+import type { Candidate } from "../circuit/candidate";
+import { CHECK_INDEX } from "../circuit/predict";
+import { SLIP } from "../priors";
+import type { CheckSpec, MeterSpec } from "../types";
+import { scale, type Observation } from "./observe";
+import { outlookOf, type Outlook } from "./outlook";
+import { believe, type Believed } from "./posterior";
+import { exp, ln, square } from "../numerics";
+
+/**
+ * One reading of a check may be wrong: mistyped by a power of ten, a sign lost, taken on another pin, or wrong in some other
+ * way. Each such case is weighed beside "all are right": the belief without that reading, times the chance of what was
+ * entered in its place (Bayes' rule over who erred; one slip a check, since two are rare and cannot be told from anything).
+ */
+export interface Weighed {
+  readonly believed: Believed[];
+  /** Chance that an observation is a slip, in the order of the observations, 0..1. */
+  readonly slips: readonly number[];
+}
+
+/** Candidates looked into when a slip is weighed hold at least this share of the belief without the reading. */
+const LOOKED_INTO = 0.004;
+/** A slip less likely than this against all else is left out. */
+const NEGLIGIBLE = 1e-4;
+/** Width of what may be shown at all on the comparison scale: natural logarithm of ohms and hertz, volts, duty. */
+const WIDTH: Readonly<Record<CheckSpec["unit"], number>> = { ohm: 20, volt: 60, hertz: 12, ratio: 1, word: 1 };
+/** Chance of a word when any may have been entered. */
+const ANY_WORD = 0.3;
+const LOG_ROOT_TWO_PI = 0.5 * ln(2 * Math.PI);
+
+/** Weighs the base belief against one reading being wrong; `poolFor` gives the candidates to look through without that observation. */
+export function weighSlips(poolFor: (left: number) => readonly Candidate[], obs: readonly Observation[], meter: MeterSpec, base: readonly Believed[]): Weighed {
+  const entries: Believed[] = base.map((b) => ({ ...b })), from: number[] = base.map(() => -1);
+  const best = base[0]!.logWeight;
+  obs.forEach((o, i) => {
+    const without = believe(poolFor(i), obs.filter((_, k) => k !== i), meter);
+    for (const b of without) {
+      if (b.p < LOOKED_INTO) break;
+      const logWeight = b.logWeight + ln(slipChance(o, outlookOf(b, meter)));
+      if (logWeight < best + ln(NEGLIGIBLE)) continue;
+      entries.push({ ...b, logWeight });
+      from.push(i);
+    }
+  });
+  return normalised(entries, from, obs.length);
+}
+
+function normalised(entries: Believed[], from: readonly number[], count: number): Weighed {
+  const most = entries.reduce((m, b) => Math.max(m, b.logWeight), -Infinity), slips = new Array<number>(count).fill(0);
+  const total = entries.reduce((sum, b) => sum + exp(b.logWeight - most), 0);
+  entries.forEach((b, k) => {
+    b.p = exp(b.logWeight - most) / total;
+    if (from[k]! >= 0) slips[from[k]!]! += b.p;
+  });
+  const believed = entries.sort((a, b) => b.logWeight - a.logWeight || (a.candidate.hypothesis.id < b.candidate.hypothesis.id ? -1 : 1));
+  return { believed, slips };
+}
+
+/** Chance (density on the comparison scale for numbers) that a slip enters what was entered, where `outlook` is the truth. */
+function slipChance(o: Observation, outlook: Outlook): number {
+  const others = besides(o.spec), near = others.reduce((sum, index) => sum + shownAt(o, index, outlook), 0) / Math.max(1, others.length);
+  if (o.word !== null) return SLIP.other * ANY_WORD + SLIP.pin * near;
+  return SLIP.other / WIDTH[o.spec.unit] + SLIP.pin * near + SLIP.decimal * decimals(o, outlook) + SLIP.sign * signLost(o, outlook);
+}
+
+/** Chance or density of what was entered if it was read at another check. */
+function shownAt(o: Observation, index: number, outlook: Outlook): number {
+  const word = outlook.word[index]!;
+  if (o.word === null) return (1 - word) * density(o.scaled, outlook.mean[index]!, outlook.sd[index]!);
+  return o.word === "jumps" ? outlook.jumps[index]! : o.word === "smooth" || o.word === "grips" ? 1 - word - outlook.jumps[index]! : word;
+}
+
+const POWERS = [10, 0.1, 1000, 0.001] as const;
+
+function decimals(o: Observation, outlook: Outlook): number {
+  const { mean, sd, word } = outlook, shown = 1 - word[o.index]!, value = o.value;
+  if (o.spec.unit === "ratio" || shown < 0.01) return 0;
+  const steep = (power: number) => (o.spec.unit === "volt" ? power : 1);
+  return POWERS.reduce((sum, power) => sum + shown * steep(power) * density(scale(o.spec, value * power), mean[o.index]!, sd[o.index]!), 0) / POWERS.length;
+}
+
+const signLost = (o: Observation, outlook: Outlook) => (o.spec.unit === "volt" ? density(-o.scaled, outlook.mean[o.index]!, outlook.sd[o.index]!) : 0);
+
+function density(at: number, mean: number, sd: number): number {
+  return sd > 0 ? exp(-0.5 * square((at - mean) / sd) - LOG_ROOT_TWO_PI) / sd : 0;
+}
+
+const cache = new Map<string, readonly number[]>();
+
+/** Checks a lead may have been put to by mistake: the same quantity and place, at other pins. */
+function besides(spec: CheckSpec): readonly number[] {
+  let list = cache.get(spec.code);
+  if (!list) cache.set(spec.code, list = ALL_CHECKS.filter((c) => c !== spec && c.place === spec.place && c.meter === spec.meter && c.position === spec.position && (c.black === "gnd") === (spec.black === "gnd")).map((c) => CHECK_INDEX.get(c.code)!));
+  return list;
+}
