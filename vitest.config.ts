@@ -14,6 +14,8 @@ export default defineConfig({
   test: {
     include: ["tests/engine/**/*.test.ts", "lib/**/*.test.ts", "components/**/*.test.{ts,tsx}", "db/**/*.test.ts", "seed/**/*.test.ts", "tests/published-values/**/*.test.ts", "tests/integration/**/*.test.ts"],
     environment: "node",
+    // Vitest leaves a core to itself; on two cores that would be half of them.
+    maxWorkers: 2,
     testTimeout: 30_000,
     hookTimeout: 60_000,
   },
