@@ -1,19 +1,18 @@
 import { ALL_CHECKS } from "./checks";
 import { CHECK_INDEX } from "./circuit/predict";
-import { candidatesForEntry, candidatesForUnknown } from "./inference/candidates";
+import { candidatesForDoubtedEntry, candidatesForEntry, candidatesForUnknown } from "./inference/candidates";
 import { rankChecks } from "./inference/choose";
 import { contradictions, FAR, fitsBadly, misfits } from "./inference/contradiction";
-import { observe } from "./inference/observe";
-import { believe, type Believed } from "./inference/posterior";
+import { observe, type Observation } from "./inference/observe";
+import { PartFits } from "./inference/part-fits";
+import { believeWith, type Believed } from "./inference/posterior";
 import { weighSlips, type Weighed } from "./inference/slips";
 import { marginals, type Marginals } from "./inference/standing";
 import { DEFAULT_METER } from "./meter";
 import type { PlannedTest } from "./planning";
-import { ENTRY_IS_RIGHT } from "./priors";
 import type { Assessment, NextCheck, Reading, Setup } from "./types";
 import { validate } from "./validate";
 import { whyText } from "./words";
-import { ln } from "./numerics";
 
 /** Belief in a finding, a kind and pins at which the question counts as answered. */
 const SETTLED = 0.985;
@@ -26,24 +25,28 @@ const MOST_WEIGHED = 16;
 /** Belief over everything that may be true of the machine, all readings taken as right, likeliest first. */
 export function beliefs(setup: Setup, readings: readonly Reading[]): Believed[] {
   const meter = setup.meter ?? DEFAULT_METER, observations = observe(readings, meter);
-  if (!setup.expect) return believe(candidatesForUnknown(setup.experience), observations, meter);
-  const byEntry = believe(candidatesForEntry(setup.expect, setup.experience), observations, meter);
-  if (!fitsBadly(byEntry[0]!, observations, meter)) return byEntry;
+  return believedFrom(setup, observations, new PartFits(observations, meter));
+}
+
+function believedFrom(setup: Setup, observations: readonly Observation[], fits: PartFits): Believed[] {
+  if (!setup.expect) return believeWith(fits, candidatesForUnknown(setup.experience));
+  const byEntry = believeWith(fits, candidatesForEntry(setup.expect, setup.experience));
+  if (!fitsBadly(byEntry[0]!, observations, fits.meter)) return byEntry;
   // The entry cannot explain the readings: another device may be fitted, or its pins may differ.
-  const shifted = (list: ReturnType<typeof candidatesForEntry>, share: number) => list.map((c) => ({ ...c, logPrior: c.logPrior + ln(share) }));
-  return believe([...shifted(candidatesForEntry(setup.expect, setup.experience), ENTRY_IS_RIGHT), ...shifted(candidatesForUnknown(setup.experience), 1 - ENTRY_IS_RIGHT)], observations, meter);
+  return believeWith(fits, candidatesForDoubtedEntry(setup.expect, setup.experience));
 }
 
 /** The belief, with the chance that one reading is wrong counted in where it matters: before a verdict, and where something does not fit. */
 function weighed(setup: Setup, readings: readonly Reading[]): Weighed {
-  const meter = setup.meter ?? DEFAULT_METER, observations = observe(readings, meter), believed = beliefs(setup, readings);
+  const meter = setup.meter ?? DEFAULT_METER, observations = observe(readings, meter), fits = new PartFits(observations, meter);
+  const believed = believedFrom(setup, observations, fits);
   const far = misfits(believed[0]!, observations, meter), odd = far.some((f) => f > FAR);
   if (readings.length < 2 || readings.length > MOST_WEIGHED || !(odd || settled(marginals(believed)))) return { believed, slips: observations.map(() => 0) };
   const everything = setup.expect ? candidatesForEntry(setup.expect, setup.experience) : candidatesForUnknown(setup.experience);
   // Every device there is takes a while to look through: that is done without the reading that fits worst. Without any other, the device stands as identified.
   const worst = odd ? far.indexOf(Math.max(...far)) : -1, { family, pinOf } = believed[0]!.candidate;
   const likely = everything.filter((c) => c.family === family && `${c.pinOf}` === `${pinOf}`);
-  return weighSlips((i) => (i === worst || likely.length === 0 ? everything : likely), observations, meter, believed);
+  return weighSlips((i) => (i === worst || likely.length === 0 ? everything : likely), fits, observations, meter, believed);
 }
 
 /**

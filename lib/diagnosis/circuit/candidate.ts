@@ -1,5 +1,5 @@
 import type { Expect, Fault, FaultCode, Hypothesis, Kind, PinAssignment, PinNumber, Role } from "../types";
-import { rangesFor, type Family, type Pull, type Ranges } from "./parameters";
+import { controllerClass, rangesFor, type Family, type Pull, type Ranges } from "./parameters";
 import { exp } from "../numerics";
 
 /** Roles as array places: supply 0, ground 1, signal 2. */
@@ -76,8 +76,8 @@ export function makeCandidate(p: Parts): Candidate {
     family: p.family, pull: p.pull, code, at, at2, breakEnd: p.breakEnd, running: p.running, pinOf,
     suppliedByBattery: p.expect?.supplyVolts === "battery",
     ranges, middle: ranges.mean.map((m, i) => (ranges.log[i] ? exp(m) : m)), logPrior: p.logPrior,
-    deviceKey: `${p.family}|${pinOf}|${DEVICE_FAULTS.has(code) ? code + p.breakEnd : ""}|${p.expect ? "entry" : ""}`,
-    harnessKey: `${p.family}|${p.pull}|${pinOf}|${HARNESS_SOUND.has(code) ? "" : `${code}${at}${at2}`}|${p.expect ? "entry" : ""}`,
+    deviceKey: `${p.family}|${pinOf}|${DEVICE_FAULTS.has(code) ? code + p.breakEnd : ""}|${p.expect ? JSON.stringify(p.expect) : ""}`,
+    harnessKey: `${controllerClass(p)}|${p.pull}|${pinOf}|${HARNESS_SOUND.has(code) ? "" : `${code}${at}${at2}`}|${p.expect ? JSON.stringify(p.expect) : ""}`,
   };
 }
 

@@ -53,6 +53,11 @@ export function rangesFor(family: Family, pull: Pull, fault: FaultCode, expect?:
   return r;
 }
 
+/** Families with the same name here have the same ranges of what the controller holds. */
+export function controllerClass({ family }: { readonly family: Family }): string {
+  return family === "open-collector" || family === "push-pull" ? family : "analogue";
+}
+
 function controllerRanges(r: RangeBuilder, family: Family, pull: Pull, expect?: Expect): void {
   const volts = expect?.supplyVolts;
   r.ratio(P.battery, 18, 1.7);

@@ -1,6 +1,6 @@
 import { FAMILIES, FAULT_PLACES, GROUND, makeCandidate, PERMUTATIONS, SIGNAL, SUPPLY, type Candidate, type FaultPlace, type Running } from "../circuit/candidate";
 import type { Family, Pull } from "../circuit/parameters";
-import { chancesBefore, FAMILY_SHARE, PULL_SHARE } from "../priors";
+import { chancesBefore, ENTRY_IS_RIGHT, FAMILY_SHARE, PULL_SHARE } from "../priors";
 import { KINDS, type Expect, type Experience, type Kind, type PinAssignment } from "../types";
 import { ln } from "../numerics";
 
@@ -79,4 +79,14 @@ const forEntry = remembered(({ expect, experience }: { expect: Expect; experienc
 /** Every way the device of a catalogue entry may be built and wired, taking the entry at its word. */
 export function candidatesForEntry(expect: Expect, experience?: Experience): readonly Candidate[] {
   return forEntry({ expect, experience });
+}
+
+const shifted = (list: readonly Candidate[], share: number) => list.map((c) => ({ ...c, logPrior: c.logPrior + ln(share) }));
+
+const forDoubtedEntry = remembered(({ expect, experience }: { expect: Expect; experience?: Experience }): readonly Candidate[] =>
+  [...shifted(candidatesForEntry(expect, experience), ENTRY_IS_RIGHT), ...shifted(candidatesForUnknown(experience), 1 - ENTRY_IS_RIGHT)]);
+
+/** Every way a machine may be built where the readings do not fit what the entry says: the entry's device, or any other in its place. */
+export function candidatesForDoubtedEntry(expect: Expect, experience?: Experience): readonly Candidate[] {
+  return forDoubtedEntry({ expect, experience });
 }

@@ -24,6 +24,8 @@ const LONGEST_STEP = 2.5;
 const FULL_PULL_STEPS = 4;
 /** A fit is given up when this many times what its next step promises, and a little more, would not be enough. */
 const TRUST = 6, MARGIN = 8;
+/** Gain, natural-log units, of the last step that is worth another, and of a step that is not worth making. */
+const WORTH_A_STEP = 0.02, SETTLED = 0.002;
 const MIDDLE = new Float64Array(PARAMETER_COUNT);
 
 /**
@@ -35,7 +37,7 @@ export function fitCandidate(c: Candidate, e: Evidence, start: Float64Array, lea
   const log = evaluate(c, start, e);
   if (log + stillOpen() < least) return givenUp(start);
   const direct = climb(c, e, start, log, least);
-  if (direct.logEvidence === -Infinity || !stuck(e)) return direct;
+  if (direct.logEvidence === -Infinity || !stuck(e) || direct.logEvidence + stillOpen() < least) return direct;
   const reach = Math.max(least, direct.logEvidence), near = pulledIn(c, e, start);
   const pulled = climb(c, e, near, evaluate(c, near, e), reach);
   const better = pulled.logEvidence > direct.logEvidence ? pulled : direct;
@@ -68,7 +70,7 @@ function pulledIn(c: Candidate, e: Evidence, start: Float64Array): Float64Array 
 interface Work { readonly z: Float64Array; readonly movable: readonly number[]; readonly precision: Float64Array; readonly gradient: Float64Array; readonly step: Float64Array; readonly trial: Float64Array }
 
 function workFor(c: Candidate, e: Evidence, start: Float64Array): Work {
-  const movable = movedBy(c, e.plan.groups), m = movable.length;
+  const movable = movedBy(c, e.plan.groups, e.pins), m = movable.length;
   return { z: Float64Array.from(start), movable, precision: new Float64Array(m * m), gradient: new Float64Array(m), step: new Float64Array(m), trial: new Float64Array(PARAMETER_COUNT) };
 }
 
@@ -88,12 +90,13 @@ function climb(c: Candidate, e: Evidence, start: Float64Array, from: number, lea
   evaluate(c, w.z, e);
   for (let iteration = 0, gained = Infinity; ; iteration++) {
     newtonStep(c, e, w, iteration > 0);
-    if (iteration === MAX_ITERATIONS) break;
-    if (log + TRUST * Math.max(gained, promised(w.gradient, w.step)) + MARGIN < least) return givenUp(w.z);
+    const promise = promised(w.gradient, w.step);
+    if (iteration === MAX_ITERATIONS || promise < SETTLED) break;
+    if (log + TRUST * Math.max(gained, promise) + MARGIN < least) return givenUp(w.z);
     const better = lineSearch(c, w, e, log);
     gained = better - log;
     log = Math.max(log, better);
-    if (gained < 0.02) break;
+    if (gained < WORTH_A_STEP) break;
   }
   return { logEvidence: log - 0.5 * logDeterminant(w.precision, w.movable.length), z: w.z, active: w.movable, precision: w.precision };
 }
@@ -120,4 +123,23 @@ function lineSearch(c: Candidate, w: Work, e: Evidence, from: number): number {
     if (log > from) { w.z.set(w.trial); return log; }
   }
   return -Infinity;
+}
+
+/** Where nothing was read. */
+export const NO_FIT: Fit = { logEvidence: 0, z: MIDDLE, active: [], precision: NOTHING };
+
+/** One fit out of several that have no unknown in common: their precision is block-diagonal. */
+export function together(...fits: readonly Fit[]): Fit {
+  const active = fits.flatMap((f) => f.active), m = active.length, precision = new Float64Array(m * m), z = new Float64Array(PARAMETER_COUNT);
+  let offset = 0, logEvidence = 0;
+  for (const f of fits) {
+    const k = f.active.length;
+    for (let i = 0; i < k; i++) {
+      z[f.active[i]!] = f.z[f.active[i]!]!;
+      for (let j = 0; j <= i; j++) precision[(offset + i) * m + offset + j] = f.precision[i * k + j]!;
+    }
+    offset += k;
+    logEvidence += f.logEvidence;
+  }
+  return { logEvidence, z, active, precision };
 }

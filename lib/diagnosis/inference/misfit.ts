@@ -1,4 +1,5 @@
 import type { Candidate } from "../circuit/candidate";
+import { ALL_PINS } from "../circuit/harness-parts";
 import { PARAMETER_COUNT } from "../circuit/parameters";
 import { ALL_GROUPS, CHECK_COUNT, newPredictions, planFor, predictInto, type Plan, type Predictions } from "../circuit/predict";
 import type { MeterSpec } from "../types";
@@ -12,11 +13,17 @@ import { exp, ln, norm } from "../numerics";
  */
 
 /** Readings with what is needed to compare them: made once, used for every candidate. */
-export interface Evidence { readonly observations: readonly Observation[]; readonly plan: Plan; readonly meter: MeterSpec }
+export interface Evidence {
+  readonly observations: readonly Observation[];
+  readonly plan: Plan;
+  readonly meter: MeterSpec;
+  /** Pins of the harness that the readings speak of, as bits. */
+  readonly pins: number;
+}
 
 /** Gathers observations with the plan of checks they need. */
-export function evidenceOf(observations: readonly Observation[], meter: MeterSpec): Evidence {
-  return { observations, plan: planFor(observations.map((o) => o.index)), meter };
+export function evidenceOf(observations: readonly Observation[], meter: MeterSpec, pins = ALL_PINS): Evidence {
+  return { observations, plan: planFor(observations.map((o) => o.index)), meter, pins };
 }
 
 const DIFFERENCE = 1e-3;

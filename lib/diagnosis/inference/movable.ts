@@ -1,23 +1,28 @@
-import type { Candidate } from "../circuit/candidate";
+import { SIGNAL, SUPPLY, type Candidate } from "../circuit/candidate";
+import { ALL_PINS, pinsOf } from "../circuit/harness-parts";
 import { P } from "../circuit/parameters";
 import { GROUP } from "../circuit/predict";
 
 const HAS_FAULT_OHMS = new Set(["wire-resistive", "short-to-ground", "short-to-battery", "wires-shorted"]);
 const cache = new WeakMap<Candidate, Map<number, readonly number[]>>();
 
-/** Which unknowns the given groups of checks can speak of, for this candidate; ascending places. */
-export function movedBy(c: Candidate, groups: number): readonly number[] {
+/** Which unknowns the given groups of checks, taken at the given pins of the harness (bits), can speak of, for this candidate; ascending places. */
+export function movedBy(c: Candidate, groups: number, pins = ALL_PINS): readonly number[] {
   let lists = cache.get(c);
   if (!lists) cache.set(c, lists = new Map());
-  let list = lists.get(groups);
-  if (!list) lists.set(groups, list = listFor(c, groups));
+  const key = groups * (ALL_PINS + 1) + pins;
+  let list = lists.get(key);
+  if (!list) lists.set(key, list = listFor(c, groups, pins));
   return list;
 }
 
-function listFor(c: Candidate, groups: number): readonly number[] {
-  const set = new Set<number>();
+function listFor(c: Candidate, groups: number, pins: number): readonly number[] {
+  const set = new Set<number>(), faulty = (pinsOf(c, -1) & pins) !== 0;
   const add = (...places: number[]) => places.forEach((p) => set.add(p));
-  if (groups & GROUP.cold) add(P.supplyBleed, P.pull, ...(c.pull === "down" ? [] : [P.railOff]));
+  if (groups & GROUP.cold) {
+    if (pinsOf(c, SUPPLY) & pins) add(P.supplyBleed);
+    if (pinsOf(c, SIGNAL) & pins && c.code !== "pull-missing") add(P.pull, ...(c.pull === "down" ? [] : [P.railOff]));
+  }
   if (groups & (GROUP.live | GROUP.mated)) {
     add(P.battery, P.supply, P.supplySource, P.pull);
     if (c.pull === "up") add(P.rail);
@@ -25,8 +30,8 @@ function listFor(c: Candidate, groups: number): readonly number[] {
   }
   if (groups & GROUP.device) add(...deviceUnknowns(c));
   if (groups & GROUP.mated) add(P.rest, P.full, ...deviceUnknowns(c), ...runningUnknowns(c));
-  if (HAS_FAULT_OHMS.has(c.code) && groups & ~GROUP.device) add(P.fault);
-  if (c.code === "short-to-battery" && groups & (GROUP.cold | GROUP.wires)) add(P.batteryOff);
+  if (faulty && HAS_FAULT_OHMS.has(c.code) && groups & ~GROUP.device) add(P.fault);
+  if (faulty && c.code === "short-to-battery" && groups & (GROUP.cold | GROUP.wires)) add(P.batteryOff);
   if (c.suppliedByBattery) set.delete(P.supply);
   return [...set].sort((a, b) => a - b);
 }

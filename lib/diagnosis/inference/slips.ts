@@ -5,7 +5,8 @@ import { SLIP } from "../priors";
 import type { CheckSpec, MeterSpec } from "../types";
 import { scale, type Observation } from "./observe";
 import { outlookOf, type Outlook } from "./outlook";
-import { believe, type Believed } from "./posterior";
+import type { PartFits } from "./part-fits";
+import { believeWith, type Believed } from "./posterior";
 import { exp, ln, square } from "../numerics";
 
 /**
@@ -19,8 +20,8 @@ export interface Weighed {
   readonly slips: readonly number[];
 }
 
-/** Candidates looked into when a slip is weighed hold at least this share of the belief without the reading. */
-const LOOKED_INTO = 0.004;
+/** Candidates looked into when a slip is weighed are at most so far behind the best without the reading, natural-log units: 4 in 1,000 of it. */
+const LOOKED_INTO = 5.5;
 /** A slip less likely than this against all else is left out. */
 const NEGLIGIBLE = 1e-4;
 /** Width of what may be shown at all on the comparison scale: natural logarithm of ohms and hertz, volts, duty. */
@@ -30,13 +31,11 @@ const ANY_WORD = 0.3;
 const LOG_ROOT_TWO_PI = 0.5 * ln(2 * Math.PI);
 
 /** Weighs the base belief against one reading being wrong; `poolFor` gives the candidates to look through without that observation. */
-export function weighSlips(poolFor: (left: number) => readonly Candidate[], obs: readonly Observation[], meter: MeterSpec, base: readonly Believed[]): Weighed {
+export function weighSlips(poolFor: (left: number) => readonly Candidate[], fits: PartFits, obs: readonly Observation[], meter: MeterSpec, base: readonly Believed[]): Weighed {
   const entries: Believed[] = base.map((b) => ({ ...b })), from: number[] = base.map(() => -1);
   const best = base[0]!.logWeight;
   obs.forEach((o, i) => {
-    const without = believe(poolFor(i), obs.filter((_, k) => k !== i), meter);
-    for (const b of without) {
-      if (b.p < LOOKED_INTO) break;
+    for (const b of believeWith(fits.without(i), poolFor(i), { cut: LOOKED_INTO })) {
       const logWeight = b.logWeight + ln(slipChance(o, outlookOf(b, meter)));
       if (logWeight < best + ln(NEGLIGIBLE)) continue;
       entries.push({ ...b, logWeight });

@@ -1,0 +1,118 @@
+import type { Candidate } from "../circuit/candidate";
+import { harnessParts, inScope, SCOPES } from "../circuit/harness-parts";
+import { PARAMETER_COUNT } from "../circuit/parameters";
+import { GROUP } from "../circuit/predict";
+import type { MeterSpec } from "../types";
+import { fitCandidate, NO_FIT, together, type Fit } from "./fit";
+import { evidenceOf, type Evidence } from "./misfit";
+import type { Observation } from "./observe";
+
+const UNPOWERED = GROUP.cold | GROUP.wires, HARNESS = UNPOWERED | GROUP.live;
+const MIDDLE = new Float64Array(PARAMETER_COUNT);
+
+/** Readings fitted together, and the fits to them so far, by what of the machine they were made for. */
+interface Part { readonly evidence: Evidence; readonly fits: Map<string, Fit> }
+
+/** Fits of parts are kept for so many sets of readings, the ones used last: from one reading of a check to the next most parts stay the same. */
+const MOST_KEPT = 192;
+const kept = new Map<string, Map<string, Fit>>();
+
+/** The fits made so far to these readings by this meter. They hang on nothing else, so that it does not matter who made them. */
+function fitsTo(name: string): Map<string, Fit> {
+  const fits = kept.get(name) ?? new Map<string, Fit>();
+  kept.delete(name);
+  kept.set(name, fits);
+  if (kept.size > MOST_KEPT) kept.delete(kept.keys().next().value!);
+  return fits;
+}
+
+const nameOf = (obs: readonly Observation[], pins: number | undefined, meter: string) => `${obs.map((o) => `${o.index} ${o.word ?? o.value}`).join()}|${pins ?? ""}|${meter}`;
+
+const peakOf = (obs: readonly Observation[]) => obs.reduce((sum, o) => sum + (o.word === null ? o.logPeak : 0), 0);
+
+/**
+ * Fits of the parts of a machine to the readings that speak of them, each made once and kept. `without` gives the same
+ * with one reading left out; joint fits then start where those to all readings ended.
+ */
+export class PartFits {
+  /** No reading on live wires: the parts have no unknown in common, and their sum is the whole. */
+  readonly separate: boolean;
+  private readonly device: Part;
+  private readonly scopes: readonly (Part | null)[];
+  private readonly harness: Part;
+  private readonly all: Evidence;
+  private readonly live: boolean;
+  private readonly mated: boolean;
+  private readonly livePeak: number;
+  private readonly matedPeak: number;
+
+  private readonly joints = new Map<Candidate, Fit>();
+  private readonly meterName: string;
+
+  constructor(private readonly obs: readonly Observation[], readonly meter: MeterSpec, private readonly whole: PartFits | null = null) {
+    this.meterName = JSON.stringify(meter);
+    const live = obs.filter((o) => (o.group & GROUP.live) !== 0), mated = obs.filter((o) => o.group === GROUP.mated);
+    this.device = this.part((o) => o.group === GROUP.device);
+    this.scopes = SCOPES.map((scope, i) => {
+      const part = this.part((o) => (o.group & UNPOWERED) !== 0 && inScope(o.spec, i), scope.pins);
+      return part.evidence.observations.length === 0 ? null : part;
+    });
+    this.harness = this.part((o) => (o.group & HARNESS) !== 0);
+    this.all = evidenceOf(obs, meter);
+    this.live = live.length > 0; this.mated = mated.length > 0;
+    this.livePeak = peakOf(live); this.matedPeak = peakOf(mated);
+    this.separate = !this.live && !this.mated;
+  }
+
+  /** The same readings but one, by its place. */
+  without(left: number): PartFits {
+    return new PartFits(this.obs.filter((_, i) => i !== left), this.meter, this);
+  }
+
+  /** The most that a candidate's log-weight can be. */
+  bound(c: Candidate): number {
+    let sum = c.logPrior + this.deviceFit(c).logEvidence + this.livePeak + this.matedPeak;
+    for (const { scope, key } of harnessParts(c)) if (this.scopes[scope]) sum += fitOf(this.scopes[scope], key, c, MIDDLE).logEvidence;
+    return sum;
+  }
+
+  /** Fit of one candidate to all readings; given up where its log-weight cannot reach `least`. */
+  fit(c: Candidate, least: number): Fit {
+    const device = this.deviceFit(c), unpowered = harnessParts(c).flatMap(({ scope, key }) => (this.scopes[scope] ? [fitOf(this.scopes[scope], key, c, MIDDLE)] : []));
+    if (this.separate) return together(device, ...unpowered);
+    const harness = this.live ? fitOf(this.harness, c.harnessKey, c, startOf(...unpowered)) : together(...unpowered);
+    if (!this.mated) return together(device, harness);
+    if (c.logPrior + device.logEvidence + harness.logEvidence + this.matedPeak < least) return NO_FIT_AT_ALL;
+    return this.joint(c, device, harness, least - c.logPrior);
+  }
+
+  private joint(c: Candidate, device: Fit, harness: Fit, least: number): Fit {
+    const before = this.whole?.joints.get(c);
+    const fit = fitCandidate(c, this.all, before ? before.z : startOf(device, harness), least);
+    if (fit.logEvidence > -Infinity) this.joints.set(c, fit);
+    return fit;
+  }
+
+  private deviceFit(c: Candidate): Fit {
+    return this.device.evidence.observations.length === 0 ? NO_FIT : fitOf(this.device, c.deviceKey, c, MIDDLE);
+  }
+
+  private part(wanted: (o: Observation) => boolean, pins?: number): Part {
+    const obs = this.obs.filter(wanted);
+    return { evidence: evidenceOf(obs, this.meter, pins), fits: fitsTo(nameOf(obs, pins, this.meterName)) };
+  }
+}
+
+function fitOf({ evidence, fits }: Part, key: string, c: Candidate, start: Float64Array): Fit {
+  let fit = fits.get(key);
+  if (!fit) fits.set(key, fit = fitCandidate(c, evidence, start));
+  return fit;
+}
+
+const NO_FIT_AT_ALL: Fit = { ...NO_FIT, logEvidence: -Infinity };
+
+function startOf(...fits: readonly Fit[]): Float64Array {
+  const z = new Float64Array(PARAMETER_COUNT);
+  for (const fit of fits) for (const p of fit.active) z[p] = fit.z[p]!;
+  return z;
+}
