@@ -33,6 +33,27 @@ export function newMatedVolts(): MatedVolts {
 
 const net = new NodalNetwork(6);
 const scratch: Thevenin = { volts: 0, ohms: 0 };
+/** Junction voltages of the networks last solved in full, by network: standing still, and one of each drive. */
+const solved = [new Float64Array(3), new Float64Array(3), new Float64Array(3)] as const;
+const IDLE = 0;
+/** Which of them were solved for the point last asked for in full. */
+const isSolved = new Uint8Array(3);
+/** The network in hand: which, the junction asked for next, and whether a step from the last full solution will do. */
+let which = IDLE, junction = 0, near = false, nudgedPoint = false;
+
+/** Takes a network in hand. One that the point solved in full had no need of is solved in full. */
+function takeUp(network: 0 | 1 | 2): void {
+  which = network; junction = 0; near = nudgedPoint && isSolved[network] === 1;
+}
+
+/** Guess for the next junction: the last solution's where the network is near it. */
+const guess = (volts: number) => (near ? solved[which]![junction++]! : volts);
+
+function solveNet(): void {
+  if (near) net.solveNear();
+  else { net.solve(); net.junctions(solved[which]!); isSolved[which] = 1; }
+}
+
 /** Volts and siemens behind each cavity, as last stamped. */
 const fedVolts = new Float64Array(3), fedSiemens = new Float64Array(3);
 
@@ -52,12 +73,20 @@ function stampHarness(c: Candidate, x: Float64Array, inside: number): void {
   if (c.code === "wires-shorted") net.resistor(c.at + 1, c.at2 + 1, x[P.fault]!);
 }
 
-/** Solves the mated machine for both positions of the actuator into `out` (index position * 3 + role), volts. */
-export function solveMated(c: Candidate, x: Float64Array, out: MatedVolts): void {
+/** Both positions of the actuator; rest is the first bit, full travel the second. */
+export const BOTH_POSITIONS = 3;
+
+/**
+ * Solves the mated machine for the positions of the actuator that are asked for (bits) into `out` (index position * 3 + role), volts. `nudged`: x is
+ * next to where the same candidate was solved last, so that one step from there will do; for derivatives.
+ */
+export function solveMated(c: Candidate, x: Float64Array, out: MatedVolts, positions = BOTH_POSITIONS, nudged = false): void {
+  nudgedPoint = nudged;
+  if (!nudged) isSolved.fill(0);
   out.swing.fill(0);
   out.running = 1;
-  if (c.family === "potentiometer") solvePotentiometer(c, x, out);
-  else solveElectronic(c, x, out);
+  if (c.family === "potentiometer") solvePotentiometer(c, x, out, positions);
+  else solveElectronic(c, x, out, positions);
 }
 
 function keep(out: MatedVolts, position: number): void {
@@ -68,9 +97,10 @@ function keep(out: MatedVolts, position: number): void {
   }
 }
 
-function solvePotentiometer(c: Candidate, x: Float64Array, out: MatedVolts): void {
+function solvePotentiometer(c: Candidate, x: Float64Array, out: MatedVolts, positions: number): void {
   const track = x[P.track]!;
   for (let position = 0; position < 2; position++) {
+    if (!(positions & (position + 1))) continue;
     const share = clampShare(x[position === 0 ? P.rest : P.full]!);
     stampHarness(c, x, 1);
     const wiper = firstInside(c);
@@ -91,16 +121,16 @@ const GUESS_VOLTS = 0.45;
 /** The parts of an electronic device that conduct when it does not run: junctions into its inner supply, and leakage. */
 function stampIdle(c: Candidate, x: Float64Array): void {
   const ground = pinNode(c, GROUND), signal = pinNode(c, SIGNAL), inner = firstInside(c);
-  net.diode(pinNode(c, SUPPLY), inner, saturation(x[P.dropSupply]!), EMISSION, GUESS_VOLTS);
+  net.diode(pinNode(c, SUPPLY), inner, saturation(x[P.dropSupply]!), EMISSION, guess(GUESS_VOLTS));
   net.resistor(inner, ground, x[P.internal]!);
-  if (c.family !== "open-collector") net.diode(signal, inner, saturation(x[P.dropSignal]!), EMISSION);
+  if (c.family !== "open-collector") net.diode(signal, inner, saturation(x[P.dropSignal]!), EMISSION, guess(0));
   stampClamp(c, x, inner + 1);
   net.resistor(signal, ground, x[P.leak]!);
 }
 
 /** The clamp from ground to signal; it conducts only where ground stands above the signal. */
 function stampClamp(c: Candidate, x: Float64Array, node: number): void {
-  net.diode(pinNode(c, GROUND), node, saturation(x[P.dropSignal]!), EMISSION, GUESS_VOLTS);
+  net.diode(pinNode(c, GROUND), node, saturation(x[P.dropSignal]!), EMISSION, guess(GUESS_VOLTS));
   net.resistor(node, pinNode(c, SIGNAL), x[P.clamp]!);
 }
 
@@ -121,13 +151,15 @@ function stampRunning(c: Candidate, x: Float64Array, drive: Drive): void {
 }
 
 function solveIdle(c: Candidate, x: Float64Array): void {
+  takeUp(IDLE);
   stampHarness(c, x, 2);
   stampIdle(c, x);
-  net.solve();
+  solveNet();
 }
 
 /** A running device: its load hides the junctions to its inner supply, so the network is linear unless the clamp conducts. */
-function solveDrive(c: Candidate, x: Float64Array, drive: Drive): void {
+function solveDrive(c: Candidate, x: Float64Array, drive: Drive, network: 1 | 2): void {
+  takeUp(network);
   stampHarness(c, x, 0);
   stampRunning(c, x, drive);
   net.solve();
@@ -135,20 +167,21 @@ function solveDrive(c: Candidate, x: Float64Array, drive: Drive): void {
   stampHarness(c, x, 1);
   stampRunning(c, x, drive);
   stampClamp(c, x, firstInside(c));
-  net.solve();
+  solveNet();
 }
 
 const acrossDevice = (c: Candidate) => net.volts[pinNode(c, SUPPLY)]! - net.volts[pinNode(c, GROUND)]!;
 
-function solveElectronic(c: Candidate, x: Float64Array, out: MatedVolts): void {
+function solveElectronic(c: Candidate, x: Float64Array, out: MatedVolts, positions: number): void {
   const drives = drivesOf(c);
   if (c.running === "no") out.running = 0;
-  else { solveDrive(c, x, drives[0]); out.running = chanceOfRunning(acrossDevice(c), supplyVolts(c, x)); }
+  else { solveDrive(c, x, drives[0], 1); out.running = chanceOfRunning(acrossDevice(c), supplyVolts(c, x)); }
   if (c.running !== "yes" && out.running < 0.5) { solveIdle(c, x); keep(out, 0); keep(out, 1); out.running = 0; return; }
   keep(out, 0);
-  solveDrive(c, x, drives[1]);
+  // The mean of a pulse takes both networks; a level that does not change, or that nobody asks for at full travel, one.
+  if (pulses(c)) { solveDrive(c, x, drives[1], 2); keep(out, 1); mixPulses(x, out); return; }
+  if (drives[0] !== drives[1] && positions > 1) solveDrive(c, x, drives[1], 2);
   keep(out, 1);
-  if (pulses(c)) mixPulses(x, out);
 }
 
 function chanceOfRunning(across: number, fed: number): number {

@@ -61,6 +61,10 @@ const ITEMS: readonly Item[] = ALL_CHECKS.map((spec, index) => ({ spec, index, r
 /** Which checks to predict, sorted by the part of the machine they hang on. */
 export interface Plan {
   readonly groups: number;
+  /** Positions of the actuator that matter: 1 rest, 2 full travel, or both. */
+  readonly positions: number;
+  /** Whether a frequency is among them. */
+  readonly hertz: boolean;
   readonly device: readonly Item[];
   readonly cold: readonly Item[];
   readonly live: readonly Item[];
@@ -68,24 +72,31 @@ export interface Plan {
   readonly wires: readonly Item[];
 }
 
+const REST = 1, FULL = 2;
+const positionBits = (spec: CheckSpec) => (spec.position === "rest" ? REST : spec.position === "full" ? FULL : spec.meter === "watch" ? REST | FULL : 0);
+
 /** A plan for the checks of the given places in the vocabulary. */
 export function planFor(indices: readonly number[]): Plan {
   const of = (group: number) => [...new Set(indices)].filter((i) => CHECK_GROUP[i] === group).map((i) => ITEMS[i]!);
   const groups = indices.reduce((mask, i) => mask | CHECK_GROUP[i]!, 0);
-  return { groups, device: of(GROUP.device), cold: of(GROUP.cold), live: of(GROUP.live), mated: of(GROUP.mated), wires: of(GROUP.wires) };
+  const positions = indices.reduce((mask, i) => mask | positionBits(ALL_CHECKS[i]!), 0), hertz = indices.some((i) => ALL_CHECKS[i]!.meter === "hertz");
+  return { groups, positions, hertz, device: of(GROUP.device), cold: of(GROUP.cold), live: of(GROUP.live), mated: of(GROUP.mated), wires: of(GROUP.wires) };
 }
 
 /** The whole vocabulary. */
 export const WHOLE_PLAN = planFor(ITEMS.map((i) => i.index));
 
-/** Fills `out` for those checks of the plan that are in `groups`. Pure but for `out`; scratch memory is overwritten on every call. */
-export function predictInto(c: Candidate, x: Float64Array, plan: Plan, groups: number, out: Predictions): void {
+/**
+ * Fills `out` for those checks of the plan that are in `groups`. Pure but for `out`; scratch memory is overwritten on every call.
+ * `nudged`: x is next to that of the last call for the same candidate that was not nudged; for derivatives.
+ */
+export function predictInto(c: Candidate, x: Float64Array, plan: Plan, groups: number, out: Predictions, nudged = false): void {
   for (let role = 0; role < 3; role++) roles[c.pinOf[role]!] = role;
   const wanted = groups & plan.groups;
   if (wanted & GROUP.device) for (const k of plan.device) deviceCheck(c, x, k.index, roles[k.red]!, roles[k.black]!, k.full, out);
   if (wanted & GROUP.cold) for (const k of plan.cold) setOhms(out, k.index, coldOhms(c, x, roles[k.red]!));
   if (wanted & GROUP.live) for (const k of plan.live) liveCheck(c, x, k.spec, k.index, out);
-  if (wanted & GROUP.mated) matedChecks(c, x, plan.mated, out);
+  if (wanted & GROUP.mated) matedChecks(c, x, plan, out, nudged);
   if (wanted & GROUP.wires) for (const k of plan.wires) wireCheck(c, x, k.spec, k.index, out);
 }
 
@@ -146,11 +157,11 @@ function voltsBetween(c: Candidate, x: Float64Array, red: number, black: number)
   return loop === Infinity ? 0 : (here.volts - there.volts) * METER_OHMS / loop;
 }
 
-function matedChecks(c: Candidate, x: Float64Array, items: readonly Item[], out: Predictions): void {
-  solveMated(c, x, mated);
+function matedChecks(c: Candidate, x: Float64Array, plan: Plan, out: Predictions, nudged: boolean): void {
+  solveMated(c, x, mated, plan.positions, nudged);
   out.idle = c.family !== "potentiometer" && mated.running === 0;
   out.logState = c.running === "yes" ? ln(Math.max(mated.running, 1e-4)) : 0;
-  for (const k of items) {
+  for (const k of plan.mated) {
     const role = roles[k.red]!, place = 3 * k.full + role, volts = mated.volts[place]!;
     if (k.spec.meter === "dc-volts") { out.value[k.index] = volts; out.slack[k.index] = norm(mated.drop[place]!, out.idle && Math.abs(volts) > 0.03 ? IDLE_SLACK * Math.abs(volts) + IDLE_VOLTS : 0); }
     else if (k.spec.meter === "watch") watch(c, role, k.index, out);

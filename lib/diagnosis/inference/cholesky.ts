@@ -32,9 +32,9 @@ export function forward(l: Float64Array, m: number, b: Float64Array): void {
   }
 }
 
-/** Logarithm of the determinant of A from its factor. */
+/** Logarithm of the determinant of A from its factor, for diagonals from 1e-6 to 1e15 (so that their product neither vanishes nor overflows). */
 export function logDeterminant(l: Float64Array, m: number): number {
-  let sum = 0;
-  for (let i = 0; i < m; i++) sum += 2 * ln(l[i * m + i]!);
-  return sum;
+  let product = 1;
+  for (let i = 0; i < m; i++) product *= l[i * m + i]!;
+  return 2 * ln(product);
 }

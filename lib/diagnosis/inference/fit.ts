@@ -35,7 +35,7 @@ const MIDDLE = new Float64Array(PARAMETER_COUNT);
 export function fitCandidate(c: Candidate, e: Evidence, start: Float64Array, least = -Infinity): Fit {
   makeRoom(e.observations.length);
   const log = evaluate(c, start, e);
-  if (log + stillOpen() < least) return givenUp(start);
+  if (log + stillOpen() < least) return GIVEN_UP;
   const direct = climb(c, e, start, log, least);
   if (direct.logEvidence === -Infinity || !stuck(e) || direct.logEvidence + stillOpen() < least) return direct;
   const reach = Math.max(least, direct.logEvidence), near = pulledIn(c, e, start);
@@ -63,15 +63,21 @@ function pulledIn(c: Candidate, e: Evidence, start: Float64Array): Float64Array 
     log = better;
   }
   pullInFull(false);
-  return w.z;
+  return w.z.slice();
 }
 
 /** What one climb works on. */
-interface Work { readonly z: Float64Array; readonly movable: readonly number[]; readonly precision: Float64Array; readonly gradient: Float64Array; readonly step: Float64Array; readonly trial: Float64Array }
+interface Work { readonly z: Float64Array; movable: readonly number[]; readonly precision: Float64Array; readonly gradient: Float64Array; readonly step: Float64Array; readonly trial: Float64Array }
+
+/** One for each number of unknowns; a climb overwrites the last one's. */
+const works: Work[] = [];
 
 function workFor(c: Candidate, e: Evidence, start: Float64Array): Work {
-  const movable = movedBy(c, e.plan.groups, e.pins), m = movable.length;
-  return { z: Float64Array.from(start), movable, precision: new Float64Array(m * m), gradient: new Float64Array(m), step: new Float64Array(m), trial: new Float64Array(PARAMETER_COUNT) };
+  const movable = movedBy(c, e.plan, e.pins), m = movable.length;
+  const work = works[m] ??= { z: new Float64Array(PARAMETER_COUNT), movable, precision: new Float64Array(m * m), gradient: new Float64Array(m), step: new Float64Array(m), trial: new Float64Array(PARAMETER_COUNT) };
+  work.movable = movable;
+  work.z.set(start);
+  return work;
 }
 
 /** Gauss-Newton step from z and the factor of the precision there. */
@@ -92,17 +98,17 @@ function climb(c: Candidate, e: Evidence, start: Float64Array, from: number, lea
     newtonStep(c, e, w, iteration > 0);
     const promise = promised(w.gradient, w.step);
     if (iteration === MAX_ITERATIONS || promise < SETTLED) break;
-    if (log + TRUST * Math.max(gained, promise) + MARGIN < least) return givenUp(w.z);
+    if (log - 0.5 * logDeterminant(w.precision, w.movable.length) + TRUST * Math.max(gained, promise) + MARGIN < least) return GIVEN_UP;
     const better = lineSearch(c, w, e, log);
     gained = better - log;
     log = Math.max(log, better);
     if (gained < WORTH_A_STEP) break;
   }
-  return { logEvidence: log - 0.5 * logDeterminant(w.precision, w.movable.length), z: w.z, active: w.movable, precision: w.precision };
+  return { logEvidence: log - 0.5 * logDeterminant(w.precision, w.movable.length), z: w.z.slice(), active: w.movable, precision: w.precision.slice() };
 }
 
-const givenUp = (z: Float64Array): Fit => ({ logEvidence: -Infinity, z, active: [], precision: NOTHING });
 const NOTHING = new Float64Array(0);
+const GIVEN_UP: Fit = { logEvidence: -Infinity, z: MIDDLE, active: [], precision: NOTHING };
 
 /** Gain of a step in the quadratic model of the misfit, natural-log units. */
 function promised(gradient: Float64Array, step: Float64Array): number {

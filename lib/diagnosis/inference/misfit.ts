@@ -109,7 +109,7 @@ export function differentiate(c: Candidate, z: Float64Array, movable: readonly n
     if (again && !moves[k]) continue;
     const p = movable[k]!, kept = x[p]!, reach = reachOf(c, p, base.idle);
     x[p] = physicalAt(c, p, z[p]! + DIFFERENCE);
-    predictInto(c, x, e.plan, reach, nudged);
+    predictInto(c, x, e.plan, reach, nudged, true);
     x[p] = kept;
     let any = z[p] === 0 ? 0 : 1;
     for (let i = 0; i < n; i++) {

@@ -1,22 +1,22 @@
 import { SIGNAL, SUPPLY, type Candidate } from "../circuit/candidate";
 import { ALL_PINS, pinsOf } from "../circuit/harness-parts";
 import { P } from "../circuit/parameters";
-import { GROUP } from "../circuit/predict";
+import { GROUP, type Plan } from "../circuit/predict";
 
 const HAS_FAULT_OHMS = new Set(["wire-resistive", "short-to-ground", "short-to-battery", "wires-shorted"]);
 const cache = new WeakMap<Candidate, Map<number, readonly number[]>>();
 
-/** Which unknowns the given groups of checks, taken at the given pins of the harness (bits), can speak of, for this candidate; ascending places. */
-export function movedBy(c: Candidate, groups: number, pins = ALL_PINS): readonly number[] {
+/** Which unknowns the checks of a plan, taken at the given pins of the harness (bits), can speak of, for this candidate; ascending places. */
+export function movedBy(c: Candidate, plan: Plan, pins = ALL_PINS): readonly number[] {
   let lists = cache.get(c);
   if (!lists) cache.set(c, lists = new Map());
-  const key = groups * (ALL_PINS + 1) + pins;
+  const key = ((plan.groups * 4 + plan.positions) * 2 + (plan.hertz ? 1 : 0)) * (ALL_PINS + 1) + pins;
   let list = lists.get(key);
-  if (!list) lists.set(key, list = listFor(c, groups, pins));
+  if (!list) lists.set(key, list = listFor(c, plan, pins));
   return list;
 }
 
-function listFor(c: Candidate, groups: number, pins: number): readonly number[] {
+function listFor(c: Candidate, { groups, positions, hertz }: Plan, pins: number): readonly number[] {
   const set = new Set<number>(), faulty = (pinsOf(c, -1) & pins) !== 0;
   const add = (...places: number[]) => places.forEach((p) => set.add(p));
   if (groups & GROUP.cold) {
@@ -33,6 +33,9 @@ function listFor(c: Candidate, groups: number, pins: number): readonly number[] 
   if (faulty && HAS_FAULT_OHMS.has(c.code) && groups & ~GROUP.device) add(P.fault);
   if (faulty && c.code === "short-to-battery" && groups & (GROUP.cold | GROUP.wires)) add(P.batteryOff);
   if (c.suppliedByBattery) set.delete(P.supply);
+  if (!hertz) set.delete(P.frequency);
+  if (!(positions & 1)) set.delete(P.rest);
+  if (!(positions & 2)) set.delete(P.full);
   return [...set].sort((a, b) => a - b);
 }
 

@@ -44,12 +44,12 @@ const numeric = (p: Predictions, i: number) => ALL_CHECKS[i]!.unit !== "word" &&
 interface Derivatives { readonly parameters: readonly number[]; readonly rows: readonly Float64Array[] }
 
 function derivativesOf(b: Believed, meter: MeterSpec, mean: Float64Array): Derivatives {
-  const { candidate: c, fit } = b, parameters = movedBy(c, ALL_GROUPS);
+  const { candidate: c, fit } = b, parameters = movedBy(c, WHOLE_PLAN);
   const idle = at.idle, rows = parameters.map((p) => {
     const row = new Float64Array(CHECK_COUNT), kept = x[p]!, v = c.ranges.mean[p]! + c.ranges.sd[p]! * (fit.z[p]! + DIFFERENCE), reach = reachOf(c, p, idle);
     x[p] = c.ranges.log[p] ? exp(v) : v;
     nudged.value.set(at.value);
-    predictInto(c, x, WHOLE_PLAN, reach, nudged);
+    predictInto(c, x, WHOLE_PLAN, reach, nudged, true);
     x[p] = kept;
     for (let i = 0; i < CHECK_COUNT; i++) if (numeric(at, i) && nudged.value[i] !== at.value[i]) row[i] = (scalePrediction(ALL_CHECKS[i]!, nudged.value[i]!, meter) - mean[i]!) / DIFFERENCE;
     return row;

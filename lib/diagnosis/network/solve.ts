@@ -63,7 +63,7 @@ export class NodalNetwork {
   diode(anode: number, cathode: number, saturation: number, emission = 1, guess = 0): void {
     const thermal = emission * THERMAL_VOLTS, limitVolts = thermal * ln(thermal / (Math.SQRT2 * saturation));
     const slot = this.diodes[this.diodeCount];
-    if (slot) Object.assign(slot, { anode, cathode, saturation, thermal, limitVolts, volts: guess });
+    if (slot) { slot.anode = anode; slot.cathode = cathode; slot.saturation = saturation; slot.thermal = thermal; slot.limitVolts = limitVolts; slot.volts = guess; }
     else this.diodes.push({ anode, cathode, saturation, thermal, limitVolts, volts: guess });
     this.diodeCount++;
   }
@@ -78,9 +78,23 @@ export class NodalNetwork {
   private readonly rhs = new Float64Array(32);
 
   private currentsCopy(): Float64Array {
-    this.work.set(this.matrix.subarray(0, this.size * this.size));
+    const cells = this.size * this.size;
+    for (let i = 0; i < cells; i++) this.work[i] = this.matrix[i]!;
     for (let i = 0; i < this.size; i++) this.rhs[i] = this.currents[i]!;
     return this.rhs;
+  }
+
+  /** Junction voltages, volts, in the order the diodes were added, written into `out`. */
+  junctions(out: Float64Array): void {
+    for (let k = 0; k < this.diodeCount; k++) out[k] = this.diodes[k]!.volts;
+  }
+
+  /**
+   * One step of Newton's method from the junction voltages that the diodes were given as guesses: exact to the first order
+   * where they solve a network that differs from this one by a little.
+   */
+  solveNear(): void {
+    this.newtonStep();
   }
 
   private newtonStep(): boolean {
