@@ -25,8 +25,8 @@ function drawn(seed: number, most = 9) {
   const draw = drawer(seed), machine = drawMachine(drawSetup(draw, draw() < 0.5), draw);
   return { draw, setup: machine.setup, readings: someReadings(machine, 1 + Math.floor(draw() * most), draw) };
 }
-/** The engine leaves out what is less likely than one in twenty thousand; pin numbers decide in which order it looks, and so which of those it has met. */
-const CUT_OFF = 2e-4;
+/** Sums in another order differ in their last digits. */
+const LAST_DIGITS = 1e-9;
 const seeds = fc.integer({ min: 0, max: 2 ** 31 });
 const holds = (law: (seed: number) => void, numRuns: number) => fc.assert(fc.property(seeds, law), { numRuns, seed: 2_024 });
 
@@ -79,9 +79,9 @@ describe("laws of the standing", SLOW, () => {
       const { draw, setup, readings } = drawn(seed), renaming = RENAMINGS[Math.floor(draw() * RENAMINGS.length)]!;
       const a = standing(setup, readings), b = standing(renameSetup(setup, renaming), readings.map((r) => renameReading(r, renaming)));
       const faults = new Map(b.faults.map((f) => [faultKey(f), f.p])), pins = new Map(b.pins.map((p) => [`${p.supply}${p.ground}${p.signal}`, p.p]));
-      for (const f of a.faults) expect(Math.abs(f.p - (faults.get(faultKey(renameFault(f, renaming))) ?? 0)), JSON.stringify(f)).toBeLessThan(CUT_OFF);
-      for (const p of a.pins) { const { supply, ground, signal } = renamePins(p, renaming); expect(Math.abs(p.p - (pins.get(`${supply}${ground}${signal}`) ?? 0))).toBeLessThan(CUT_OFF); }
-      for (const k of a.kinds) expect(Math.abs(k.p - b.kinds.find((other) => other.kind === k.kind)!.p)).toBeLessThan(CUT_OFF);
-    }, 15);
+      for (const f of a.faults) expect(Math.abs(f.p - (faults.get(faultKey(renameFault(f, renaming))) ?? 0)), JSON.stringify(f)).toBeLessThan(LAST_DIGITS);
+      for (const p of a.pins) { const { supply, ground, signal } = renamePins(p, renaming); expect(Math.abs(p.p - (pins.get(`${supply}${ground}${signal}`) ?? 0))).toBeLessThan(LAST_DIGITS); }
+      for (const k of a.kinds) expect(Math.abs(k.p - b.kinds.find((other) => other.kind === k.kind)!.p)).toBeLessThan(LAST_DIGITS);
+    }, 60);
   });
 });

@@ -21,7 +21,7 @@ const isOf = (id: string) => (c: Candidate) => faultId(c.hypothesis.fault) === i
 
 /** Chance of a finding, 0..1. */
 function chanceOf(believed: readonly Believed[], id: string): number {
-  return believed.reduce((sum, b) => (faultId(b.candidate.hypothesis.fault) === id ? sum + b.p : sum), 0);
+  return Math.min(1, believed.reduce((sum, b) => (faultId(b.candidate.hypothesis.fault) === id ? sum + b.p : sum), 0));
 }
 
 /**
@@ -84,7 +84,7 @@ export function* evidenceSteps(setup: Setup, readings: readonly Reading[], fault
     const left = without ? chanceOf(without[i]!, id) : null;
     rows.push({
       check, value, ifSound, ifFinding, limit, offLimits: distance(value, ifFinding, limit), offIfSound: distance(value, ifSound, limit),
-      factor: left === null ? null : factorOf(chance, left), without: left === null ? null : Math.min(1, left),
+      factor: left === null ? null : factorOf(chance, left), without: left,
     });
   }
   return rows;

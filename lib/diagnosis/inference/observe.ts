@@ -19,6 +19,8 @@ export interface Observation {
 
 /** Keeps the logarithm of ohms finite near a short; about the resistance of a pair of leads. */
 const OHM_OFFSET = 2;
+/** The same for hertz: no meter shows less but nothing. */
+const LEAST_HERTZ = 1e-3;
 /** The circuit model is itself only so good; common practice for lumped models of wiring. */
 const MODEL_OHM_SHARE = 0.004, MODEL_VOLTS = 0.004, MODEL_VOLT_SHARE = 0.0005, MODEL_HERTZ_SHARE = 0.0005, MODEL_DUTY = 0.001;
 const LOG_ROOT_TWO_PI = 0.5 * ln(2 * Math.PI);
@@ -26,7 +28,7 @@ const LOG_ROOT_TWO_PI = 0.5 * ln(2 * Math.PI);
 /** Number on the comparison scale: logarithm for ohms and hertz, straight for volts and duty. */
 export function scale(spec: CheckSpec, value: number): number {
   if (spec.unit === "ohm") return ln(Math.max(value, 0) + OHM_OFFSET);
-  return spec.unit === "hertz" ? ln(Math.max(value, 1e-3)) : value;
+  return spec.unit === "hertz" ? ln(Math.max(value, LEAST_HERTZ)) : value;
 }
 
 /** The number a scaled value stands for; inverse of `scale`. */
@@ -46,7 +48,7 @@ export function scaledSd(spec: CheckSpec, value: number, meter: MeterSpec): numb
   switch (spec.unit) {
     case "ohm": return norm(u, MODEL_OHM_SHARE * value) / (Math.max(value, 0) + OHM_OFFSET);
     case "volt": return norm(u, MODEL_VOLTS, MODEL_VOLT_SHARE * value);
-    case "hertz": return norm(u / value, MODEL_HERTZ_SHARE);
+    case "hertz": return norm(u / Math.max(value, LEAST_HERTZ), MODEL_HERTZ_SHARE);
     default: return norm(u, MODEL_DUTY);
   }
 }
