@@ -1,7 +1,7 @@
 import type { Candidate } from "../circuit/candidate";
 import { PARAMETER_COUNT } from "../circuit/parameters";
 import { factor, logDeterminant, solveFactored } from "./cholesky";
-import { differentiate, evaluate, makeRoom, normalEquations, pullInFull, stillOpen, stuck, type Evidence } from "./misfit";
+import { differentiate, evaluate, followOn, makeRoom, normalEquations, pullInFull, stillOpen, stuck, type Evidence } from "./misfit";
 import { movedBy } from "./movable";
 
 /**
@@ -18,7 +18,7 @@ export interface Fit {
   readonly precision: Float64Array;
 }
 
-const MAX_ITERATIONS = 9;
+const MAX_ITERATIONS = 14;
 const LONGEST_STEP = 2.5;
 /** Steps made with every residual pulling in full, so that a start far off does not leave a reading for lost. */
 const FULL_PULL_STEPS = 4;
@@ -57,7 +57,7 @@ function pulledIn(c: Candidate, e: Evidence, start: Float64Array): Float64Array 
   const w = workFor(c, e, start);
   let log = evaluate(c, w.z, e);
   for (let step = 0; step < FULL_PULL_STEPS; step++) {
-    newtonStep(c, e, w, step > 0);
+    exactStep(c, e, w, step > 0);
     const better = lineSearch(c, w, e, log);
     if (better - log < 1) break;
     log = better;
@@ -67,43 +67,57 @@ function pulledIn(c: Candidate, e: Evidence, start: Float64Array): Float64Array 
 }
 
 /** What one climb works on. */
-interface Work { readonly z: Float64Array; movable: readonly number[]; readonly precision: Float64Array; readonly gradient: Float64Array; readonly step: Float64Array; readonly trial: Float64Array }
+interface Work { readonly z: Float64Array; movable: readonly number[]; readonly precision: Float64Array; readonly gradient: Float64Array; readonly step: Float64Array; readonly moved: Float64Array; readonly trial: Float64Array }
 
 /** One for each number of unknowns; a climb overwrites the last one's. */
 const works: Work[] = [];
 
 function workFor(c: Candidate, e: Evidence, start: Float64Array): Work {
   const movable = movedBy(c, e.plan, e.pins), m = movable.length;
-  const work = works[m] ??= { z: new Float64Array(PARAMETER_COUNT), movable, precision: new Float64Array(m * m), gradient: new Float64Array(m), step: new Float64Array(m), trial: new Float64Array(PARAMETER_COUNT) };
+  const work = works[m] ??= { z: new Float64Array(PARAMETER_COUNT), movable, precision: new Float64Array(m * m), gradient: new Float64Array(m), step: new Float64Array(m), moved: new Float64Array(m), trial: new Float64Array(PARAMETER_COUNT) };
   work.movable = movable;
   work.z.set(start);
   return work;
 }
 
-/** Gauss-Newton step from z and the factor of the precision there. */
-function newtonStep(c: Candidate, e: Evidence, w: Work, again: boolean): void {
-  differentiate(c, w.z, w.movable, e, again);
+/** Gauss-Newton step and the factor of the precision, by the derivatives in force; returns what the step promises. */
+function newtonStep(e: Evidence, w: Work): number {
   normalEquations(w.z, w.movable, e.observations.length, w.precision, w.gradient);
   factor(w.precision, w.movable.length);
   w.step.set(w.gradient);
   solveFactored(w.precision, w.movable.length, w.step);
+  return promised(w.gradient, w.step);
+}
+
+/** The same with derivatives taken at z, where the last evaluation has been. */
+function exactStep(c: Candidate, e: Evidence, w: Work, again: boolean): number {
+  differentiate(c, w.z, w.movable, e, again);
+  return newtonStep(e, w);
 }
 
 function climb(c: Candidate, e: Evidence, start: Float64Array, from: number, least: number): Fit {
   const w = workFor(c, e, start);
-  let log = from;
+  let log = from, gained = Infinity, exact = true;
   // The last evaluation may have been elsewhere; residuals and weights have to be those of the start.
   evaluate(c, w.z, e);
-  for (let iteration = 0, gained = Infinity; ; iteration++) {
-    newtonStep(c, e, w, iteration > 0);
-    const promise = promised(w.gradient, w.step);
-    if (iteration === MAX_ITERATIONS || promise < SETTLED) break;
+  let promise = exactStep(c, e, w, false);
+  for (let iteration = 0; iteration < MAX_ITERATIONS; iteration++) {
+    if (!exact && (promise < WORTH_A_STEP || gained < WORTH_A_STEP)) { promise = exactStep(c, e, w, true); exact = true; }
+    if (promise < SETTLED) break;
     if (log - 0.5 * logDeterminant(w.precision, w.movable.length) + TRUST * Math.max(gained, promise) + MARGIN < least) return GIVEN_UP;
     const better = lineSearch(c, w, e, log);
-    gained = better - log;
-    log = Math.max(log, better);
-    if (gained < WORTH_A_STEP) break;
+    if (better === -Infinity) {
+      if (exact) break;
+      evaluate(c, w.z, e);
+    } else {
+      gained = better - log;
+      log = better;
+      if (exact && gained < WORTH_A_STEP) break;
+    }
+    exact = better === -Infinity || !followOn(w.moved, e);
+    promise = exact ? exactStep(c, e, w, true) : newtonStep(e, w);
   }
+  if (!exact) exactStep(c, e, w, true);
   return { logEvidence: log - 0.5 * logDeterminant(w.precision, w.movable.length), z: w.z.slice(), active: w.movable, precision: w.precision.slice() };
 }
 
@@ -126,7 +140,11 @@ function lineSearch(c: Candidate, w: Work, e: Evidence, from: number): number {
     w.trial.set(w.z);
     for (let k = 0; k < w.movable.length; k++) w.trial[w.movable[k]!]! += share * w.step[k]!;
     const log = evaluate(c, w.trial, e);
-    if (log > from) { w.z.set(w.trial); return log; }
+    if (log > from) {
+      w.z.set(w.trial);
+      for (let k = 0; k < w.movable.length; k++) w.moved[k] = share * w.step[k]!;
+      return log;
+    }
   }
   return -Infinity;
 }

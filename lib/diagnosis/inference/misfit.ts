@@ -39,14 +39,14 @@ const moves = new Uint8Array(PARAMETER_COUNT);
 
 /** Workspace that grows to the longest list of readings seen; overwritten by every fit. */
 let room = 0;
-let residual = new Float64Array(0), weight = residual, sds = residual, jacobian = residual, live = new Uint8Array(0);
+let residual = new Float64Array(0), weight = residual, sds = residual, jacobian = residual, from = residual, live = new Uint8Array(0);
 
 /** Makes the workspace large enough for so many readings. */
 export function makeRoom(observations: number): void {
   if (observations <= room) return;
   room = observations + 16;
   residual = new Float64Array(room); weight = new Float64Array(room); sds = new Float64Array(room);
-  jacobian = new Float64Array(room * PARAMETER_COUNT); live = new Uint8Array(room);
+  jacobian = new Float64Array(room * PARAMETER_COUNT); from = new Float64Array(room); live = new Uint8Array(room);
 }
 
 function physicalAt(c: Candidate, i: number, z: number): number {
@@ -99,7 +99,7 @@ function compare(o: Observation, i: number, meter: MeterSpec): number {
 }
 
 /**
- * Derivatives of the scaled predictions by z, over sd, by forward differences at the point last evaluated. An unknown that
+ * Derivatives of the scaled predictions by z, by forward differences at the point last evaluated. An unknown that
  * had nothing to move the first time (`again` false) is passed over later.
  */
 export function differentiate(c: Candidate, z: Float64Array, movable: readonly number[], e: Evidence, again: boolean): void {
@@ -114,12 +114,35 @@ export function differentiate(c: Candidate, z: Float64Array, movable: readonly n
     let any = z[p] === 0 ? 0 : 1;
     for (let i = 0; i < n; i++) {
       const o = e.observations[i]!;
-      const d = live[i] && o.group & reach ? (scalePrediction(o.spec, nudged.value[o.index]!, e.meter) - predicted[o.index]!) / (DIFFERENCE * sds[i]!) : 0;
+      const d = live[i] && o.group & reach ? (scalePrediction(o.spec, nudged.value[o.index]!, e.meter) - predicted[o.index]!) / DIFFERENCE : 0;
       jacobian[i * m + k] = d;
       if (d !== 0 || (!live[i] && o.word === null)) any = 1;
     }
     moves[k] = any;
   }
+  for (let i = 0; i < n; i++) from[i] = live[i] ? predicted[e.observations[i]!.index]! : NaN;
+}
+
+/**
+ * Brings the derivatives up to the point last evaluated, `moved` from where they were last right, by the least change
+ * that makes them agree with what the predictions did on the way (Broyden 1965). False where a reading turned from
+ * number to word or back, so that they have to be taken anew.
+ */
+export function followOn(moved: Float64Array, e: Evidence): boolean {
+  const m = moved.length;
+  let length = 0;
+  for (let k = 0; k < m; k++) length += moved[k]! * moved[k]!;
+  for (let i = 0; i < e.observations.length; i++) {
+    if (live[i] ? Number.isNaN(from[i]!) : !Number.isNaN(from[i]!)) return false;
+    if (!live[i]) continue;
+    const now = predicted[e.observations[i]!.index]!;
+    let miss = now - from[i]!;
+    for (let k = 0; k < m; k++) miss -= jacobian[i * m + k]! * moved[k]!;
+    miss /= length;
+    for (let k = 0; k < m; k++) jacobian[i * m + k]! += miss * moved[k]!;
+    from[i] = now;
+  }
+  return true;
 }
 
 /** Precision matrix I + J'WJ and gradient J'Wr - z. */
@@ -129,11 +152,12 @@ export function normalEquations(z: Float64Array, movable: readonly number[], n: 
   for (let a = 0; a < m; a++) { precision[a * m + a] = 1; gradient[a] = -z[movable[a]!]!; }
   for (let i = 0; i < n; i++) {
     if (!live[i]) continue;
+    const scale = 1 / sds[i]!, heft = weight[i]! * scale;
     for (let a = 0; a < m; a++) {
-      const ja = jacobian[i * m + a]! * weight[i]!;
+      const ja = jacobian[i * m + a]! * heft;
       if (ja === 0) continue;
       gradient[a]! += ja * residual[i]!;
-      for (let b = 0; b <= a; b++) precision[a * m + b]! += ja * jacobian[i * m + b]!;
+      for (let b = 0; b <= a; b++) precision[a * m + b]! += ja * (jacobian[i * m + b]! * scale);
     }
   }
 }
