@@ -1,6 +1,5 @@
 import type { Expect, Fault, FaultCode, Hypothesis, Kind, PinAssignment, PinNumber, Role } from "../types";
-import { controllerClass, rangesFor, type Family, type Pull, type Ranges } from "./parameters";
-import { exp } from "../numerics";
+import { controllerClass, physicalValue, rangesFor, type Family, type Pull, type Ranges } from "./parameters";
 
 /** Roles as array places: supply 0, ground 1, signal 2. */
 export const SUPPLY = 0, GROUND = 1, SIGNAL = 2;
@@ -75,7 +74,7 @@ export function makeCandidate(p: Parts): Candidate {
     hypothesis: { id: hypothesisId(p.kind, pinOf, fault), kind: p.kind, pins: p.pins, fault },
     family: p.family, pull: p.pull, code, at, at2, breakEnd: p.breakEnd, running: p.running, pinOf,
     suppliedByBattery: p.expect?.supplyVolts === "battery",
-    ranges, middle: ranges.mean.map((m, i) => (ranges.log[i] ? exp(m) : m)), logPrior: p.logPrior,
+    ranges, middle: ranges.mean.map((_, i) => physicalValue(ranges, i, 0)), logPrior: p.logPrior,
     deviceKey: `${p.family}|${pinOf}|${DEVICE_FAULTS.has(code) ? code + p.breakEnd : ""}|${p.expect ? JSON.stringify(p.expect) : ""}`,
     harnessKey: `${controllerClass(p)}|${p.pull}|${pinOf}|${HARNESS_SOUND.has(code) ? "" : `${code}${at}${at2}`}|${p.expect ? JSON.stringify(p.expect) : ""}`,
   };

@@ -43,18 +43,13 @@ export function deviceOhms(c: Candidate, x: Float64Array, red: number, black: nu
 }
 
 function trackOhms(c: Candidate, x: Float64Array, a: number, b: number, position: number): number {
-  const share = clampShare(x[position === 0 ? P.rest : P.full]!);
+  const share = x[position === 0 ? P.rest : P.full]!;
   const touches = (role: number) => a === role || b === role;
   if (c.code === "wiper-open" && touches(SIGNAL)) return Infinity;
   if (c.code === "track-open" && touches(c.breakEnd)) return Infinity;
   const track = x[P.track]!;
   if (!touches(SIGNAL)) return track;
   return x[P.wiper]! + track * (touches(GROUND) ? share : 1 - share);
-}
-
-/** Wiper share kept within the track. */
-export function clampShare(share: number): number {
-  return Math.min(0.998, Math.max(0.002, share));
 }
 
 function electronicOhms(c: Candidate, x: Float64Array, red: number, black: number): number {

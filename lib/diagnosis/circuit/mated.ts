@@ -1,7 +1,7 @@
 import { NodalNetwork, THERMAL_VOLTS } from "../network/solve";
 import { GROUND, SIGNAL, SUPPLY, type Candidate } from "./candidate";
 import { cavity, supplyVolts, WIRE_OHMS_SPREAD, type Thevenin } from "./controller";
-import { clampShare, DROP_AMPERES, EMISSION } from "./device-ohms";
+import { DROP_AMPERES, EMISSION } from "./device-ohms";
 import { P } from "./parameters";
 import { exp } from "../numerics";
 
@@ -101,7 +101,7 @@ function solvePotentiometer(c: Candidate, x: Float64Array, out: MatedVolts, posi
   const track = x[P.track]!;
   for (let position = 0; position < 2; position++) {
     if (!(positions & (position + 1))) continue;
-    const share = clampShare(x[position === 0 ? P.rest : P.full]!);
+    const share = x[position === 0 ? P.rest : P.full]!;
     stampHarness(c, x, 1);
     const wiper = firstInside(c);
     const broken = c.code === "track-open" ? c.breakEnd : -1;
@@ -204,13 +204,9 @@ export function pulses(c: Candidate): boolean {
 function mixPulses(x: Float64Array, out: MatedVolts): void {
   for (let role = 0; role < 3; role++) {
     const low = out.volts[role]!, high = out.volts[3 + role]!;
-    const rest = clampDuty(x[P.rest]!), full = clampDuty(x[P.full]!);
+    const rest = x[P.rest]!, full = x[P.full]!;
     out.volts[role] = low + rest * (high - low);
     out.volts[3 + role] = low + full * (high - low);
     out.swing[role] = out.swing[3 + role] = high - low;
   }
-}
-
-export function clampDuty(duty: number): number {
-  return Math.min(0.995, Math.max(0.005, duty));
 }

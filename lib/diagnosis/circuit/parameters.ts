@@ -1,5 +1,5 @@
 import type { Expect, FaultCode } from "../types";
-import { ln } from "../numerics";
+import { exp, ln } from "../numerics";
 
 /** What is not known of device, wires and controller: places in the parameter vector. */
 export const P = {
@@ -17,22 +17,47 @@ export type Family = "potentiometer" | "open-collector" | "push-pull" | "voltage
 /** How a controller holds its signal input: down to ground, up to a rail of its own, or up to the supply it gives. */
 export type Pull = "up" | "up-to-supply" | "down";
 
-/** Gaussian ranges in the logarithm (ratio scale) or straight; `mean` and `sd` are of that scale. */
-export interface Ranges { readonly mean: Float64Array; readonly sd: Float64Array; readonly log: Uint8Array }
+/** How an unknown is measured: straight, by ratios (its logarithm), or as a share of a whole (the logarithm of share to rest). */
+const STRAIGHT = 0, RATIO = 1, SHARE = 2;
+
+/** Gaussian ranges of every unknown; `mean` and `sd` are of its scale. */
+export interface Ranges { readonly mean: Float64Array; readonly sd: Float64Array; readonly scale: Uint8Array }
+
+/** Log of share to rest beyond which a share is as good as nothing or all. */
+const MOST_ODDS = 12;
+
+/** Physical value of an unknown that stands `z` standard deviations from the middle of its range. */
+export function physicalValue({ mean, sd, scale }: Ranges, index: number, z: number): number {
+  const v = mean[index]! + sd[index]! * z;
+  if (scale[index] === RATIO) return exp(v);
+  return scale[index] === STRAIGHT ? v : 1 / (1 + exp(-Math.min(MOST_ODDS, Math.max(-MOST_ODDS, v))));
+}
+
+/** Standard deviation of the log of share to rest where nothing is known: nearly even from 0.02 to 0.98. */
+const ANY_SHARE = 1.6;
+/** Nearest to nothing or all that a stated share is taken to be. */
+const LEAST_SHARE = 0.01;
 
 class RangeBuilder {
   readonly mean = new Float64Array(PARAMETER_COUNT);
   readonly sd = new Float64Array(PARAMETER_COUNT);
-  readonly log = new Uint8Array(PARAMETER_COUNT);
+  readonly scale = new Uint8Array(PARAMETER_COUNT);
 
   /** Middle value and factor that one standard deviation spans, e.g. (3000, 2): 1.5 k to 6 k. */
   ratio(index: number, middle: number, factor: number): this {
-    this.mean[index] = ln(middle); this.sd[index] = ln(factor); this.log[index] = 1;
+    this.mean[index] = ln(middle); this.sd[index] = ln(factor); this.scale[index] = RATIO;
     return this;
   }
 
   straight(index: number, middle: number, sd: number): this {
-    this.mean[index] = middle; this.sd[index] = sd; this.log[index] = 0;
+    this.mean[index] = middle; this.sd[index] = sd; this.scale[index] = STRAIGHT;
+    return this;
+  }
+
+  /** A share of a whole, 0..1: where in between when nothing is known of it (`null`), or a middle and a standard deviation. */
+  share(index: number, stated: number | null, sd: number): this {
+    const middle = Math.min(1 - LEAST_SHARE, Math.max(LEAST_SHARE, stated ?? 0.5));
+    this.mean[index] = ln(middle / (1 - middle)); this.sd[index] = stated === null ? ANY_SHARE : sd / (middle * (1 - middle)); this.scale[index] = SHARE;
     return this;
   }
 }
@@ -74,18 +99,14 @@ function potentiometerRanges(r: RangeBuilder, expect?: Expect): void {
   if (e?.totalOhms) r.ratio(P.track, e.totalOhms, 1 + (e.tolerancePercent ?? 20) / 100 / Math.sqrt(2)); else r.ratio(P.track, 4000, 3);
   // The wiper's own contact adds some tens of ohms to any resistor in series with it.
   if (e) r.ratio(P.wiper, (e.wiperSeriesOhms ?? 0) + 50, e.wiperSeriesOhms ? 1.12 : 1.8); else r.ratio(P.wiper, 200, 4.5);
-  r.straight(P.rest, e?.signalRatio?.rest ?? 0.5, e?.signalRatio ? 0.013 : 0.33);
-  r.straight(P.full, e?.signalRatio?.full ?? 0.5, e?.signalRatio ? 0.013 : 0.33);
+  r.share(P.rest, e?.signalRatio?.rest ?? null, 0.013).share(P.full, e?.signalRatio?.full ?? null, 0.013);
 }
 
 function electronicRanges(r: RangeBuilder, family: Exclude<Family, "potentiometer">, expect?: Expect): void {
   r.ratio(P.internal, 50_000, 2.6).ratio(P.leak, family === "open-collector" ? 1.6e6 : 5e6, 1.9);
   r.ratio(P.load, 0.006, 1.5).ratio(P.driveLow, 45, 1.6).ratio(P.high, 5.2, 1.25).ratio(P.frequency, expect?.frequencyHz ?? 430, expect?.frequencyHz ? 1.035 : 2.2);
   r.straight(P.dropSupply, 0.3, 0.05).straight(P.dropSignal, 0.5, 0.12).ratio(P.clamp, 60, 2.5);
-  if (family === "voltage") signalSpan(r, expect?.signalVolts, 2.5, 1.7, 0.035);
-  else signalSpan(r, expect?.duty, 0.5, 0.36, 0.008);
-}
-
-function signalSpan(r: RangeBuilder, stated: { rest: number; full: number } | undefined, middle: number, wide: number, narrow: number): void {
-  r.straight(P.rest, stated?.rest ?? middle, stated ? narrow : wide).straight(P.full, stated?.full ?? middle, stated ? narrow : wide);
+  const { signalVolts: volts, duty } = expect ?? {};
+  if (family === "voltage") r.straight(P.rest, volts?.rest ?? 2.5, volts ? 0.035 : 1.7).straight(P.full, volts?.full ?? 2.5, volts ? 0.035 : 1.7);
+  else r.share(P.rest, duty?.rest ?? null, 0.008).share(P.full, duty?.full ?? null, 0.008);
 }

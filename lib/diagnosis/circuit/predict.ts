@@ -4,7 +4,7 @@ import type { CheckSpec } from "../types";
 import { SIGNAL, type Candidate } from "./candidate";
 import { cavity, looseToGround, parallel, wireOhms, type Thevenin } from "./controller";
 import { deviceOhms } from "./device-ohms";
-import { clampDuty, METER_OHMS, newMatedVolts, pulses, solveMated } from "./mated";
+import { METER_OHMS, newMatedVolts, pulses, solveMated } from "./mated";
 import { P } from "./parameters";
 import { exp, ln, norm } from "../numerics";
 
@@ -174,7 +174,7 @@ function pulseCheck(c: Candidate, x: Float64Array, spec: CheckSpec, index: numbe
   const seen = pulses(c) ? mated.running * logistic((Math.abs(swing) - TRIGGER_VOLTS) / 0.04) : 0;
   out.word[index] = 1 - 0.999 * seen;
   if (spec.meter === "hertz") { out.value[index] = x[P.frequency]!; return; }
-  const duty = clampDuty(x[spec.position === "full" ? P.full : P.rest]!);
+  const duty = x[spec.position === "full" ? P.full : P.rest]!;
   out.value[index] = swing < 0 ? 1 - duty : duty;
 }
 

@@ -1,7 +1,7 @@
 import type { Candidate } from "../circuit/candidate";
 import { PARAMETER_COUNT } from "../circuit/parameters";
 import { factor, logDeterminant, solveFactored } from "./cholesky";
-import { differentiate, evaluate, followOn, makeRoom, normalEquations, pullInFull, stillOpen, stuck, type Evidence } from "./misfit";
+import { differentiate, evaluate, followOn, gradientAt, makeRoom, normalEquations, pullInFull, stillOpen, stuck, type Evidence } from "./misfit";
 import { movedBy } from "./movable";
 
 /**
@@ -24,8 +24,10 @@ const LONGEST_STEP = 2.5;
 const FULL_PULL_STEPS = 4;
 /** A fit is given up when this many times what its next step promises, and a little more, would not be enough. */
 const TRUST = 6, MARGIN = 8;
-/** Gain, natural-log units, of the last step that is worth another, and of a step that is not worth making. */
-const WORTH_A_STEP = 0.02, SETTLED = 0.002;
+/** What a step has to promise to be made, and the gain from which on another is tried, natural-log units. */
+const WORTH_A_STEP = 0.02, STALLED = 0.002;
+/** How often a step is tried, ever shorter. */
+const MOST_HALVINGS = 6;
 const MIDDLE = new Float64Array(PARAMETER_COUNT);
 
 /**
@@ -95,6 +97,10 @@ function exactStep(c: Candidate, e: Evidence, w: Work, again: boolean): number {
   return newtonStep(e, w);
 }
 
+/** Laplace's integral over z from the log-density at its peak; an upper bound on the way there. */
+const integrated = (log: number, w: Work) => log - 0.5 * logDeterminant(w.precision, w.movable.length);
+
+/** Climbs from a start to a peak of the density, where derivatives are taken anew only at the start and the end. */
 function climb(c: Candidate, e: Evidence, start: Float64Array, from: number, least: number): Fit {
   const w = workFor(c, e, start);
   let log = from, gained = Infinity, exact = true;
@@ -102,9 +108,9 @@ function climb(c: Candidate, e: Evidence, start: Float64Array, from: number, lea
   evaluate(c, w.z, e);
   let promise = exactStep(c, e, w, false);
   for (let iteration = 0; iteration < MAX_ITERATIONS; iteration++) {
-    if (!exact && (promise < WORTH_A_STEP || gained < WORTH_A_STEP)) { promise = exactStep(c, e, w, true); exact = true; }
-    if (promise < SETTLED) break;
-    if (log - 0.5 * logDeterminant(w.precision, w.movable.length) + TRUST * Math.max(gained, promise) + MARGIN < least) return GIVEN_UP;
+    if (!exact && (promise < WORTH_A_STEP || gained < STALLED)) { promise = exactStep(c, e, w, true); exact = true; }
+    if (promise < WORTH_A_STEP) break;
+    if (integrated(log, w) + TRUST * Math.max(gained, promise) + MARGIN < least) return GIVEN_UP;
     const better = lineSearch(c, w, e, log);
     if (better === -Infinity) {
       if (exact) break;
@@ -112,13 +118,13 @@ function climb(c: Candidate, e: Evidence, start: Float64Array, from: number, lea
     } else {
       gained = better - log;
       log = better;
-      if (exact && gained < WORTH_A_STEP) break;
+      if (exact && gained < STALLED) break;
     }
     exact = better === -Infinity || !followOn(w.moved, e);
     promise = exact ? exactStep(c, e, w, true) : newtonStep(e, w);
   }
   if (!exact) exactStep(c, e, w, true);
-  return { logEvidence: log - 0.5 * logDeterminant(w.precision, w.movable.length), z: w.z.slice(), active: w.movable, precision: w.precision.slice() };
+  return { logEvidence: integrated(log, w), z: w.z.slice(), active: w.movable, precision: w.precision.slice() };
 }
 
 const NOTHING = new Float64Array(0);
@@ -131,22 +137,34 @@ function promised(gradient: Float64Array, step: Float64Array): number {
   return 0.5 * sum;
 }
 
-/** Halves the step until the fit improves; moves z when it does. Returns the log-density reached, -Infinity if none. */
+/**
+ * Takes the step, or where that leads astray in a bent valley the step and what its end asks for by the same derivatives, or
+ * a half of it, and so on; moves z when the fit improves. Returns the log-density reached, -Infinity if none.
+ */
 function lineSearch(c: Candidate, w: Work, e: Evidence, from: number): number {
+  const m = w.movable.length;
   let longest = 0;
   for (const s of w.step) longest = Math.max(longest, Math.abs(s));
   let share = longest > LONGEST_STEP ? LONGEST_STEP / longest : 1;
-  for (let half = 0; half < 4; half++, share /= 2) {
-    w.trial.set(w.z);
-    for (let k = 0; k < w.movable.length; k++) w.trial[w.movable[k]!]! += share * w.step[k]!;
-    const log = evaluate(c, w.trial, e);
-    if (log > from) {
-      w.z.set(w.trial);
-      for (let k = 0; k < w.movable.length; k++) w.moved[k] = share * w.step[k]!;
-      return log;
+  for (let half = 0; half < MOST_HALVINGS; half++, share /= 2) {
+    for (let k = 0; k < m; k++) w.moved[k] = share * w.step[k]!;
+    let log = tryOut(c, w, e);
+    if (!(log > from)) {
+      gradientAt(w.trial, w.movable, e.observations.length, w.gradient);
+      solveFactored(w.precision, m, w.gradient);
+      for (let k = 0; k < m; k++) w.moved[k]! += w.gradient[k]!;
+      log = tryOut(c, w, e);
     }
+    if (log > from) { w.z.set(w.trial); return log; }
   }
   return -Infinity;
+}
+
+/** Log-density at z with what is moved. */
+function tryOut(c: Candidate, w: Work, e: Evidence): number {
+  w.trial.set(w.z);
+  for (let k = 0; k < w.movable.length; k++) w.trial[w.movable[k]!]! += w.moved[k]!;
+  return evaluate(c, w.trial, e);
 }
 
 /** Where nothing was read. */

@@ -1,11 +1,11 @@
 import type { Candidate } from "../circuit/candidate";
 import { ALL_PINS } from "../circuit/harness-parts";
-import { PARAMETER_COUNT } from "../circuit/parameters";
+import { PARAMETER_COUNT, physicalValue } from "../circuit/parameters";
 import { ALL_GROUPS, CHECK_COUNT, newPredictions, planFor, predictInto, type Plan, type Predictions } from "../circuit/predict";
 import type { MeterSpec } from "../types";
 import { reachOf } from "./movable";
 import { numberLogChance, scalePrediction, strayNumberLogDensity, wordLogChance, type Observation } from "./observe";
-import { exp, ln, norm } from "../numerics";
+import { ln, norm } from "../numerics";
 
 /**
  * How far a candidate's predictions are from the readings, and how that changes with its unknowns. One workspace serves
@@ -49,15 +49,10 @@ export function makeRoom(observations: number): void {
   jacobian = new Float64Array(room * PARAMETER_COUNT); from = new Float64Array(room); live = new Uint8Array(room);
 }
 
-function physicalAt(c: Candidate, i: number, z: number): number {
-  const v = c.ranges.mean[i]! + c.ranges.sd[i]! * z;
-  return c.ranges.log[i] ? exp(v) : v;
-}
-
 /** Physical values at z, written into `out`. */
 export function physical(c: Candidate, z: Float64Array, out: Float64Array): Float64Array {
   out.set(c.middle);
-  for (let i = 0; i < PARAMETER_COUNT; i++) if (z[i] !== 0) out[i] = physicalAt(c, i, z[i]!);
+  for (let i = 0; i < PARAMETER_COUNT; i++) if (z[i] !== 0) out[i] = physicalValue(c.ranges, i, z[i]!);
   return out;
 }
 
@@ -108,7 +103,7 @@ export function differentiate(c: Candidate, z: Float64Array, movable: readonly n
   for (let k = 0; k < m; k++) {
     if (again && !moves[k]) continue;
     const p = movable[k]!, kept = x[p]!, reach = reachOf(c, p, base.idle);
-    x[p] = physicalAt(c, p, z[p]! + DIFFERENCE);
+    x[p] = physicalValue(c.ranges, p, z[p]! + DIFFERENCE);
     predictInto(c, x, e.plan, reach, nudged, true);
     x[p] = kept;
     let any = z[p] === 0 ? 0 : 1;
@@ -145,18 +140,29 @@ export function followOn(moved: Float64Array, e: Evidence): boolean {
   return true;
 }
 
+/** Gradient J'Wr - z at the point last evaluated, by the derivatives in force. */
+export function gradientAt(z: Float64Array, movable: readonly number[], n: number, gradient: Float64Array): void {
+  const m = movable.length;
+  for (let a = 0; a < m; a++) gradient[a] = -z[movable[a]!]!;
+  for (let i = 0; i < n; i++) {
+    if (!live[i]) continue;
+    const pull = residual[i]! * weight[i]! / sds[i]!;
+    for (let a = 0; a < m; a++) gradient[a]! += jacobian[i * m + a]! * pull;
+  }
+}
+
 /** Precision matrix I + J'WJ and gradient J'Wr - z. */
 export function normalEquations(z: Float64Array, movable: readonly number[], n: number, precision: Float64Array, gradient: Float64Array): void {
   const m = movable.length;
+  gradientAt(z, movable, n, gradient);
   precision.fill(0);
-  for (let a = 0; a < m; a++) { precision[a * m + a] = 1; gradient[a] = -z[movable[a]!]!; }
+  for (let a = 0; a < m; a++) precision[a * m + a] = 1;
   for (let i = 0; i < n; i++) {
     if (!live[i]) continue;
     const scale = 1 / sds[i]!, heft = weight[i]! * scale;
     for (let a = 0; a < m; a++) {
       const ja = jacobian[i * m + a]! * heft;
       if (ja === 0) continue;
-      gradient[a]! += ja * residual[i]!;
       for (let b = 0; b <= a; b++) precision[a * m + b]! += ja * (jacobian[i * m + b]! * scale);
     }
   }

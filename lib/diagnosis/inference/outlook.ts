@@ -1,5 +1,5 @@
 import { ALL_GROUPS, CHECK_COUNT, newPredictions, predictInto, WHOLE_PLAN, type Predictions } from "../circuit/predict";
-import { PARAMETER_COUNT } from "../circuit/parameters";
+import { PARAMETER_COUNT, physicalValue } from "../circuit/parameters";
 import { ALL_CHECKS } from "../checks";
 import type { MeterSpec } from "../types";
 import { forward } from "./cholesky";
@@ -7,7 +7,7 @@ import { physical } from "./misfit";
 import { movedBy, reachOf } from "./movable";
 import { scaledSd, scalePrediction, unscale } from "./observe";
 import type { Believed } from "./posterior";
-import { exp, square } from "../numerics";
+import { square } from "../numerics";
 
 /** What one candidate, fitted to the readings so far, expects of every check: a normal on the comparison scale, or a word. */
 export interface Outlook {
@@ -46,8 +46,8 @@ interface Derivatives { readonly parameters: readonly number[]; readonly rows: r
 function derivativesOf(b: Believed, meter: MeterSpec, mean: Float64Array): Derivatives {
   const { candidate: c, fit } = b, parameters = movedBy(c, WHOLE_PLAN);
   const idle = at.idle, rows = parameters.map((p) => {
-    const row = new Float64Array(CHECK_COUNT), kept = x[p]!, v = c.ranges.mean[p]! + c.ranges.sd[p]! * (fit.z[p]! + DIFFERENCE), reach = reachOf(c, p, idle);
-    x[p] = c.ranges.log[p] ? exp(v) : v;
+    const row = new Float64Array(CHECK_COUNT), kept = x[p]!, reach = reachOf(c, p, idle);
+    x[p] = physicalValue(c.ranges, p, fit.z[p]! + DIFFERENCE);
     nudged.value.set(at.value);
     predictInto(c, x, WHOLE_PLAN, reach, nudged, true);
     x[p] = kept;

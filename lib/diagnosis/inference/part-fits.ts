@@ -1,6 +1,6 @@
 import type { Candidate } from "../circuit/candidate";
 import { harnessParts, inScope, SCOPES } from "../circuit/harness-parts";
-import { PARAMETER_COUNT } from "../circuit/parameters";
+import { P, PARAMETER_COUNT } from "../circuit/parameters";
 import { GROUP } from "../circuit/predict";
 import type { MeterSpec } from "../types";
 import { fitCandidate, NO_FIT, together, type Fit } from "./fit";
@@ -9,6 +9,9 @@ import type { Observation } from "./observe";
 
 const UNPOWERED = GROUP.cold | GROUP.wires, HARNESS = UNPOWERED | GROUP.live;
 const MIDDLE = new Float64Array(PARAMETER_COUNT);
+/** Track, wiper and positions share the ohms out among them in bent valleys: looked for with little, middling and much in the wiper. */
+const TRACK_STARTS = [0, -1.5, 1.5].map((wiper) => { const z = new Float64Array(PARAMETER_COUNT); z[P.wiper] = wiper; return z; });
+const ONE_START = [MIDDLE];
 
 /** Readings fitted together, and the fits to them so far, by what of the machine they were made for. */
 interface Part { readonly evidence: Evidence; readonly fits: Map<string, Fit> }
@@ -72,15 +75,15 @@ export class PartFits {
   /** The most that a candidate's log-weight can be. */
   bound(c: Candidate): number {
     let sum = c.logPrior + this.deviceFit(c).logEvidence + this.livePeak + this.matedPeak;
-    for (const { scope, key } of harnessParts(c)) if (this.scopes[scope]) sum += fitOf(this.scopes[scope], key, c, MIDDLE).logEvidence;
+    for (const { scope, key } of harnessParts(c)) if (this.scopes[scope]) sum += fitOf(this.scopes[scope], key, c, ONE_START).logEvidence;
     return sum;
   }
 
   /** Fit of one candidate to all readings; given up where its log-weight cannot reach `least`. */
   fit(c: Candidate, least: number): Fit {
-    const device = this.deviceFit(c), unpowered = harnessParts(c).flatMap(({ scope, key }) => (this.scopes[scope] ? [fitOf(this.scopes[scope], key, c, MIDDLE)] : []));
+    const device = this.deviceFit(c), unpowered = harnessParts(c).flatMap(({ scope, key }) => (this.scopes[scope] ? [fitOf(this.scopes[scope], key, c, ONE_START)] : []));
     if (this.separate) return together(device, ...unpowered);
-    const harness = this.live ? fitOf(this.harness, c.harnessKey, c, startOf(...unpowered)) : together(...unpowered);
+    const harness = this.live ? fitOf(this.harness, c.harnessKey, c, [startOf(...unpowered)]) : together(...unpowered);
     if (!this.mated) return together(device, harness);
     if (c.logPrior + device.logEvidence + harness.logEvidence + this.matedPeak < least) return NO_FIT_AT_ALL;
     return this.joint(c, device, harness, least - c.logPrior);
@@ -94,7 +97,7 @@ export class PartFits {
   }
 
   private deviceFit(c: Candidate): Fit {
-    return this.device.evidence.observations.length === 0 ? NO_FIT : fitOf(this.device, c.deviceKey, c, MIDDLE);
+    return this.device.evidence.observations.length === 0 ? NO_FIT : fitOf(this.device, c.deviceKey, c, c.family === "potentiometer" ? TRACK_STARTS : ONE_START);
   }
 
   private part(wanted: (o: Observation) => boolean, pins?: number): Part {
@@ -103,9 +106,10 @@ export class PartFits {
   }
 }
 
-function fitOf({ evidence, fits }: Part, key: string, c: Candidate, start: Float64Array): Fit {
+/** The best fit from any of the starts, made once. */
+function fitOf({ evidence, fits }: Part, key: string, c: Candidate, starts: readonly Float64Array[]): Fit {
   let fit = fits.get(key);
-  if (!fit) fits.set(key, fit = fitCandidate(c, evidence, start));
+  if (!fit) fits.set(key, fit = starts.map((start) => fitCandidate(c, evidence, start)).reduce((best, one) => (one.logEvidence > best.logEvidence ? one : best)));
   return fit;
 }
 
