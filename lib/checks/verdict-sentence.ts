@@ -17,7 +17,7 @@ export function openKinds(kinds: readonly KindChance[]): readonly KindChance[] {
 }
 
 /** Is one kind likely enough to be named? */
-function kindNamed(kinds: readonly KindChance[]): boolean {
+export function kindNamed(kinds: readonly KindChance[]): boolean {
   const [best] = kinds;
   return best !== undefined && (best.p >= LIKELY || openKinds(kinds).length < 2);
 }

@@ -23,6 +23,8 @@ test("a confirmed check shows among the chances, and withdrawing it takes it out
   await expectAccessible(page, "confirmed check");
   await expectNoSidewaysScroll(page);
 
+  await page.goto("/checks");
+  await expect(page.getByRole("listitem").filter({ has: page.locator(`a[href="${check}"]`) })).toContainText(/Confirmed: Wire to . open/);
   await page.goto("/checks/chances");
   await expect(row(page, "Open wire")).toContainText(/up .*points/);
   await expect(row(page, "Sound")).toContainText(/(up|down) .*points/);
