@@ -2,6 +2,7 @@ import { describe, expect, it } from "vitest";
 import { vocabulary, type Expect, type Reading } from "@/lib/diagnosis";
 import { judge, judgeInSlices } from "./judge";
 import type { RunSetup, RunStep } from "./run";
+import { verdictColumns } from "./verdict-columns";
 import { SURE } from "./verdict-sentence";
 
 const SETUP: RunSetup = { cavityLabels: ["A", "B", "C"] };
@@ -96,7 +97,9 @@ describe("the verdict on a run", () => {
     const verdict = judge({ setup: { cavityLabels: ["1", "2", "3"] }, steps: steps(SHORTED_SIGNAL) }).verdict;
     expect(verdict.tellKindsApart).toEqual([]);
     expect(verdict.sentence).toMatch(/^The wire of cavity 3 \(signal\) is shorted to ground; .* is either an analogue voltage device or a PWM device: no reading with a meter tells these apart\.$/);
+    expect(verdictColumns(verdict)).toMatchObject({ kind: null, findingCode: "short-to-ground" });
     expect(verdictOf(OPEN_B, POT).tellKindsApart).toBeNull();
+    expect(verdictColumns(verdictOf(OPEN_B, POT)).kind).toBe("potentiometer");
   });
 
   it("comes out the same in slices", async () => {

@@ -2,7 +2,7 @@ import { expect, test, type Page } from "@playwright/test";
 import { expectAccessible, expectNoSidewaysScroll } from "./support/accessible";
 import type { Screen } from "./support/lead-card";
 import { signIn } from "./support/people";
-import { answerAll, enter, field, machine, startUnknown } from "./support/run-check";
+import { answerAll, enter, field, giveReading, machine, startUnknown, takeReadings, toReading } from "./support/run-check";
 
 test.describe.configure({ timeout: 240_000 });
 
@@ -74,6 +74,26 @@ test("keys and buttons of a check are 96 pixels high or more; on a phone card, f
   await enter(page).click();
   await expect(page.getByRole("alert").filter({ hasText: "bananas" })).toBeInViewport({ ratio: 1 });
   await expect(field(page)).toBeInViewport({ ratio: 1 });
+});
+
+test("a mistyped reading is named as soon as others contradict it; taken again, the contradiction is gone", async ({ page }) => {
+  await signIn(page, "technician");
+  await startUnknown(page);
+  const bench = machine("potentiometer with an open wire"), asked = await toReading(page), right = bench.readings[asked];
+  if (typeof right !== "number") throw new Error(`${asked} reads no number`);
+  // The kilo twice: "7.14k" on a meter that already shows kilohms, entered as 7140k.
+  await giveReading(page, { ...bench, readings: { ...bench.readings, [asked]: right * 1000 } }, asked);
+  const banner = page.getByRole("status").filter({ hasText: "These readings contradict each other" });
+  for (let taken = 0; taken < 6 && !(await banner.isVisible()); taken += 1) await takeReadings(page, bench, 1);
+  await expect(banner).toContainText(/Take this one again: Resistance, device pin \d to pin \d, actuator at full travel\./);
+  await expect(page.locator("[data-standing-strip]")).toContainText("The readings contradict each other");
+  await expectAccessible(page, "contradiction");
+  await expectNoSidewaysScroll(page);
+  await banner.getByRole("button", { name: "Take it again" }).click();
+  expect(await toReading(page)).toBe(asked);
+  await giveReading(page, bench, asked);
+  await expect(banner).toHaveCount(0);
+  await expect(page.locator("[data-standing-strip]")).not.toContainText("contradict");
 });
 
 test("the drawing of the wiring is whole each time it is opened", async ({ page }, { project }) => {

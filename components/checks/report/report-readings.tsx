@@ -60,7 +60,7 @@ function ReadingRow({ row, labels, beside }: { readonly row: EvidenceRow; readon
     <tr className="break-inside-avoid border-b border-quiet">
       <th scope="row" className={`${TD} w-[26%] text-left font-normal`}>{checkName(row.check, labels)}</th>
       <td className={`${TD} font-mono`}><span className="font-bold whitespace-nowrap">{readingWords(row.check, row.value)}</span>{row.limit === null ? null : <span className="block whitespace-nowrap text-quiet">{limitWords(row)}</span>}</td>
-      <td className={TD}>{expected}{moved ? <span className="mt-0.5 flex gap-1.5 font-bold"><MovementMark kind={movement(row)} /><span>{moved}</span></span> : null}</td>
+      <td className={TD}>{expected}{moved ? <span className={`mt-0.5 flex gap-1.5 ${movement(row) === "neither" ? "" : "font-bold"}`}><MovementMark kind={movement(row)} /><span>{moved}</span></span> : null}</td>
       {beside ? <td className={`${TD} w-[18%] font-mono`}>{expectedWords(row.ifSound)}</td> : null}
     </tr>
   );
