@@ -1,5 +1,4 @@
 import { existsSync, readFileSync, renameSync, writeFileSync } from "node:fs";
-import { tmpdir } from "node:os";
 import path from "node:path";
 import { expect, type BrowserContext, type Page } from "@playwright/test";
 
@@ -17,7 +16,10 @@ const PASSWORD = "lock-paddle-27";
 type Cookies = Awaited<ReturnType<BrowserContext["cookies"]>>;
 
 /** Where a person's session is kept for all workers of this run, so that nobody runs into the limit on sign-ins. */
-const sessionFile = (who: keyof typeof PEOPLE): string => path.join(process.env.E2E_FOLDER ?? tmpdir(), `session-${who}.json`);
+function sessionFile(who: keyof typeof PEOPLE): string {
+  if (!process.env.E2E_FOLDER) throw new Error("E2E_FOLDER is set by playwright.config.ts");
+  return path.join(process.env.E2E_FOLDER, `session-${who}.json`);
+}
 
 /** Signs in by the form, as a person does, and ends on Today. */
 export async function signInByForm(page: Page, who: keyof typeof PEOPLE): Promise<void> {
