@@ -12,6 +12,10 @@ const baseURL = `http://127.0.0.1:${port}`;
 
 const CHROMIUM_ARGS = ["--no-sandbox", "--disable-gpu", "--disable-quic", "--no-first-run", "--disable-background-networking", "--disable-component-update", "--disable-sync"];
 
+/** What does not hang on the screen's size is tested at one of them. */
+const ONCE = "once/**/*.spec.ts";
+const PHONE = { viewport: { width: 390, height: 844 }, hasTouch: true };
+
 export default defineConfig({
   testDir: "tests/e2e",
   outputDir: "test-results",
@@ -25,12 +29,15 @@ export default defineConfig({
   use: {
     baseURL,
     browserName: "chromium",
-    trace: "retain-on-failure",
+    // A trace of every test makes them a quarter slower. A failed one leaves its picture; E2E_TRACE=1 records the rest.
+    trace: process.env.E2E_TRACE ? "retain-on-failure" : "off",
+    screenshot: "only-on-failure",
     launchOptions: { executablePath: process.env.CHROMIUM_PATH ?? "/usr/bin/chromium", args: CHROMIUM_ARGS },
   },
   projects: [
-    { name: "phone", use: { viewport: { width: 390, height: 844 }, hasTouch: true } },
-    { name: "desk", use: { viewport: { width: 1280, height: 800 } } },
+    { name: "phone", testIgnore: ONCE, use: PHONE },
+    { name: "desk", testIgnore: ONCE, use: { viewport: { width: 1280, height: 800 } } },
+    { name: "once", testMatch: ONCE, use: PHONE },
   ],
   webServer: {
     // A database of its own, filled with the demo workshop before the server opens it.

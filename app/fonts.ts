@@ -3,14 +3,11 @@ import localFont from "next/font/local";
 // Only the two main faces are preloaded. The others stand behind them by unicode-range and are fetched
 // when a page shows one of their signs: neither main face has the ohm sign, the comparison signs or arrows.
 // No generated fallback face: it would stand before the Greek one and lend its own ohm sign.
+// The compiler reads these calls as they stand: a file that serves twice has to be written twice.
 
 export const read = localFont({
-  src: [
-    { path: "../node_modules/@fontsource-variable/atkinson-hyperlegible-next/files/atkinson-hyperlegible-next-latin-wght-normal.woff2", weight: "200 800", style: "normal" },
-  ],
-  variable: "--font-read",
-  display: "swap",
-  adjustFontFallback: false,
+  src: "../node_modules/@fontsource-variable/atkinson-hyperlegible-next/files/atkinson-hyperlegible-next-latin-wght-normal.woff2", weight: "200 800",
+  variable: "--font-read", display: "swap", adjustFontFallback: false,
 });
 
 export const readGreek = localFont({
@@ -41,12 +38,8 @@ export const mono = localFont({
  * both name the same file and no line is set twice.
  */
 export const monoPoint = localFont({
-  src: [
-    { path: "../node_modules/@fontsource-variable/atkinson-hyperlegible-next/files/atkinson-hyperlegible-next-latin-wght-normal.woff2", weight: "200 800", style: "normal" },
-  ],
-  variable: "--font-mono-point",
-  display: "swap",
-  adjustFontFallback: false,
+  src: "../node_modules/@fontsource-variable/atkinson-hyperlegible-next/files/atkinson-hyperlegible-next-latin-wght-normal.woff2", weight: "200 800",
+  variable: "--font-mono-point", display: "swap", adjustFontFallback: false,
   declarations: [{ prop: "unicode-range", value: "U+0020,U+002C,U+002E,U+003A,U+003B,U+00A0" }],
 });
 

@@ -10,6 +10,9 @@ import { readJsonBody } from "./request-body";
 
 export type ActionResult<T> = { readonly ok: true; readonly data: T } | { readonly ok: false; readonly error: ErrorBody };
 
+/** An action as a form's state takes it: the answer before, and the form. */
+export type FormAction = (last: ActionResult<unknown> | null, form: FormData) => Promise<ActionResult<unknown>>;
+
 const DEFECT = new AppError("server-error", "Something went wrong here. Nothing was changed. Try again; if it stays, tell an administrator.", 500);
 
 /** Coded errors pass; anything else is logged in full and answered with a general sentence. */

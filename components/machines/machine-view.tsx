@@ -1,4 +1,5 @@
 import Link from "next/link";
+import { ConfirmedMark } from "@/components/checks/outcome/confirmed-mark";
 import { ButtonLink, EmptyState, Notice, PageHeading, Quantity, Sheet } from "@/components/ui";
 import { dayWords } from "@/lib/checks/date-words";
 import type { Machine } from "@/lib/machines/get-machine";
@@ -33,6 +34,7 @@ function CheckRow({ check }: { readonly check: MachineCheck }) {
         <Link href={`/checks/${check.id}`} className="underline decoration-2 underline-offset-4 after:absolute after:inset-0 focus-visible:outline-none focus-visible:after:outline-3 focus-visible:after:outline-bench">{check.entry ?? "Unknown device"}</Link>
       </p>
       <p className="mt-1">{check.finished ? check.sentence ?? "Finished without a verdict." : "Still running."}</p>
+      {check.confirmed ? <div className="mt-1"><ConfirmedMark finding={check.confirmed} /></div> : null}
     </li>
   );
 }

@@ -1,18 +1,16 @@
 "use client";
 
 import { useActionState } from "react";
-import { Button, Checkbox, Notice } from "@/components/ui";
-import type { ActionResult } from "@/lib/action";
+import { Button, Checkbox, Refusal } from "@/components/ui";
+import type { FormAction } from "@/lib/action";
 import type { ListedPerson } from "@/lib/people/list-people";
 import { RoleWords } from "./role-words";
-
-type Act = (previous: ActionResult<unknown> | null, form: FormData) => Promise<ActionResult<unknown>>;
 
 interface PersonEditorProps {
   readonly person: ListedPerson;
   readonly roles: readonly string[];
-  readonly setRoles: Act;
-  readonly setDisabled: Act;
+  readonly setRoles: FormAction;
+  readonly setDisabled: FormAction;
 }
 
 /** One person, with their roles to tick and the account to shut or open. Changes count from their next request. */
@@ -23,7 +21,7 @@ export function PersonEditor({ person, roles, setRoles, setDisabled }: PersonEdi
   return (
     <li className="border-b border-quiet py-3 first:border-t">
       <RoleWords person={person} />
-      {failed && !failed.ok ? <Notice tone="stop" title={failed.error.message} live="assertive" /> : null}
+      <Refusal result={failed} />
       <details>
         <summary className="link flex min-h-touch w-fit cursor-pointer items-center font-bold">Change<span className="sr-only"> {person.name}</span></summary>
         <form action={sendRoles} key={person.roles.join()}>

@@ -1,23 +1,21 @@
 "use client";
 
 import { useActionState } from "react";
-import { Button, Notice } from "@/components/ui";
-import type { ActionResult } from "@/lib/action";
+import { Button, Refusal } from "@/components/ui";
+import type { FormAction } from "@/lib/action";
 import { browserName } from "./browser-name";
 import { When } from "./when";
 
 export interface ShownSession { readonly id: string; readonly userAgent: string; readonly createdAt: Date; readonly lastSeenAt: Date; readonly own: boolean }
 
-type Act = (previous: ActionResult<unknown> | null, form: FormData) => Promise<ActionResult<unknown>>;
-
 /** The browsers one is signed in with, each with its way out. */
-export function SessionList({ sessions, revoke, revokeOthers }: { readonly sessions: readonly ShownSession[]; readonly revoke: Act; readonly revokeOthers: Act }) {
+export function SessionList({ sessions, revoke, revokeOthers }: { readonly sessions: readonly ShownSession[]; readonly revoke: FormAction; readonly revokeOthers: FormAction }) {
   const [result, send, busy] = useActionState(revoke, null);
   const [others, sendOthers, busyOthers] = useActionState(revokeOthers, null);
   const failed = [result, others].find((answer) => answer && !answer.ok);
   return (
     <div className="grid gap-4">
-      {failed && !failed.ok ? <Notice tone="stop" title={failed.error.message} live="assertive" /> : null}
+      <Refusal result={failed} />
       <ul className="grid">
         {sessions.map((session) => <SessionItem key={session.id} session={session} send={send} busy={busy} />)}
       </ul>

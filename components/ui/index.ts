@@ -9,4 +9,5 @@ export { Notice, type NoticeTone } from "./notice";
 export { PageHeading } from "./page-heading";
 export { PinTag, type PinTagRole } from "./pin-tag";
 export { Quantity } from "./quantity";
+export { Refusal } from "./refusal";
 export { Sheet } from "./sheet";

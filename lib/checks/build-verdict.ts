@@ -19,6 +19,8 @@ export interface VerdictInput {
   readonly explanation: Explanation;
   /** Checks of the whole vocabulary, skipped ones too, that would tell the open findings apart; best first. */
   readonly tellApart: readonly Pick<NextCheck, "check" | "why">[];
+  /** The same for the kinds that are left; null where one is settled. */
+  readonly tellKindsApart: readonly Pick<NextCheck, "check" | "why">[] | null;
   readonly engineVersion: string;
 }
 
@@ -39,6 +41,8 @@ export function explainedFindings(standing: Pick<Standing, "faults" | "openFindi
   return [...wanted.values()].sort((a, b) => place(a) - place(b));
 }
 
+const told = (checks: readonly Pick<NextCheck, "check" | "why">[]) => checks.slice(0, MAX_TELL_APART).map(({ check, why }) => ({ check, why }));
+
 function adviceOf(open: readonly FaultChance[], labels: Labels): FindingAdvice[] {
   return open.slice(0, MAX_ADVICE).map((finding) => ({ finding, ...adviceFor(finding, labels) }));
 }
@@ -47,7 +51,7 @@ function adviceOf(open: readonly FaultChance[], labels: Labels): FindingAdvice[]
  * Turns an assessment into what is shown, printed and stored. Pure: no clock, no chance.
  * A contradictory set of readings gets no advice on repairs, only the readings to take again.
  */
-export function buildVerdict({ labels, assessment, explanation, tellApart, engineVersion }: VerdictInput): Verdict {
+export function buildVerdict({ labels, assessment, explanation, tellApart, tellKindsApart, engineVersion }: VerdictInput): Verdict {
   const contradictory = assessment.state === "contradictory";
   const suspects = contradictory ? assessment.suspects : [];
   const open = assessment.openFindings;
@@ -56,7 +60,7 @@ export function buildVerdict({ labels, assessment, explanation, tellApart, engin
   const inseparable = open.length > 1 && tellApart.length === 0;
   const evidenceFinding = evidenceFindingOf(assessment), shown = faultId(evidenceFinding ?? { code: "none" });
   return {
-    sentence: verdictSentence({ ...assessment, inseparable }, labels, contradictory ? suspects : null),
+    sentence: verdictSentence({ ...assessment, inseparable, kindsInseparable: tellKindsApart?.length === 0 }, labels, contradictory ? suspects : null),
     short: shortVerdict(open, labels, contradictory),
     state: assessment.state,
     kinds: assessment.kinds,
@@ -66,7 +70,8 @@ export function buildVerdict({ labels, assessment, explanation, tellApart, engin
     inseparable,
     contradictory,
     suspects,
-    tellApart: open.length > 1 ? tellApart.slice(0, MAX_TELL_APART).map(({ check, why }) => ({ check, why })) : [],
+    tellApart: open.length > 1 ? told(tellApart) : [],
+    tellKindsApart: tellKindsApart && told(tellKindsApart),
     evidence: explanation.evidence.find(({ finding }) => faultId(finding) === shown)?.rows ?? [],
     evidenceFinding,
     explained: explanation.evidence,

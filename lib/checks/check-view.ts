@@ -1,3 +1,4 @@
+import type { ConfirmationView } from "./confirmation-view";
 import type { Run } from "./run";
 import type { Verdict } from "./verdict";
 
@@ -14,6 +15,8 @@ export interface CheckView extends Run {
   /** The version that the check used, which need not be the one shown today. */
   readonly entry: { readonly id: string; readonly slug: string; readonly name: string; readonly version: number } | null;
   readonly meterName: string | null;
+  /** What it was recorded to have been, newest first; at most one is not withdrawn. */
+  readonly confirmations: readonly ConfirmationView[];
   readonly recheckOf: string | null;
   /** Finished or running checks that repeat this one after a repair, oldest first; only those the person may open. */
   readonly rechecks: readonly { readonly id: string; readonly state: CheckStateName; readonly startedAt: string }[];
@@ -33,6 +36,8 @@ export interface CheckRow {
   readonly person: { readonly id: string; readonly name: string };
   readonly machine: { readonly id: string; readonly fleetNumber: string; readonly name: string } | null;
   readonly entryName: string | null;
+  /** What it turned out to be, in a few words; null while nothing is confirmed. */
+  readonly confirmed: string | null;
   readonly recheckOf: string | null;
 }
 

@@ -1,11 +1,10 @@
 import { describe, expect, it } from "vitest";
 import type { EvidenceRow, Prediction } from "@/lib/diagnosis";
-import { bearing, evidencePhrases, evidenceSentence, expectedWords, fits, limitWords, movedSentence, timesWords } from "./evidence-words";
+import { evidencePhrases, evidenceSentence, expectedWords, fits, limitWords, movedSentence, timesWords } from "./evidence-words";
 
 const band = (check: string, low: number, high: number, words: Prediction["words"] = []): Prediction => ({ check, number: { low, middle: (low + high) / 2, high }, words });
 const word = (check: string, ...words: readonly (readonly [Prediction["words"][number]["word"], number])[]): Prediction => ({ check, number: null, words: words.map(([w, p]) => ({ word: w, p })) });
 const VOLTS = "volt:harness:1-gnd";
-const UNMOVED = { offLimits: null, offIfSound: null, factor: null, without: null } as const;
 
 describe("what is expected, in words", () => {
   it("gives the band with its unit, and the words beside it", () => {
@@ -28,11 +27,6 @@ describe("a reading beside its predictions", () => {
     expect(fits(band(VOLTS, 4.9, 5.1), 5.12, 0.03)).toBe(true);
     expect(fits(band(VOLTS, 4.9, 5.1), 5.14, 0.03)).toBe(false);
     expect(fits(band(VOLTS, 4.9, 5.1), "OL", null)).toBe(false);
-  });
-
-  it("stands on the side of what it fits", () => {
-    const row = (value: EvidenceRow["value"]): EvidenceRow => ({ check: VOLTS, value, ifSound: band(VOLTS, 4.9, 5.1), ifFinding: band(VOLTS, -0.01, 0.01), limit: 0.03, ...UNMOVED });
-    expect([5, 0, 2.5].map((value) => bearing(row(value)))).toEqual(["against-finding", "against-sound", "against-both"]);
   });
 });
 

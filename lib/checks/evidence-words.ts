@@ -40,24 +40,6 @@ export function fits(prediction: Prediction, value: ReadingValue, limit: number 
   return value >= prediction.number.low - slack && value <= prediction.number.high + slack;
 }
 
-export type Bearing = "fits-both" | "against-sound" | "against-finding" | "against-both";
-
-/** On which side a row of the evidence stands. */
-export function bearing(row: EvidenceRow): Bearing {
-  const sound = fits(row.ifSound, row.value, row.limit);
-  const finding = fits(row.ifFinding, row.value, row.limit);
-  if (sound && finding) return "fits-both";
-  if (finding) return "against-sound";
-  return sound ? "against-finding" : "against-both";
-}
-
-export const BEARING_WORDS: Readonly<Record<Bearing, string>> = {
-  "fits-both": "fits both",
-  "against-sound": "speaks for the finding",
-  "against-finding": "speaks against the finding",
-  "against-both": "fits neither: take it again",
-};
-
 /** Meter's limit of error at a reading, e.g. "± 0.029 V"; words have none. */
 export function limitWords(row: Pick<EvidenceRow, "check" | "value" | "limit">): string {
   const unit = parseCheck(row.check)?.unit;

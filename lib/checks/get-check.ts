@@ -5,6 +5,7 @@ import { checks, entries, entryVersions, machines, meters, people } from "@/db/s
 import { assertPermission, type Person } from "@/lib/auth/permissions";
 import { stepsOf, visibleCheck, visibleTo } from "./check-rows";
 import type { CheckView } from "./check-view";
+import { confirmationsOf } from "./list-confirmations";
 import { readVerdict } from "./stored-verdict";
 
 async function namesOf(check: typeof checks.$inferSelect) {
@@ -38,6 +39,7 @@ export async function getCheck(person: Person, id: string): Promise<CheckView> {
     machine: check.machineId && names?.fleetNumber ? { id: check.machineId, fleetNumber: names.fleetNumber, name: names.machineName ?? "" } : null,
     entry: check.entryId && names?.slug ? { id: check.entryId, slug: names.slug, name: names.entryName ?? "", version: names.version ?? 0 } : null,
     meterName: names?.meterName ?? null,
+    confirmations: check.state === "finished" ? await confirmationsOf(person, id) : [],
     recheckOf: check.recheckOf,
     rechecks: rechecks.map((row) => ({ ...row, startedAt: row.startedAt.toISOString() })),
   };

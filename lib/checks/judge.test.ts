@@ -2,6 +2,7 @@ import { describe, expect, it } from "vitest";
 import { vocabulary, type Expect, type Reading } from "@/lib/diagnosis";
 import { judge, judgeInSlices } from "./judge";
 import type { RunSetup, RunStep } from "./run";
+import { verdictColumns } from "./verdict-columns";
 import { SURE } from "./verdict-sentence";
 
 const SETUP: RunSetup = { cavityLabels: ["A", "B", "C"] };
@@ -13,6 +14,11 @@ const verdictOf = (readings: readonly Reading[], expect?: Expect) => judge({ set
 
 /** The divider of 5 kΩ at 0.9 of 5 V and a harness whose wire B is open. [computed; harness values common practice] */
 const OPEN_B: readonly Reading[] = [["res:device:1-3@rest", 5010], ["res:device:1-2@rest", 4560], ["volt:harness:1-3", 5], ["volt:harness:1-2", 0], ["res:wire:2", "OL"], ["res:wire:1", 0.2], ["res:wire:3", 0.2]];
+
+/** A voltage device whose signal wire lies on ground; ohms of powered electronics, from memory. With the signal at 0 V there is no output to tell by. */
+const SHORTED_SIGNAL: readonly Reading[] = [
+  ["res:device:3-1@full", 222_500], ["res:device:1-2@full", "OL"], ["res:harness:2-gnd", 35_880], ["res:harness:3-gnd", 1.2], ["res:harness:1-gnd", 0.4], ["res:loose:3-gnd", 1.4], ["volt:harness:1-3", -0.002],
+];
 
 describe("the verdict on a run", () => {
   it("names the wire, with evidence that says why", () => {
@@ -84,7 +90,16 @@ describe("the verdict on a run", () => {
     expect(verdict.explained.map(({ finding }) => finding.code)).toEqual(["wire-open", "none"]);
     expect(verdict.explained[0]?.rows).toEqual(verdict.evidence);
     expect(verdict.carrying?.checks).toContain("res:wire:2");
-    expect(verdict.engineVersion).toBe("2");
+    expect(verdict.engineVersion).toBe("3");
+  });
+
+  it("leaves the kind open where a shorted signal hides it, and says so", () => {
+    const verdict = judge({ setup: { cavityLabels: ["1", "2", "3"] }, steps: steps(SHORTED_SIGNAL) }).verdict;
+    expect(verdict.tellKindsApart).toEqual([]);
+    expect(verdict.sentence).toMatch(/^The wire of cavity 3 \(signal\) is shorted to ground; .* is either an analogue voltage device or a PWM device: no reading with a meter tells these apart\.$/);
+    expect(verdictColumns(verdict)).toMatchObject({ kind: null, findingCode: "short-to-ground" });
+    expect(verdictOf(OPEN_B, POT).tellKindsApart).toBeNull();
+    expect(verdictColumns(verdictOf(OPEN_B, POT)).kind).toBe("potentiometer");
   });
 
   it("comes out the same in slices", async () => {

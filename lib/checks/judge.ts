@@ -5,9 +5,10 @@ import { inSlices } from "./in-slices";
 import type { Run } from "./run";
 import { effectiveReadings, engineSetup } from "./run-state";
 import type { Verdict } from "./verdict";
+import { openKinds } from "./verdict-sentence";
 
 /** Kept with each verdict; goes up whenever the same readings could be judged differently, or more is kept of the reasons. */
-export const ENGINE_VERSION = "2";
+export const ENGINE_VERSION = "3";
 
 export interface Judgement { readonly assessment: Exclude<Assessment, { state: "invalid-input" }>; readonly verdict: Verdict }
 
@@ -19,10 +20,11 @@ function* judgeSteps(run: Pick<Run, "setup" | "steps">): Generator<void, Judgeme
   if (assessment.state === "invalid-input") throw new AppError(assessment.code, assessment.message, 422, assessment.where);
   yield;
   const explanation = yield* explainSteps(setup, readings, explainedFindings(assessment));
-  const open = assessment.openFindings;
+  const open = assessment.openFindings, kinds = openKinds(assessment.kinds), anywhere = { ...setup, excluded: undefined };
   const verdict = buildVerdict({
     labels: run.setup.cavityLabels, assessment, engineVersion: ENGINE_VERSION, explanation,
-    tellApart: open.length > 1 ? tellApart({ ...setup, excluded: undefined }, readings, open) : [],
+    tellApart: open.length > 1 ? tellApart(anywhere, readings, open) : [],
+    tellKindsApart: assessment.state !== "contradictory" && kinds.length > 1 ? tellApart(anywhere, readings, kinds.map(({ kind }) => ({ kind }))) : null,
   });
   return { assessment, verdict };
 }

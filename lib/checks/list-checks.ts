@@ -1,11 +1,12 @@
 import "server-only";
 import { and, desc, eq, gte, lt, or, type SQL } from "drizzle-orm";
 import { readDb } from "@/db/client";
-import { checks, entryVersions, machines, people } from "@/db/schema";
+import { checks, confirmations, entryVersions, machines, people } from "@/db/schema";
 import { assertPermission, type Person } from "@/lib/auth/permissions";
 import { parseInput } from "@/lib/parse";
 import { visibleTo } from "./check-rows";
 import type { CheckPage, CheckRow } from "./check-view";
+import { CONFIRMED_COLUMNS, confirmedWords, inForce } from "./confirmed";
 import { listChecksSchema, type ListChecksFilters } from "./schemas";
 
 const PAGE = 20;
@@ -37,23 +38,23 @@ function beyond(after: string | undefined): SQL | undefined {
 const COLUMNS = {
   id: checks.id, state: checks.state, startedAt: checks.startedAt, finishedAt: checks.finishedAt, sentence: checks.sentence,
   kind: checks.kind, findingCode: checks.findingCode, findingChance: checks.findingChance, recheckOf: checks.recheckOf,
-  personId: checks.personId, personName: people.name, machineId: machines.id, fleetNumber: machines.fleetNumber, machineName: machines.name, entryName: entryVersions.name,
+  personId: checks.personId, personName: people.name, machineId: machines.id, fleetNumber: machines.fleetNumber, machineName: machines.name, entryName: entryVersions.name, ...CONFIRMED_COLUMNS,
 } as const;
 
 function select(person: Person, filters: ListChecksFilters, limit: number) {
   return readDb().select(COLUMNS).from(checks)
     .innerJoin(people, eq(people.id, checks.personId)).leftJoin(machines, eq(machines.id, checks.machineId))
-    .leftJoin(entryVersions, eq(entryVersions.id, checks.entryVersionId))
+    .leftJoin(entryVersions, eq(entryVersions.id, checks.entryVersionId)).leftJoin(confirmations, inForce)
     .where(and(...conditions(person, filters), beyond(filters.after)))
     .orderBy(desc(checks.startedAt), desc(checks.id)).limit(limit + 1);
 }
 
 type Selected = Awaited<ReturnType<typeof select>>[number];
 
-function toRow({ personId, personName, machineId, fleetNumber, machineName, ...row }: Selected): CheckRow {
+function toRow({ personId, personName, machineId, fleetNumber, machineName, setup, confirmedCode, confirmedPins, ...row }: Selected): CheckRow {
   return {
     ...row, startedAt: row.startedAt.toISOString(), finishedAt: row.finishedAt?.toISOString() ?? null,
-    person: { id: personId, name: personName },
+    person: { id: personId, name: personName }, confirmed: confirmedWords({ setup, confirmedCode, confirmedPins }),
     machine: machineId && fleetNumber ? { id: machineId, fleetNumber, name: machineName ?? "" } : null,
   };
 }

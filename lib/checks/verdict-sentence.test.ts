@@ -1,21 +1,21 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
-import type { Fault, FaultChance, Standing } from "@/lib/diagnosis";
-import { SURE, verdictSentence } from "./verdict-sentence";
+import type { Fault, FaultChance } from "@/lib/diagnosis";
+import { openKinds, SURE, verdictSentence, type Told } from "./verdict-sentence";
 
 const LABELS = ["A", "B", "C"] as const;
 const PINS = { supply: 1, ground: 2, signal: 3 } as const;
 const OPEN_WIRE: Fault = { code: "wire-open", pins: [3] };
 const CONTACT: Fault = { code: "contact-open", pins: [3] };
 
-function standing(change: Partial<Standing> = {}): Standing {
+function standing(change: Partial<Told> = {}): Told {
   const openFindings: readonly FaultChance[] = [{ ...OPEN_WIRE, p: 0.99 }];
   return {
     kinds: [{ kind: "potentiometer", p: 0.99 }, { kind: "pwm", p: 0.01 }], pins: [{ ...PINS, p: 0.99 }],
-    faults: openFindings, openFindings, hypotheses: [], done: true, inseparable: false, next: [], ...change,
+    faults: openFindings, openFindings, hypotheses: [], done: true, inseparable: false, kindsInseparable: false, next: [], ...change,
   };
 }
-const say = (change: Partial<Standing> = {}) => verdictSentence(standing(change), LABELS, null);
+const say = (change: Partial<Told> = {}) => verdictSentence(standing(change), LABELS, null);
 const open = (...list: readonly (readonly [Fault, number])[]) => ({ openFindings: list.map(([fault, p]) => ({ ...fault, p })) });
 
 describe("the verdict's sentence", () => {
@@ -50,6 +50,28 @@ describe("the verdict's sentence", () => {
   it("leaves the roles out while the pins are not settled", () => {
     expect(say({ pins: [{ ...PINS, p: 0.7 }, { supply: 2, ground: 1, signal: 3, p: 0.3 }] })).toContain("most likely with supply on A, ground on B and signal on C, and the wire of cavity C is open");
     expect(say({ pins: [{ ...PINS, p: 0.5 }] })).toContain("its pins not settled");
+  });
+
+  const EITHER = { kinds: [{ kind: "voltage", p: 0.557 }, { kind: "pwm", p: 0.443 }, { kind: "potentiometer", p: 0 }] } as const;
+
+  it("says the finding first where it is known and the kind is not, and that no meter tells the kinds apart", () => {
+    expect(say({ ...EITHER, ...open([{ code: "short-to-ground", pins: [3] }, 0.999]), kindsInseparable: true })).toBe(
+      "The wire of cavity C (signal) is shorted to ground; the device, with supply on A, ground on B and signal on C, is either an analogue voltage device or a PWM device: no reading with a meter tells these apart.");
+  });
+
+  it("does not say so where a reading would tell the kinds apart", () => {
+    const text = say({ ...EITHER, ...open([{ code: "none" }, 0.99]) });
+    expect(text).toBe("Every reading fits a sound device and sound wiring; the device, with supply on A, ground on B and signal on C, is either an analogue voltage device or a PWM device, which the readings so far do not tell.");
+  });
+
+  it("names what is left of each where neither kind nor finding is known", () => {
+    expect(say({ ...EITHER, ...open([OPEN_WIRE, 0.5], [CONTACT, 0.46]), pins: [{ ...PINS, p: 0.5 }] })).toBe(
+      "The device, its pins not settled, is either an analogue voltage device or a PWM device, and it cannot be told yet whether the wire of cavity C is open, or contact C of the mated connector does not touch.");
+  });
+
+  it("names every kind that is left", () => {
+    expect(say({ kinds: [{ kind: "voltage", p: 0.4 }, { kind: "pwm", p: 0.35 }, { kind: "potentiometer", p: 0.25 }] })).toContain("is either an analogue voltage device, a PWM device or a potentiometer");
+    expect(openKinds([{ kind: "voltage", p: 0.96 }, { kind: "pwm", p: 0.04 }])).toHaveLength(1);
   });
 
   it("asks for a reading again when the readings contradict each other, and concludes nothing", () => {

@@ -30,6 +30,8 @@ export interface Verdict {
   readonly suspects: readonly { readonly check: string; readonly why: string }[];
   /** Readings not yet taken that would tell the open findings apart, best first; empty when none would. */
   readonly tellApart: readonly Pick<NextCheck, "check" | "why">[];
+  /** Readings that would tell the kinds apart that are left, best first; empty when none would, null where one kind is settled. */
+  readonly tellKindsApart: readonly Pick<NextCheck, "check" | "why">[] | null;
   readonly evidence: readonly EvidenceRow[];
   /** The finding that the evidence table sets against "sound": the best one that is not "none"; null when there is none. */
   readonly evidenceFinding: Fault | null;

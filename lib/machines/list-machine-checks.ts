@@ -1,8 +1,9 @@
 import "server-only";
 import { and, count, desc, eq, ne } from "drizzle-orm";
 import { readDb } from "@/db/client";
-import { checks, entryVersions, people } from "@/db/schema";
+import { checks, confirmations, entryVersions, people } from "@/db/schema";
 import { assertPermission, type Person } from "@/lib/auth/permissions";
+import { CONFIRMED_COLUMNS, confirmedWords, inForce } from "@/lib/checks/confirmed";
 import { parseInput } from "@/lib/parse";
 import { listMachineChecksSchema } from "./schemas";
 
@@ -15,6 +16,8 @@ export interface MachineCheck {
   readonly entry: string | null;
   /** The verdict's sentence; null while the check runs. */
   readonly sentence: string | null;
+  /** What it turned out to be, in a few words; null while nothing is confirmed. */
+  readonly confirmed: string | null;
 }
 
 /**
@@ -28,9 +31,11 @@ export async function listMachineChecks(person: Person, input: unknown): Promise
   const mine = and(eq(checks.machineId, id), ne(checks.state, "abandoned"));
   const [all] = await db.select({ total: count() }).from(checks).where(mine);
   const rows = await db.select({
-    id: checks.id, startedAt: checks.startedAt, state: checks.state, verdict: checks.verdict, person: people.name, entry: entryVersions.name,
+    id: checks.id, startedAt: checks.startedAt, state: checks.state, verdict: checks.verdict, person: people.name, entry: entryVersions.name, ...CONFIRMED_COLUMNS,
   }).from(checks).innerJoin(people, eq(people.id, checks.personId)).leftJoin(entryVersions, eq(entryVersions.id, checks.entryVersionId))
-    .where(mine).orderBy(desc(checks.startedAt), desc(checks.id)).limit(limit);
-  const newest = rows.map(({ verdict, state, ...row }) => ({ ...row, finished: state === "finished", sentence: verdict?.sentence ?? null }));
+    .leftJoin(confirmations, inForce).where(mine).orderBy(desc(checks.startedAt), desc(checks.id)).limit(limit);
+  const newest = rows.map(({ verdict, state, setup, confirmedCode, confirmedPins, ...row }) => ({
+    ...row, finished: state === "finished", sentence: verdict?.sentence ?? null, confirmed: confirmedWords({ setup, confirmedCode, confirmedPins }),
+  }));
   return { total: all?.total ?? 0, newest };
 }

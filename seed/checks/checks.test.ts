@@ -39,7 +39,8 @@ describe("the demo checks", () => {
     expect(finished.length).toBeGreaterThanOrEqual(20);
     expect(new Set(finished.flatMap((row) => row.machineId ?? [])).size).toBe(12);
     expect(new Set(finished.map((row) => row.personId)).size).toBeGreaterThanOrEqual(5);
-    expect(new Set(finished.map((row) => row.kind))).toEqual(new Set(["potentiometer", "pwm", "voltage"]));
+    // One of them has a shorted signal, which leaves its kind open.
+    expect(new Set(finished.flatMap((row) => row.kind ?? []))).toEqual(new Set(["potentiometer", "pwm", "voltage"]));
     expect(new Set(finished.map((row) => row.findingCode)).size).toBeGreaterThanOrEqual(8);
     expect(finished.filter((row) => row.recheckOf !== null)).toHaveLength(2);
     expect(finished.some((row) => row.verdict?.contradictory)).toBe(true);

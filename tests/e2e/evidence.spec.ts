@@ -1,20 +1,10 @@
-import { expect, test, type Page } from "@playwright/test";
+import { expect, test } from "@playwright/test";
 import { expectAccessible, expectNoSidewaysScroll } from "./support/accessible";
-import { readScreen } from "./support/lead-card";
 import { signIn } from "./support/people";
-import { giveReading, machine, startUnknown } from "./support/run-check";
+import { machine, startUnknown, takeReadings } from "./support/run-check";
+import { apart, evidence, openFinished } from "./support/verdict";
 
 test.describe.configure({ timeout: 240_000 });
-
-/** The demo check whose readings leave two findings open that no meter tells apart, by its note in the log. */
-async function openFinished(page: Page, finding: RegExp): Promise<void> {
-  await page.goto("/checks?state=finished");
-  await page.getByRole("main").getByRole("link", { name: finding }).first().click();
-  await expect(page.getByRole("heading", { level: 1, name: /^Verdict/ })).toBeVisible();
-}
-
-const evidence = (page: Page) => page.getByRole("region", { name: "Evidence", exact: true });
-const apart = (page: Page) => page.getByRole("region", { name: "What would tell two apart" });
 
 test("a verdict shows what carries it, the evidence for any finding, and what tells two apart", async ({ page }) => {
   await signIn(page, "everyRole");
@@ -44,27 +34,10 @@ test("a verdict shows what carries it, the evidence for any finding, and what te
   await expect(page.getByRole("main")).toContainText(/readings alone carr|needs every one of its|rests on this one reading/);
 });
 
-test("all of that needs no script", async ({ browser, page }) => {
-  await signIn(page, "everyRole");
-  await openFinished(page, /wire to . open/i);
-  const address = page.url(), plain = await browser.newContext({ javaScriptEnabled: false, storageState: await page.context().storageState() });
-  const still = await plain.newPage();
-  await still.goto(address);
-  await evidence(still).getByRole("link", { name: /sound/i }).click();
-  await expect(evidence(still)).toContainText("If the wiring and the device are sound");
-  await apart(still).getByRole("button", { name: "Show" }).click();
-  await expect(apart(still)).toContainText(/It would (settle it|help)|Nothing that a meter can do/);
-  await plain.close();
-});
-
 test("a running check gives its reasons on demand, without a server", async ({ page, context }) => {
   await signIn(page, "technician");
   await startUnknown(page);
-  const bench = machine("potentiometer with an open wire");
-  for (let step = 0, taken = 0; taken < 3 && step < 10; step += 1) {
-    const screen = await readScreen(page);
-    if (screen.type === "reading") { await giveReading(page, bench, screen.check); taken += 1; } else await page.getByRole("button", { name: /^Done/ }).click();
-  }
+  await takeReadings(page, machine("potentiometer with an open wire"), 3);
   await context.setOffline(true);
   await page.getByRole("button", { expanded: false, name: /All$/ }).click();
   const details = page.locator("#standing-details");

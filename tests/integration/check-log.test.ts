@@ -4,8 +4,12 @@ import { describe, expect, it } from "vitest";
 import { readDb, write } from "@/db/client";
 import { checks } from "@/db/schema";
 import { attachMachine } from "@/lib/checks/attach-machine";
+import { confirmCheck } from "@/lib/checks/confirm-check";
 import { finishCheck } from "@/lib/checks/finish-check";
+import { getCheck } from "@/lib/checks/get-check";
 import { listChecks } from "@/lib/checks/list-checks";
+import { withdrawConfirmation } from "@/lib/checks/withdraw-confirmation";
+import { listMachineChecks } from "@/lib/machines/list-machine-checks";
 import { eachTestOwnDatabase } from "../support/database";
 import { makePerson } from "../support/people";
 import { codeOf, makeMachine, makeRunning, OPEN_WIRE_READINGS, PLAIN_SETUP } from "../support/workshop";
@@ -13,6 +17,21 @@ import { codeOf, makeMachine, makeRunning, OPEN_WIRE_READINGS, PLAIN_SETUP } fro
 eachTestOwnDatabase();
 
 describe("the log", () => {
+  it("says what a check turned out to be, as the machine's history and the check itself do, until that is withdrawn", async () => {
+    const me = await makePerson();
+    const machineId = await makeMachine();
+    const [confirmed, open] = [await makeRunning(me, OPEN_WIRE_READINGS), await makeRunning(me, OPEN_WIRE_READINGS)];
+    for (const id of [confirmed, open]) { await finishCheck(me, id, {}); await attachMachine(me, id, { machineId }); }
+    const { id: confirmationId } = await confirmCheck(me, confirmed, { finding: "contact-open:2", kind: "potentiometer", proof: "Contact renewed, the fault stays away." });
+    const said = async () => [await listChecks(me, {}), { rows: (await listMachineChecks(me, { id: machineId })).newest }].map(({ rows }) => Object.fromEntries(rows.map((row) => [row.id, row.confirmed])));
+    expect(await said()).toEqual([{ [confirmed]: "Contact 2 of the connector does not touch", [open]: null }, { [confirmed]: "Contact 2 of the connector does not touch", [open]: null }]);
+    expect((await getCheck(me, confirmed)).confirmations).toMatchObject([{ id: confirmationId, finding: { code: "contact-open", pins: [2] }, asVerdict: false, withdrawn: null }]);
+    expect((await getCheck(me, open)).confirmations).toEqual([]);
+    await withdrawConfirmation(me, { confirmationId });
+    expect(await said()).toEqual([{ [confirmed]: null, [open]: null }, { [confirmed]: null, [open]: null }]);
+    expect((await getCheck(me, confirmed)).confirmations).toMatchObject([{ id: confirmationId, withdrawn: { by: expect.any(String) as string } }]);
+  });
+
   it("filters by each of its fields and refuses what is no filter", async () => {
     const [me, other] = [await makePerson(), await makePerson()];
     const machineId = await makeMachine();

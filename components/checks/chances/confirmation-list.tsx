@@ -4,15 +4,15 @@ import type { Route } from "next";
 import Link from "next/link";
 import { useActionState, useEffect, useRef } from "react";
 import { againstVerdict, WithdrawForm } from "@/components/checks/outcome";
-import { Notice } from "@/components/ui";
-import type { ActionResult } from "@/lib/action";
+import { Refusal } from "@/components/ui";
+import type { FormAction } from "@/lib/action";
 import type { ConfirmationView } from "@/lib/checks/confirmation-view";
 import { momentWords } from "@/lib/checks/date-words";
 import { findingHeading, kindTitle } from "@/lib/checks/finding-words";
 
 interface ConfirmationListProps {
   readonly rows: readonly ConfirmationView[];
-  readonly withdraw: (last: ActionResult<unknown> | null, form: FormData) => Promise<ActionResult<unknown>>;
+  readonly withdraw: FormAction;
 }
 
 function Item({ row, send, busy }: { readonly row: ConfirmationView; readonly send: (form: FormData) => void; readonly busy: boolean }) {
@@ -36,7 +36,7 @@ export function ConfirmationList({ rows, withdraw }: ConfirmationListProps) {
   useEffect(() => { if (result?.ok) done.current?.focus(); }, [result]);
   return (
     <>
-      {result && !result.ok ? <Notice tone="stop" title={result.error.message} live="assertive" /> : null}
+      <Refusal result={result} />
       {result?.ok ? <p ref={done} tabIndex={-1} role="status" className="mb-2 font-bold text-sound outline-none"><span aria-hidden="true">■ </span>Withdrawn. It no longer shifts the chances.</p> : null}
       <ol>{rows.map((row) => <Item key={row.id} row={row} send={send} busy={busy} />)}</ol>
     </>

@@ -1,14 +1,14 @@
 "use client";
 
 import { useActionState } from "react";
-import { Button, Notice } from "@/components/ui";
-import type { ActionResult } from "@/lib/action";
+import { Button, Notice, Refusal } from "@/components/ui";
+import type { FormAction } from "@/lib/action";
 import { momentWords } from "@/lib/checks/date-words";
 
 interface OwnSwitchProps {
   readonly setAside: { readonly by: string; readonly at: string } | null;
   readonly maySwitch: boolean;
-  readonly act: (last: ActionResult<unknown> | null, form: FormData) => Promise<ActionResult<unknown>>;
+  readonly act: FormAction;
 }
 
 /** Says whether own checks count, and lets those who may set them aside or count them again. */
@@ -16,7 +16,7 @@ export function OwnSwitch({ setAside, maySwitch, act }: OwnSwitchProps) {
   const [result, send, busy] = useActionState(act, null);
   return (
     <div className="grid gap-4">
-      {result && !result.ok ? <Notice tone="stop" title={result.error.message} live="assertive" /> : null}
+      <Refusal result={result} />
       <div role="status">
         {setAside
           ? <Notice tone="ask" title="Own checks are set aside"><p>New checks start from the published chances alone. Set aside by {setAside.by}, {momentWords(setAside.at)}.</p></Notice>

@@ -6,6 +6,7 @@ import { chanceWords } from "@/lib/checks/chance-words";
 import type { CheckRow } from "@/lib/checks/check-view";
 import { momentWords } from "@/lib/checks/date-words";
 import { kindTitle } from "@/lib/checks/finding-words";
+import { ConfirmedMark } from "../outcome/confirmed-mark";
 import { SURE } from "@/lib/checks/verdict-sentence";
 
 const SHAPES = { sound: "M3 3h18v18H3ZM7 12l4 4 6-8", finding: "M8 2h8l6 6v8l-6 6H8l-6-6V8ZM12 6v8M12 16v2", open: "M12 3 22 21H2ZM12 10v5M12 17v1.5", running: "M12 3a9 9 0 1 0 .01 0M12 7v5l4 3", abandoned: "M3 3h18v18H3ZM8 8l8 8M16 8l-8 8" } as const;
@@ -59,6 +60,7 @@ function LogItem({ row }: { row: CheckRow }) {
         {row.state === "running"
           ? <p className="flex flex-wrap items-center justify-between gap-3"><span className="text-lg font-bold">Running</span><ButtonLink href={href} tone="main">Carry on</ButtonLink></p>
           : <Link href={href} className="link inline-flex min-h-touch max-w-prose items-center text-lg leading-snug font-bold">{headline(row)}</Link>}
+        {row.confirmed ? <ConfirmedMark finding={row.confirmed} /> : null}
         <Facts row={row} />
       </div>
     </li>

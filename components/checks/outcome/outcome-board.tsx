@@ -1,16 +1,15 @@
 "use client";
 
 import { useActionState, useEffect, useRef, type ReactNode } from "react";
-import { Notice, Sheet } from "@/components/ui";
-import type { ActionResult } from "@/lib/action";
+import { Refusal, Sheet } from "@/components/ui";
+import type { FormAction } from "@/lib/action";
 import type { ConfirmationView } from "@/lib/checks/confirmation-view";
 import { findingHeading } from "@/lib/checks/finding-words";
+import { ConfirmedMark } from "./confirmed-mark";
 import { ConfirmForm, type ConfirmAction } from "./confirm-form";
 import type { OutcomeGroup } from "./outcome-options";
 import { OutcomeWords } from "./outcome-words";
 import { WithdrawForm } from "./withdraw-form";
-
-type WithdrawAction = (last: ActionResult<unknown> | null, form: FormData) => Promise<ActionResult<unknown>>;
 
 interface OutcomeBoardProps {
   readonly checkId: string;
@@ -20,7 +19,7 @@ interface OutcomeBoardProps {
   readonly groups: readonly OutcomeGroup[];
   readonly kind: string;
   readonly confirm: ConfirmAction;
-  readonly withdraw: WithdrawAction;
+  readonly withdraw: FormAction;
   /** Shown where nothing is recorded and this person may not, or need not, record it here. */
   readonly instead: ReactNode;
 }
@@ -55,13 +54,11 @@ export function OutcomeBoard(props: OutcomeBoardProps) {
   const place = useFocusOnChange(inForce?.id ?? "");
   return (
     <Sheet id="outcome" title="What it turned out to be">
-      {withdrawn && !withdrawn.ok ? <Notice tone="stop" title={withdrawn.error.message} live="assertive" /> : null}
+      <Refusal result={withdrawn} />
       <div ref={place} tabIndex={-1} className="grid gap-4 outline-none">
         {inForce ? (
           <div className="grid gap-1">
-            <p className="flex items-center gap-2 font-bold text-sound">
-              <svg viewBox="0 0 24 24" aria-hidden="true" className="size-6 fill-none stroke-current [stroke-width:2.5]"><path d="M3 3h18v18H3ZM7 12l4 4 6-8" /></svg>Confirmed
-            </p>
+            <ConfirmedMark />
             <OutcomeWords one={inForce} />
             {inForce.mayWithdraw ? <WithdrawForm confirmationId={inForce.id} what={findingHeading(inForce.finding, inForce.labels)} send={send} busy={busy} /> : null}
           </div>

@@ -6,6 +6,7 @@ import type { CheckView } from "@/lib/checks/check-view";
 import type { ConfirmationView } from "@/lib/checks/confirmation-view";
 import { momentWords } from "@/lib/checks/date-words";
 import { findingHeading, KIND_TITLES } from "@/lib/checks/finding-words";
+import { alikeKindsWords } from "@/lib/checks/kinds-apart-words";
 import { effectiveReadings } from "@/lib/checks/run-state";
 import type { Verdict } from "@/lib/checks/verdict";
 import { settledPins } from "@/lib/checks/verdict-sentence";
@@ -90,7 +91,21 @@ function Open({ check, verdict }: ReportProps) {
     <Part title="What would tell the rest apart">
       {verdict.tellApart.length === 0
         ? <p>No reading with a meter will tell the rest apart.</p>
-        : <ol className="list-decimal pl-6">{verdict.tellApart.map((next) => <li key={next.check}>{checkName(next.check, labels)}. {next.why}</li>)}</ol>}
+        : <Telling checks={verdict.tellApart} check={check} />}
+    </Part>
+  );
+}
+
+function Telling({ checks, check }: { readonly checks: Verdict["tellApart"]; readonly check: CheckView }) {
+  return <ol className="list-decimal pl-6">{checks.map((next) => <li key={next.check}>{checkName(next.check, check.setup.cavityLabels)}. {next.why}</li>)}</ol>;
+}
+
+function KindOpen({ check, verdict }: ReportProps) {
+  const { tellKindsApart: checks, openFindings } = verdict;
+  if (!checks) return null;
+  return (
+    <Part title="What would tell the kind of device">
+      {checks.length === 0 ? <p>No reading with a meter. {alikeKindsWords(openFindings)}</p> : <Telling checks={checks} check={check} />}
     </Part>
   );
 }
@@ -116,6 +131,7 @@ export function CheckReport({ check, verdict, outcome }: ReportProps) {
         </div>
       </Part>
       <Open check={check} verdict={verdict} />
+      <KindOpen check={check} verdict={verdict} />
       <Part title="Readings and evidence">
         {verdict.carrying ? <p className="mb-3"><strong>{carryingSentence(verdict.carrying, effectiveReadings(check.steps).length)}</strong>{carriedNames(check, verdict)}</p> : null}
         <ReportReadings check={check} verdict={verdict} />

@@ -3,16 +3,18 @@ import type { Assessment } from "@/lib/diagnosis";
 import type { Labels } from "@/lib/checks/check-words";
 import { chanceWords } from "@/lib/checks/chance-words";
 import { findingHeading, kindTitle } from "@/lib/checks/finding-words";
+import { kindNamed, openKinds } from "@/lib/checks/verdict-sentence";
 import { ScreenHeading } from "./screen-heading";
 
 type Standing = Exclude<Assessment, { state: "invalid-input" }>;
 
 function Beliefs({ standing, labels }: { readonly standing: Standing; readonly labels: Labels }) {
-  const kind = standing.kinds[0];
+  // Where no kind is likely enough to be named, all that are left are.
+  const kinds = kindNamed(standing.kinds) ? standing.kinds.slice(0, 1) : openKinds(standing.kinds);
   const open = standing.openFindings;
   return (
     <ul className="grid gap-1 text-lg">
-      {kind ? <li><strong>{kindTitle(kind.kind)}</strong>: {chanceWords(kind.p)}.</li> : null}
+      {kinds.map(({ kind, p }) => <li key={kind}><strong>{kindTitle(kind)}</strong>: {chanceWords(p)}.</li>)}
       {open.map((fault) => <li key={findingHeading(fault, labels)}><strong>{findingHeading(fault, labels)}</strong>: {chanceWords(fault.p)}.</li>)}
     </ul>
   );

@@ -17,7 +17,9 @@ function Key({ label, children, onPress, className = "", pressed }: KeyProps) {
 }
 
 const DIGITS = ["7", "8", "9", "4", "5", "6", "1", "2", "3"] as const satisfies readonly KeypadKey[];
-const DIGIT_PLACE = ["col-start-1 row-start-1", "col-start-2 row-start-1", "col-start-3 row-start-1", "col-start-1 row-start-2", "col-start-2 row-start-2", "col-start-3 row-start-2", "col-start-1 row-start-3", "col-start-2 row-start-3", "col-start-3 row-start-3"];
+const COLUMN = ["col-start-1", "col-start-2", "col-start-3"];
+/** On a short screen the first two rows are those of the field and of its error. */
+const ROW = ["row-start-1 short:row-start-3", "row-start-2 short:row-start-4", "row-start-3 short:row-start-5"];
 
 interface SideKey { readonly key: KeypadKey; readonly label: string; readonly face: ReactNode }
 
@@ -41,23 +43,26 @@ interface KeypadProps {
   readonly onEnter: () => void;
 }
 
-/** The check's own keypad: every key 96 px high or more, 8 px apart, for a gloved hand. */
+/**
+ * The check's own keypad: every key 96 px high or more, 8 px apart, for a gloved hand. Where the browser's bars leave a
+ * phone too little height for four rows of them, Enter stands beside the field and three rows are left.
+ */
 export function Keypad({ unit, selected, busy, onKey, onUnit, onEnter }: KeypadProps) {
   const [upper, lower] = sideKeys(unit);
   return (
-    <div role="group" aria-label="Keypad" className="grid grid-cols-5 grid-rows-4 gap-2">
-      {DIGITS.map((digit, i) => <Key key={digit} label={digit} onPress={() => onKey(digit)} className={DIGIT_PLACE[i]}>{digit}</Key>)}
-      <Key label="Back one" onPress={() => onKey("back")} className="col-start-4 row-start-1"><BackMark /></Key>
-      <Key label={upper.label} onPress={() => onKey(upper.key)} className="col-start-4 row-start-2">{upper.face}</Key>
-      <Key label={lower.label} onPress={() => onKey(lower.key)} className="col-start-4 row-start-3">{lower.face}</Key>
-      <div role="group" aria-label="Unit" className="col-start-5 row-span-3 row-start-1 flex flex-col gap-2">
+    <div role="group" aria-label="Keypad" className="grid grid-cols-5 grid-rows-4 gap-2 short:contents">
+      {DIGITS.map((digit, i) => <Key key={digit} label={digit} onPress={() => onKey(digit)} className={`${COLUMN[i % 3]} ${ROW[Math.floor(i / 3)]}`}>{digit}</Key>)}
+      <Key label="Back one" onPress={() => onKey("back")} className={`col-start-4 short:col-start-5 ${ROW[0]}`}><BackMark /></Key>
+      <Key label={upper.label} onPress={() => onKey(upper.key)} className={`col-start-4 short:col-start-5 ${ROW[1]}`}>{upper.face}</Key>
+      <Key label={lower.label} onPress={() => onKey(lower.key)} className={`col-start-4 short:col-start-5 ${ROW[2]}`}>{lower.face}</Key>
+      <div role="group" aria-label="Unit" className="col-start-5 row-span-3 row-start-1 flex flex-col gap-2 short:col-start-6 short:row-start-3">
         {UNIT_CHOICES[unit].map((choice) => <Key key={choice} label={`Unit ${choice}`} pressed={choice === selected} onPress={() => onUnit(choice)} className="flex-1 text-2xl!">{choice}</Key>)}
       </div>
-      <Key label="0" onPress={() => onKey("0")} className="col-start-1 row-start-4">0</Key>
-      <Key label="Decimal point" onPress={() => onKey(".")} className="col-start-2 row-start-4">.</Key>
+      <Key label="0" onPress={() => onKey("0")} className="col-start-1 row-start-4 short:col-start-4 short:row-span-2 short:row-start-4">0</Key>
+      <Key label="Decimal point" onPress={() => onKey(".")} className="col-start-2 row-start-4 short:col-start-4 short:row-start-3">.</Key>
       <button
         type="submit" aria-disabled={busy || undefined} onClick={(event) => { event.preventDefault(); if (!busy) onEnter(); }}
-        className="tag-cut button button-main col-span-3 col-start-3 row-start-4 min-h-glove text-2xl"
+        className="tag-cut button button-main col-span-3 col-start-3 row-start-4 min-h-glove text-2xl short:col-span-2 short:col-start-5 short:row-start-1 short:-mb-2 short:self-start"
       >
         Enter
       </button>

@@ -41,7 +41,7 @@ export function ReadingEntry({ spec, typed, onTyped, onReading }: ReadingEntryPr
   };
 
   return (
-    <form noValidate className="grid grid-cols-1 gap-2" onSubmit={(event) => { event.preventDefault(); void enter(); }}>
+    <form noValidate className="grid grid-cols-1 gap-2 short:grid-cols-6" onSubmit={(event) => { event.preventDefault(); void enter(); }}>
       <ReadingField text={text} unit={unit} error={error} onChange={change} />
       <Keypad
         unit={spec.unit} selected={unit} busy={busy}
@@ -57,22 +57,24 @@ interface ReadingFieldProps { readonly text: string; readonly unit: string; read
 function ReadingField({ text, unit, error, onChange }: ReadingFieldProps) {
   const id = useId();
   const place = useRef<HTMLDivElement>(null);
+  const shownUnit = text === "" || isBareNumber(text) ? unit : "";
   useEffect(() => {
     // Enter may have been reached by scrolling: what is wrong must not stay behind the standing.
     if (error && place.current) uncover(place.current);
   }, [error]);
   return (
-    <div ref={place} className="grid grid-cols-1 gap-1">
-      <div className={`flex min-h-glove items-center border-2 bg-sheet has-focus-visible:outline-3 has-focus-visible:outline-offset-3 has-focus-visible:outline-bench ${error ? "border-4 border-stop" : "border-rule"}`}>
-        <label htmlFor={id} className="self-stretch pt-2 pl-3 text-lg text-quiet">Reading<span className="sr-only">{unit ? `, in ${unit} unless you type another unit` : ""}</span></label>
+    <div className="grid grid-cols-1 gap-1 short:contents">
+      {/* On a short screen: row 1 with Enter beside it; row 2 is the error's, and its gap is taken back while it is empty. */}
+      <div ref={place} className={`relative flex short:col-span-4 short:row-start-1 short:-mb-2 min-h-glove items-center border-2 bg-sheet has-focus-visible:outline-3 has-focus-visible:outline-offset-3 has-focus-visible:outline-bench ${error ? "border-4 border-stop" : "border-rule"}`}>
+        <label htmlFor={id} className="self-stretch pt-2 pl-3 text-lg text-quiet short:absolute short:top-0 short:left-0 short:pt-1">Reading<span className="sr-only">{unit ? `, in ${unit} unless you type another unit` : ""}</span></label>
         <input
           id={id} value={text} onChange={(event) => onChange(event.target.value)} inputMode="decimal" autoComplete="off" autoCorrect="off" spellCheck={false}
           enterKeyHint="enter" maxLength={40} aria-invalid={error ? true : undefined} aria-describedby={error ? `${id}-error` : undefined}
-          className="min-w-0 flex-1 self-stretch bg-transparent px-3 text-right font-mono text-[2.75rem] leading-none font-bold text-ink outline-none!"
+          className="min-w-0 flex-1 self-stretch bg-transparent px-3 text-right font-mono text-[2.75rem] leading-none font-bold text-ink outline-none! short:pt-6 short:pr-1.5 short:text-[2.5rem]"
         />
-        <span aria-hidden="true" className="min-w-14 pr-3 font-mono text-[2.75rem] leading-none">{text === "" || isBareNumber(text) ? unit : ""}</span>
+        {shownUnit ? <span aria-hidden="true" className="min-w-14 pr-3 font-mono text-[2.75rem] leading-none short:min-w-10 short:pt-6 short:text-[2.5rem]">{shownUnit}</span> : null}
       </div>
-      {error ? <p id={`${id}-error`} role="alert" className="flex gap-2 font-bold text-stop"><span aria-hidden="true">■</span><span>{error}</span></p> : null}
+      {error ? <p id={`${id}-error`} role="alert" className="flex gap-2 font-bold text-stop short:col-span-6 short:row-start-2 short:pt-1"><span aria-hidden="true">■</span><span>{error}</span></p> : null}
     </div>
   );
 }

@@ -3,19 +3,17 @@
 import type { Route } from "next";
 import { useActionState } from "react";
 import { Button, ButtonLink, Field, Notice, Select } from "@/components/ui";
-import type { ActionResult } from "@/lib/action";
+import type { FormAction } from "@/lib/action";
 import type { MachineChoice } from "@/lib/checks/check-view";
 
 /** A server action of a form: it answers with a result, or goes to another page. */
-type StateAction = (last: ActionResult<unknown> | null, form: FormData) => Promise<ActionResult<unknown>>;
-
 interface VerdictButtonsProps {
   readonly checkId: string;
   /** May this person start checks? */
   readonly mayRun: boolean;
   /** Is there a run to stand beside? */
   readonly comparable: boolean;
-  readonly recheck: StateAction;
+  readonly recheck: FormAction;
 }
 
 /** What can be done with a finished check. Works without script. */
@@ -43,7 +41,7 @@ interface AttachMachineProps {
   readonly checkId: string;
   readonly machines: readonly MachineChoice[];
   readonly current: string | null;
-  readonly attach: StateAction;
+  readonly attach: FormAction;
 }
 
 /** Says on which machine the check was made. */

@@ -3,6 +3,7 @@ import { Notice, Sheet } from "@/components/ui";
 import { checkName, type Labels } from "@/lib/checks/check-name";
 import type { CheckView } from "@/lib/checks/check-view";
 import { findingHeading } from "@/lib/checks/finding-words";
+import { alikeKindsWords } from "@/lib/checks/kinds-apart-words";
 import type { Verdict } from "@/lib/checks/verdict";
 import { settledPins } from "@/lib/checks/verdict-sentence";
 import { AdviceList } from "./advice-list";
@@ -81,9 +82,21 @@ function TellApart({ verdict, labels }: { verdict: Verdict; labels: Labels }) {
   }
   return (
     <Notice tone="ask" title="What would tell the rest apart">
-      <ol className="list-decimal space-y-1.5 pl-6">{verdict.tellApart.map((next) => <li key={next.check}><strong>{checkName(next.check, labels)}.</strong> {next.why}</li>)}</ol>
+      <TellingOrder checks={verdict.tellApart} labels={labels} />
     </Notice>
   );
+}
+
+function TellingOrder({ checks, labels }: { checks: Verdict["tellApart"]; labels: Labels }) {
+  return <ol className="list-decimal space-y-1.5 pl-6">{checks.map((next) => <li key={next.check}><strong>{checkName(next.check, labels)}.</strong> {next.why}</li>)}</ol>;
+}
+
+/** What would tell the kind of device, where the readings leave it open. */
+function KindApart({ verdict, labels }: { verdict: Verdict; labels: Labels }) {
+  const { tellKindsApart: checks, openFindings } = verdict;
+  if (!checks) return null;
+  if (checks.length === 0) return <Notice tone="ask" title="No reading with a meter will tell the kind of device"><p>{alikeKindsWords(openFindings)}</p></Notice>;
+  return <Notice tone="ask" title="What would tell the kind of device"><TellingOrder checks={checks} labels={labels} /></Notice>;
 }
 
 /** The verdict of a finished check, read-only. Server-rendered; the buttons come from the page. */
@@ -96,6 +109,7 @@ export function VerdictView({ check, actions, finding, apart }: VerdictViewProps
       <Sentence verdict={verdict} />
       {actions}
       <TellApart verdict={verdict} labels={labels} />
+      <KindApart verdict={verdict} labels={labels} />
       <div className="grid gap-6 lg:grid-cols-2">
         <Place verdict={verdict} check={check} />
         <Sheet title="Pins of the device">

@@ -6,7 +6,8 @@ const TAGS = ["wcag2a", "wcag2aa", "wcag21a", "wcag21aa", "wcag22aa", "best-prac
 /** No axe violation on the screen as it stands: WCAG 2.2 AA, target size, and contrast of 7:1 as our look asks. */
 export async function expectAccessible(page: Page, screen: string): Promise<void> {
   const { violations } = await new AxeBuilder({ page })
-    .options({ rules: { "target-size": { enabled: true }, "color-contrast-enhanced": { enabled: true } } })
+    .setLegacyMode()
+    .options({ resultTypes: ["violations"], rules: { "target-size": { enabled: true }, "color-contrast-enhanced": { enabled: true } } })
     .withTags(TAGS)
     .analyze();
   const found = violations.flatMap(({ id, nodes }) => nodes.map(({ target, failureSummary }) => `${id}: ${target.join(" ")}: ${failureSummary ?? ""}`));

@@ -53,7 +53,7 @@ export async function readScreen(page: Page): Promise<Screen> {
   await expect(async () => {
     seen = await look(page);
     expect(seen, "a screen of the check").not.toBeNull();
-  }).toPass({ timeout: 15_000, intervals: [50, 100, 200] });
+  }).toPass({ timeout: 15_000, intervals: [50] });
   const { title, lines } = seen ?? { title: "", lines: [] as string[] };
   if (title === "Before the next reading") return { type: "state" };
   if (title === "Enough is known") return { type: "enough" };

@@ -61,8 +61,19 @@ async function nextAfter(page: Page, left: Screen, heading: string): Promise<Scr
   await expect(async () => {
     now = await readScreen(page);
     expect(now, `still on "${heading}"`).not.toEqual(left);
-  }).toPass({ timeout: 15_000 });
+  }).toPass({ timeout: 15_000, intervals: [50] });
   return now;
+}
+
+/** Does what the screen asks for, and waits for the next one. */
+async function answerOne(page: Page, bench: BenchMachine, screen: Screen): Promise<Screen> {
+  return screen.type === "reading" ? giveReading(page, bench, screen.check) : passState(page);
+}
+
+/** Says that the machine is in the state that is asked for, and waits for the next screen. */
+export async function passState(page: Page): Promise<Screen> {
+  await page.getByRole("button", { name: /^Done/ }).click();
+  return nextAfter(page, { type: "state" }, "Before the next reading");
 }
 
 /** Answers screen after screen until the check says that enough is known, or that nothing is left to read. */
@@ -72,13 +83,21 @@ export async function answerAll(page: Page, bench: BenchMachine, onScreen: (scre
   for (let step = 0; step < 60; step += 1) {
     await onScreen(screen);
     if (screen.type === "enough" || screen.type === "exhausted") return readings;
-    if (screen.type === "reading") {
-      screen = await giveReading(page, bench, screen.check);
-      readings += 1;
-    } else {
-      await page.getByRole("button", { name: /^Done/ }).click();
-      screen = await nextAfter(page, screen, "Before the next reading");
-    }
+    if (screen.type === "reading") readings += 1;
+    screen = await answerOne(page, bench, screen);
   }
   throw new Error("no end after 60 screens");
+}
+
+/** Past the state screens, to a card that takes a number or a word; says which check it asks for. */
+export async function toReading(page: Page): Promise<string> {
+  let screen = await readScreen(page);
+  for (let step = 0; step < 4 && screen.type === "state"; step += 1) screen = await passState(page);
+  if (screen.type !== "reading") throw new Error("no reading was asked for");
+  return screen.check;
+}
+
+/** Gives the next so many readings, as they are asked for. */
+export async function takeReadings(page: Page, bench: BenchMachine, count: number): Promise<void> {
+  for (let taken = 0; taken < count; taken += 1) await giveReading(page, bench, await toReading(page));
 }

@@ -2,7 +2,6 @@ import { ApartSection, AttachMachine, CheckFacts, VerdictButtons, VerdictView } 
 import { ButtonLink, EmptyState, PageHeading, Sheet } from "@/components/ui";
 import { hasPermission, type Person } from "@/lib/auth/permissions";
 import type { CheckView } from "@/lib/checks/check-view";
-import { confirmationsOf } from "@/lib/checks/list-confirmations";
 import { machineChoices } from "@/lib/checks/log-choices";
 import { chosenPair, possibilityChoices } from "@/lib/checks/possibilities";
 import { tellTwoApart } from "@/lib/checks/tell-two-apart";
@@ -24,7 +23,7 @@ export async function FinishedCheck({ check, person, asked }: FinishedCheckProps
   if (!check.verdict) return <Abandoned check={check} />;
   const mayRun = hasPermission(person, "check:run");
   const mayAttach = mayRun && (check.person.id === person.id || hasPermission(person, "machine:edit"));
-  const [machines, confirmations] = await Promise.all([mayAttach ? machineChoices(person) : [], confirmationsOf(person, check.id)]);
+  const machines = mayAttach ? await machineChoices(person) : [], { confirmations } = check;
   const comparable = check.recheckOf !== null || check.rechecks.length > 0;
   return (
     <>

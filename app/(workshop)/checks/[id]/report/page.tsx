@@ -3,7 +3,6 @@ import { CheckReport } from "@/components/checks/report/check-report";
 import { PrintButton } from "@/components/checks/report/print-button";
 import { ButtonLink, EmptyState } from "@/components/ui";
 import { requirePermission } from "@/lib/auth/require-permission";
-import { confirmationsOf } from "@/lib/checks/list-confirmations";
 import { checkForPage } from "../check-for-page";
 
 export const metadata: Metadata = { title: "Report of a check" };
@@ -17,7 +16,7 @@ export default async function ReportPage({ params }: { readonly params: Promise<
   if (!check.verdict) {
     return <EmptyState title="No report" action={<ButtonLink href={back} tone="main">Back to the check</ButtonLink>}>A report is made from the verdict of a finished check.</EmptyState>;
   }
-  const outcome = (await confirmationsOf(person, id)).find((one) => !one.withdrawn) ?? null;
+  const outcome = check.confirmations.find((one) => !one.withdrawn) ?? null;
   return (
     <>
       <div className="mb-6 flex flex-wrap gap-3 print:hidden">

@@ -2,8 +2,8 @@ import { expect, test } from "@playwright/test";
 import type { Run } from "@/lib/checks/run";
 import { effectiveReadings, engineSetup } from "@/lib/checks/run-state";
 import { assess, vocabulary } from "@/lib/diagnosis";
-import { signIn } from "./support/people";
-import { answerAll, machine, startUnknown } from "./support/run-check";
+import { signIn } from "../support/people";
+import { answerAll, machine, startUnknown } from "../support/run-check";
 
 test.describe.configure({ timeout: 240_000 });
 

@@ -1,11 +1,16 @@
 import { expect, test, type Page } from "@playwright/test";
-import { signIn } from "./support/people";
+import { expectAccessible, expectNoSidewaysScroll } from "./support/accessible";
+import { complaints } from "./support/complaints";
+import { signIn, type PEOPLE } from "./support/people";
 import { startUnknown } from "./support/run-check";
 
 /** Most JavaScript a route may bring, gzipped; a route with nothing on it brings 131 KB. */
 const MOST_KILOBYTES = 190;
 
-const ROUTES = ["/", "/sign-in", "/today", "/catalogue", "/checks", "/checks/chances", "/checks/new", "/machines", "/account"];
+const ROUTES: readonly (readonly [path: string, who: keyof typeof PEOPLE | null])[] = [
+  ["/", null], ["/sign-in", null], ["/today", "everyRole"], ["/catalogue", "everyRole"], ["/checks", "everyRole"], ["/checks/chances", "everyRole"],
+  ["/checks/new", "everyRole"], ["/machines", "everyRole"], ["/account", "everyRole"], ["/workshop", "everyRole"],
+];
 
 declare global {
   interface Window { shifts?: number }
@@ -28,9 +33,10 @@ test.beforeAll(async ({ browser }) => {
   await page.context().close();
 });
 
-for (const path of ROUTES) {
-  test(`${path} brings no more than ${MOST_KILOBYTES} KB of JavaScript, and does not jump while it loads`, async ({ page }) => {
-    if (path !== "/" && path !== "/sign-in") await signIn(page, "everyRole");
+for (const [path, who] of ROUTES) {
+  test(`${path} is light, does not jump while it loads, fits, is accessible, and runs under the content security policy`, async ({ page }) => {
+    if (who) await signIn(page, who);
+    const heard = complaints(page);
     await page.addInitScript(() => {
       window.shifts = 0;
       new PerformanceObserver((list) => {
@@ -41,6 +47,9 @@ for (const path of ROUTES) {
     expect(kilobytes).toBeGreaterThan(20);
     expect(kilobytes).toBeLessThanOrEqual(MOST_KILOBYTES);
     expect(await page.evaluate(() => window.shifts)).toBeLessThan(0.01);
+    await expectAccessible(page, path);
+    await expectNoSidewaysScroll(page);
+    expect(heard).toEqual([]);
   });
 }
 
@@ -59,4 +68,11 @@ test("a finished check, an entry and, where no drawing stands beside it, a runni
     expect(await scriptKilobytes(fresh, path), path).toBeLessThanOrEqual(MOST_KILOBYTES);
     await fresh.context().close();
   }
+});
+
+test("a page that a person's roles do not allow says so, and is accessible", async ({ page }) => {
+  await signIn(page, "technician");
+  await page.goto("/workshop");
+  await expect(page.getByRole("heading", { level: 1 })).toHaveText(/do not allow/);
+  await expectAccessible(page, "refused page");
 });
