@@ -82,6 +82,6 @@ describe("laws of the standing", SLOW, () => {
       for (const f of a.faults) expect(Math.abs(f.p - (faults.get(faultKey(renameFault(f, renaming))) ?? 0)), JSON.stringify(f)).toBeLessThan(LAST_DIGITS);
       for (const p of a.pins) { const { supply, ground, signal } = renamePins(p, renaming); expect(Math.abs(p.p - (pins.get(`${supply}${ground}${signal}`) ?? 0))).toBeLessThan(LAST_DIGITS); }
       for (const k of a.kinds) expect(Math.abs(k.p - b.kinds.find((other) => other.kind === k.kind)!.p)).toBeLessThan(LAST_DIGITS);
-    }, 60);
+    }, 30);
   });
 });
