@@ -36,18 +36,24 @@ function believedFrom(setup: Setup, observations: readonly Observation[], fits: 
   return believeWith(fits, candidatesForDoubtedEntry(setup.expect, setup.experience));
 }
 
-/** The belief, with the chance that one reading is wrong counted in where it matters: before a verdict, and where something does not fit. */
-function weighed(setup: Setup, readings: readonly Reading[]): Weighed {
+/** What is to be said and asked, with the chance counted in that one reading is wrong. */
+interface Judgement { readonly weighed: Weighed; readonly ranked: readonly PlannedTest[]; readonly answered: boolean }
+
+/** The readings taken as right as long as the question is open; before a verdict, and where something does not fit, each in turn is weighed as wrong. */
+function judge(setup: Setup, readings: readonly Reading[]): Judgement {
   const meter = setup.meter ?? DEFAULT_METER, observations = observe(readings, meter), fits = new PartFits(observations, meter);
-  const believed = believedFrom(setup, observations, fits);
-  const far = misfits(believed[0]!, observations, meter), odd = far.some((f) => f > FAR);
-  if (readings.length < 2 || readings.length > MOST_WEIGHED || !(odd || settled(marginals(believed)))) return { believed, slips: observations.map(() => 0) };
+  const believed = believedFrom(setup, observations, fits), plain = marginals(believed);
+  const odd = misfits(believed[0]!, observations, meter).some((f) => f > FAR);
+  const ranked = odd ? [] : rankChecks(setup, readings, believed, meter), closing = odd || plain.faults[0]!.p >= SETTLED || !ranked.some(worthWhile);
+  if (readings.length < 2 || readings.length > MOST_WEIGHED || !closing) {
+    return { weighed: { believed, wary: believed, slips: observations.map(() => 0) }, ranked: odd ? rankChecks(setup, readings, believed, meter) : ranked, answered: settled(plain) };
+  }
   const everything = setup.expect ? candidatesForEntry(setup.expect, setup.experience) : candidatesForUnknown(setup.experience);
-  // Every device there is takes a while to look through: that is done without the reading that fits worst. Without any other, the device stands as identified.
-  const worst = odd ? far.indexOf(Math.max(...far)) : -1, { family, pinOf } = believed[0]!.candidate;
-  const likely = everything.filter((c) => c.family === family && `${c.pinOf}` === `${pinOf}`);
-  return weighSlips((i) => (i === worst || likely.length === 0 ? everything : likely), fits, observations, meter, believed);
+  const weighed = weighSlips(everything, fits, observations, meter, believed);
+  return { weighed, ranked: rankChecks(setup, readings, weighed.wary, meter), answered: settled(marginals(weighed.believed)) && settled(marginals(weighed.wary)) };
 }
+
+const worthWhile = (r: PlannedTest) => r.gainBits / r.effort >= WORTH_WHILE;
 
 /**
  * What the readings taken so far say of the device and its wiring, and which to take next.
@@ -58,15 +64,13 @@ function weighed(setup: Setup, readings: readonly Reading[]): Weighed {
 export function assess(setup: Setup, readings: readonly Reading[]): Assessment {
   const problem = validate(setup, readings);
   if (problem) return { state: "invalid-input", ...problem };
-  const meter = setup.meter ?? DEFAULT_METER, { believed, slips } = weighed(setup, readings), m = marginals(believed);
-  const ranked = rankChecks(setup, readings, believed, meter);
-  const answered = settled(m), worth = ranked.filter((r) => r.gainBits / r.effort >= WORTH_WHILE);
-  const done = answered || worth.length === 0;
+  const { weighed: { believed, slips }, ranked, answered } = judge(setup, readings), m = marginals(believed);
+  const worth = ranked.some(worthWhile), done = answered || !worth;
   const standing = {
-    ...m, done, inseparable: done && m.openFindings.length > 1 && worth.length === 0,
+    ...m, done, inseparable: done && m.openFindings.length > 1 && !worth,
     next: ranked.slice(0, MOST_NEXT).map((r) => nextCheck(r, setup)),
   };
-  const suspects = contradictions(believed[0]!, readings, meter, slips);
+  const suspects = contradictions(believed[0]!, readings, setup.meter ?? DEFAULT_METER, slips);
   if (suspects.length > 0) return { state: "contradictory", suspects, ...standing };
   return { state: readings.length === 0 ? "needs-reading" : "ranked", ...standing };
 }

@@ -107,6 +107,8 @@ function electronicRanges(r: RangeBuilder, family: Exclude<Family, "potentiomete
   r.ratio(P.load, 0.006, 1.5).ratio(P.driveLow, 45, 1.6).ratio(P.high, 5.2, 1.25).ratio(P.frequency, expect?.frequencyHz ?? 430, expect?.frequencyHz ? 1.035 : 2.2);
   r.straight(P.dropSupply, 0.3, 0.05).straight(P.dropSignal, 0.5, 0.12).ratio(P.clamp, 60, 2.5);
   const { signalVolts: volts, duty } = expect ?? {};
-  if (family === "voltage") r.straight(P.rest, volts?.rest ?? 2.5, volts ? 0.035 : 1.7).straight(P.full, volts?.full ?? 2.5, volts ? 0.035 : 1.7);
+  if (family === "voltage" && volts) r.straight(P.rest, volts.rest, 0.035).straight(P.full, volts.full, 0.035);
+  // An output that is not said to swing below ground does not.
+  else if (family === "voltage") r.ratio(P.rest, 2, 2.2).ratio(P.full, 2, 2.2);
   else r.share(P.rest, duty?.rest ?? null, 0.008).share(P.full, duty?.full ?? null, 0.008);
 }

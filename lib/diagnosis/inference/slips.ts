@@ -16,44 +16,50 @@ import { exp, ln, square } from "../numerics";
  */
 export interface Weighed {
   readonly believed: Believed[];
+  /** The same where slips were WARINESS times likelier: a verdict has to hold against that too. */
+  readonly wary: readonly Believed[];
   /** Chance that an observation is a slip, in the order of the observations, 0..1. */
   readonly slips: readonly number[];
 }
 
-/** Candidates looked into when a slip is weighed are at most so far behind the best without the reading, natural-log units: 4 in 1,000 of it. */
-const LOOKED_INTO = 5.5;
+/** Candidates looked into when a slip is weighed are at most so far behind the best without the reading, natural-log units: 2 in 100 of it. */
+const LOOKED_INTO = Number(process.env.L ?? 4);
 /** A slip less likely than this against all else is left out. */
-const NEGLIGIBLE = 1e-4;
+const NEGLIGIBLE = 1e-5;
+/** A verdict has to hold even if slips are so many times likelier than they usually are: somebody in a hurry, in gloves, in the rain. */
+const WARINESS = Number(process.env.W ?? 10);
 /** Width of what may be shown at all on the comparison scale: natural logarithm of ohms and hertz, volts, duty. */
 const WIDTH: Readonly<Record<CheckSpec["unit"], number>> = { ohm: 20, volt: 60, hertz: 12, ratio: 1, word: 1 };
 /** Chance of a word when any may have been entered. */
 const ANY_WORD = 0.3;
 const LOG_ROOT_TWO_PI = 0.5 * ln(2 * Math.PI);
 
-/** Weighs the base belief against one reading being wrong; `poolFor` gives the candidates to look through without that observation. */
-export function weighSlips(poolFor: (left: number) => readonly Candidate[], fits: PartFits, obs: readonly Observation[], meter: MeterSpec, base: readonly Believed[]): Weighed {
-  const entries: Believed[] = base.map((b) => ({ ...b })), from: number[] = base.map(() => -1);
+/** Weighs the base belief against one reading being wrong; `candidates` are looked through without that one. */
+export function weighSlips(candidates: readonly Candidate[], fits: PartFits, obs: readonly Observation[], meter: MeterSpec, base: readonly Believed[]): Weighed {
+  const entries: Entry[] = base.map((b) => ({ believed: b, logWeight: b.logWeight, from: -1 }));
   const best = base[0]!.logWeight;
   obs.forEach((o, i) => {
-    for (const b of believeWith(fits.without(i), poolFor(i), { cut: LOOKED_INTO })) {
+    for (const b of believeWith(fits.without(i), candidates, { cut: LOOKED_INTO })) {
       const logWeight = b.logWeight + ln(slipChance(o, outlookOf(b, meter)));
-      if (logWeight < best + ln(NEGLIGIBLE)) continue;
-      entries.push({ ...b, logWeight });
-      from.push(i);
+      if (logWeight >= best + ln(NEGLIGIBLE)) entries.push({ believed: b, logWeight, from: i });
     }
   });
-  return normalised(entries, from, obs.length);
+  return { ...weighedAs(entries, obs.length, 1), wary: weighedAs(entries, obs.length, WARINESS).believed };
 }
 
-function normalised(entries: Believed[], from: readonly number[], count: number): Weighed {
-  const most = entries.reduce((m, b) => Math.max(m, b.logWeight), -Infinity), slips = new Array<number>(count).fill(0);
-  const total = entries.reduce((sum, b) => sum + exp(b.logWeight - most), 0);
-  entries.forEach((b, k) => {
-    b.p = exp(b.logWeight - most) / total;
-    if (from[k]! >= 0) slips[from[k]!]! += b.p;
+/** A candidate, all readings taken as right (from -1) or the one at that place taken as a slip. */
+interface Entry { readonly believed: Believed; readonly logWeight: number; readonly from: number }
+
+/** Shares of belief where slips are so many times likelier than they are held to be. */
+function weighedAs(entries: readonly Entry[], count: number, times: number): { believed: Believed[]; slips: readonly number[] } {
+  const weights = entries.map(({ logWeight, from }) => logWeight + (from < 0 ? 0 : ln(times))), most = weights.reduce((a, b) => Math.max(a, b), -Infinity);
+  const slips = new Array<number>(count).fill(0), total = weights.reduce((sum, w) => sum + exp(w - most), 0);
+  const believed = entries.map(({ believed: b, from }, k): Believed => {
+    const p = exp(weights[k]! - most) / total;
+    if (from >= 0) slips[from]! += p;
+    return { ...b, logWeight: weights[k]!, p };
   });
-  const believed = entries.sort((a, b) => b.logWeight - a.logWeight || (a.candidate.hypothesis.id < b.candidate.hypothesis.id ? -1 : 1));
-  return { believed, slips };
+  return { slips, believed: believed.sort((a, b) => b.logWeight - a.logWeight || (a.candidate.hypothesis.id < b.candidate.hypothesis.id ? -1 : 1)) };
 }
 
 /** Chance (density on the comparison scale for numbers) that a slip enters what was entered, where `outlook` is the truth. */
