@@ -16,6 +16,8 @@ export interface Fit {
   /** Places of the parameters that the readings speak of, and the Cholesky factor of their precision. */
   readonly active: readonly number[];
   readonly precision: Float64Array;
+  /** What the log-evidence is at most: itself, or where the fit was given up what it might have reached. */
+  readonly ceiling: number;
 }
 
 const MAX_ITERATIONS = 14;
@@ -37,7 +39,7 @@ const MIDDLE = new Float64Array(PARAMETER_COUNT);
 export function fitCandidate(c: Candidate, e: Evidence, start: Float64Array, least = -Infinity): Fit {
   makeRoom(e.observations.length);
   const log = evaluate(c, start, e);
-  if (log + stillOpen() < least) return GIVEN_UP;
+  if (log + stillOpen() < least) return givenUp(start, log + stillOpen());
   const direct = climb(c, e, start, log, least);
   if (direct.logEvidence === -Infinity || !stuck(e) || direct.logEvidence + stillOpen() < least) return direct;
   const reach = Math.max(least, direct.logEvidence), near = pulledIn(c, e, start);
@@ -110,7 +112,8 @@ function climb(c: Candidate, e: Evidence, start: Float64Array, from: number, lea
   for (let iteration = 0; iteration < MAX_ITERATIONS; iteration++) {
     if (!exact && (promise < WORTH_A_STEP || gained < STALLED)) { promise = exactStep(c, e, w, true); exact = true; }
     if (promise < WORTH_A_STEP) break;
-    if (integrated(log, w) + TRUST * Math.max(gained, promise) + MARGIN < least) return GIVEN_UP;
+    const ceiling = integrated(log, w) + TRUST * Math.max(gained, promise) + MARGIN;
+    if (ceiling < least) return givenUp(w.z.slice(), ceiling);
     const better = lineSearch(c, w, e, log);
     if (better === -Infinity) {
       if (exact) break;
@@ -124,11 +127,12 @@ function climb(c: Candidate, e: Evidence, start: Float64Array, from: number, lea
     promise = exact ? exactStep(c, e, w, true) : newtonStep(e, w);
   }
   if (!exact) exactStep(c, e, w, true);
-  return { logEvidence: integrated(log, w), z: w.z.slice(), active: w.movable, precision: w.precision.slice() };
+  const logEvidence = integrated(log, w);
+  return { logEvidence, z: w.z.slice(), active: w.movable, precision: w.precision.slice(), ceiling: logEvidence };
 }
 
 const NOTHING = new Float64Array(0);
-const GIVEN_UP: Fit = { logEvidence: -Infinity, z: MIDDLE, active: [], precision: NOTHING };
+const givenUp = (z: Float64Array, ceiling: number): Fit => ({ logEvidence: -Infinity, z, active: [], precision: NOTHING, ceiling });
 
 /** Gain of a step in the quadratic model of the misfit, natural-log units. */
 function promised(gradient: Float64Array, step: Float64Array): number {
@@ -168,7 +172,7 @@ function tryOut(c: Candidate, w: Work, e: Evidence): number {
 }
 
 /** Where nothing was read. */
-export const NO_FIT: Fit = { logEvidence: 0, z: MIDDLE, active: [], precision: NOTHING };
+export const NO_FIT: Fit = { logEvidence: 0, z: MIDDLE, active: [], precision: NOTHING, ceiling: 0 };
 
 /** One fit out of several that have no unknown in common: their precision is block-diagonal. */
 export function together(...fits: readonly Fit[]): Fit {
@@ -183,5 +187,5 @@ export function together(...fits: readonly Fit[]): Fit {
     offset += k;
     logEvidence += f.logEvidence;
   }
-  return { logEvidence, z, active, precision };
+  return { logEvidence, z, active, precision, ceiling: logEvidence };
 }

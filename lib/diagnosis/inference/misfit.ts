@@ -79,6 +79,16 @@ export function evaluate(c: Candidate, z: Float64Array, e: Evidence): number {
   return log;
 }
 
+/** What each reading costs at z, natural-log units below the best it could be; and last what the unknowns cost that are off their middles. */
+export function lossesAt(c: Candidate, z: Float64Array, e: Evidence): Float64Array {
+  const losses = new Float64Array(e.observations.length + 1);
+  makeRoom(e.observations.length);
+  evaluate(c, z, e);
+  e.observations.forEach((o, i) => { losses[i] = (o.word === null ? o.logPeak : 0) - compare(o, i, e.meter); });
+  losses[e.observations.length] = 0.5 * z.reduce((sum, v) => sum + v * v, 0);
+  return losses;
+}
+
 function compare(o: Observation, i: number, meter: MeterSpec): number {
   live[i] = 0;
   if (o.word !== null) return wordLogChance(o, base);

@@ -4,7 +4,7 @@ import { P, PARAMETER_COUNT } from "../circuit/parameters";
 import { GROUP } from "../circuit/predict";
 import type { MeterSpec } from "../types";
 import { fitCandidate, NO_FIT, together, type Fit } from "./fit";
-import { evidenceOf, type Evidence } from "./misfit";
+import { evidenceOf, lossesAt, type Evidence } from "./misfit";
 import type { Observation } from "./observe";
 
 const UNPOWERED = GROUP.cold | GROUP.wires, HARNESS = UNPOWERED | GROUP.live;
@@ -31,6 +31,9 @@ function fitsTo(name: string): Map<string, Fit> {
 
 const nameOf = (obs: readonly Observation[], pins: number | undefined, meter: string) => `${obs.map((o) => `${o.index} ${o.word ?? o.value}`).join()}|${pins ?? ""}|${meter}`;
 
+/** What a fit may gain beside, natural-log units, when a reading lets go of the unknowns it held. */
+const LET_GO = 6;
+
 const peakOf = (obs: readonly Observation[]) => obs.reduce((sum, o) => sum + (o.word === null ? o.logPeak : 0), 0);
 
 /**
@@ -49,10 +52,10 @@ export class PartFits {
   private readonly livePeak: number;
   private readonly matedPeak: number;
 
-  private readonly joints = new Map<Candidate, Fit>();
+  private readonly joints = new Map<Candidate, { readonly fit: Fit; losses: Float64Array | null }>();
   private readonly meterName: string;
 
-  constructor(private readonly obs: readonly Observation[], readonly meter: MeterSpec, private readonly whole: PartFits | null = null) {
+  constructor(private readonly obs: readonly Observation[], readonly meter: MeterSpec, private readonly whole: { readonly fits: PartFits; readonly left: number } | null = null) {
     this.meterName = JSON.stringify(meter);
     const live = obs.filter((o) => (o.group & GROUP.live) !== 0), mated = obs.filter((o) => o.group === GROUP.mated);
     this.device = this.part((o) => o.group === GROUP.device);
@@ -69,14 +72,14 @@ export class PartFits {
 
   /** The same readings but one, by its place. */
   without(left: number): PartFits {
-    return new PartFits(this.obs.filter((_, i) => i !== left), this.meter, this);
+    return new PartFits(this.obs.filter((_, i) => i !== left), this.meter, { fits: this, left });
   }
 
   /** The most that a candidate's log-weight can be. */
   bound(c: Candidate): number {
     let sum = c.logPrior + this.deviceFit(c).logEvidence + this.livePeak + this.matedPeak;
     for (const { scope, key } of harnessParts(c)) if (this.scopes[scope]) sum += fitOf(this.scopes[scope], key, c, ONE_START).logEvidence;
-    return sum;
+    return this.mated && this.whole ? Math.min(sum, c.logPrior + this.whole.fits.ceilingWithout(c, this.whole.left)) : sum;
   }
 
   /** Fit of one candidate to all readings; given up where its log-weight cannot reach `least`. */
@@ -86,14 +89,22 @@ export class PartFits {
     const harness = this.live ? fitOf(this.harness, c.harnessKey, c, [startOf(...unpowered)]) : together(...unpowered);
     if (!this.mated) return together(device, harness);
     if (c.logPrior + device.logEvidence + harness.logEvidence + this.matedPeak < least) return NO_FIT_AT_ALL;
-    return this.joint(c, device, harness, least - c.logPrior);
+    return this.joint(c, startOf(device, harness), least - c.logPrior);
   }
 
-  private joint(c: Candidate, device: Fit, harness: Fit, least: number): Fit {
-    const before = this.whole?.joints.get(c);
-    const fit = fitCandidate(c, this.all, before ? before.z : startOf(device, harness), least);
-    if (fit.logEvidence > -Infinity) this.joints.set(c, fit);
+  private joint(c: Candidate, start: Float64Array, least: number): Fit {
+    const before = this.whole?.fits.joints.get(c)?.fit;
+    const fit = fitCandidate(c, this.all, before && before.logEvidence > -Infinity ? before.z : start, least);
+    if (!this.whole) this.joints.set(c, { fit, losses: null });
     return fit;
+  }
+
+  /** What the log-evidence of a candidate may be at most with one reading left out, as far as its fit to all of them tells. */
+  private ceilingWithout(c: Candidate, left: number): number {
+    const known = this.joints.get(c);
+    if (!known) return Infinity;
+    const { observations } = this.all, losses = known.losses ??= lossesAt(c, known.fit.z, this.all), peak = observations[left]!.word === null ? observations[left]!.logPeak : 0;
+    return known.fit.ceiling - peak + losses[left]! + losses[observations.length]! + LET_GO;
   }
 
   private deviceFit(c: Candidate): Fit {
@@ -113,7 +124,7 @@ function fitOf({ evidence, fits }: Part, key: string, c: Candidate, starts: read
   return fit;
 }
 
-const NO_FIT_AT_ALL: Fit = { ...NO_FIT, logEvidence: -Infinity };
+const NO_FIT_AT_ALL: Fit = { ...NO_FIT, logEvidence: -Infinity, ceiling: -Infinity };
 
 function startOf(...fits: readonly Fit[]): Float64Array {
   const z = new Float64Array(PARAMETER_COUNT);
