@@ -45,7 +45,7 @@ function judge(setup: Setup, readings: readonly Reading[]): Judgement {
   const believed = believedFrom(setup, observations, fits), plain = marginals(believed);
   const odd = misfits(believed[0]!, observations, meter).some((f) => f > FAR);
   const ranked = odd ? [] : rankChecks(setup, readings, believed, meter), closing = odd || plain.faults[0]!.p >= SETTLED || !ranked.some(worthWhile);
-  if (readings.length < 2 || readings.length > MOST_WEIGHED || !closing) {
+  if (readings.length === 0 || readings.length > MOST_WEIGHED || !closing) {
     return { weighed: { believed, wary: believed, slips: observations.map(() => 0) }, ranked: odd ? rankChecks(setup, readings, believed, meter) : ranked, answered: settled(plain) };
   }
   const everything = setup.expect ? candidatesForEntry(setup.expect, setup.experience) : candidatesForUnknown(setup.experience);

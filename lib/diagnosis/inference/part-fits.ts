@@ -42,7 +42,7 @@ const peakOf = (obs: readonly Observation[]) => obs.reduce((sum, o) => sum + (o.
  */
 export class PartFits {
   /** No reading on live wires: the parts have no unknown in common, and their sum is the whole. */
-  readonly separate: boolean;
+  private readonly separate: boolean;
   private readonly device: Part;
   private readonly scopes: readonly (Part | null)[];
   private readonly harness: Part;
@@ -53,6 +53,8 @@ export class PartFits {
   private readonly matedPeak: number;
 
   private readonly joints = new Map<Candidate, { readonly fit: Fit; losses: Float64Array | null }>();
+  /** Log-evidence of the harness's parts, by what they hang on. */
+  private readonly unpowered = new Map<string, number>();
   private readonly meterName: string;
 
   constructor(private readonly obs: readonly Observation[], readonly meter: MeterSpec, private readonly whole: { readonly fits: PartFits; readonly left: number } | null = null) {
@@ -77,19 +79,30 @@ export class PartFits {
 
   /** The most that a candidate's log-weight can be. */
   bound(c: Candidate): number {
-    let sum = c.logPrior + this.deviceFit(c).logEvidence + this.livePeak + this.matedPeak;
-    for (const { scope, key } of harnessParts(c)) if (this.scopes[scope]) sum += fitOf(this.scopes[scope], key, c, ONE_START).logEvidence;
+    let unpowered = this.unpowered.get(c.harnessKey);
+    if (unpowered === undefined) this.unpowered.set(c.harnessKey, unpowered = this.harnessFits(c).reduce((total, fit) => total + fit.logEvidence, 0));
+    const sum = c.logPrior + this.deviceFit(c).logEvidence + unpowered + this.livePeak + this.matedPeak;
     return this.mated && this.whole ? Math.min(sum, c.logPrior + this.whole.fits.ceilingWithout(c, this.whole.left)) : sum;
   }
 
   /** Fit of one candidate to all readings; given up where its log-weight cannot reach `least`. */
   fit(c: Candidate, least: number): Fit {
-    const device = this.deviceFit(c), unpowered = harnessParts(c).flatMap(({ scope, key }) => (this.scopes[scope] ? [fitOf(this.scopes[scope], key, c, ONE_START)] : []));
+    const device = this.deviceFit(c), unpowered = this.harnessFits(c);
     if (this.separate) return together(device, ...unpowered);
     const harness = this.live ? fitOf(this.harness, c.harnessKey, c, [startOf(...unpowered)]) : together(...unpowered);
     if (!this.mated) return together(device, harness);
     if (c.logPrior + device.logEvidence + harness.logEvidence + this.matedPeak < least) return NO_FIT_AT_ALL;
     return this.joint(c, startOf(device, harness), least - c.logPrior);
+  }
+
+  /** Fits of those parts of the harness that something was read of with the power off. */
+  private harnessFits(c: Candidate): Fit[] {
+    const fits: Fit[] = [];
+    for (const { scope, key } of harnessParts(c)) {
+      const part = this.scopes[scope];
+      if (part) fits.push(fitOf(part, key, c, ONE_START));
+    }
+    return fits;
   }
 
   private joint(c: Candidate, start: Float64Array, least: number): Fit {

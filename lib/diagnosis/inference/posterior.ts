@@ -17,11 +17,7 @@ const SHELL = 0.25;
 export interface Looking {
   /** Candidates this far behind the best are left out, natural-log units. */
   readonly cut?: number;
-  /** Log-weight below which nothing matters. */
-  readonly least?: number;
 }
-
-interface Bounded { readonly candidate: Candidate; readonly bound: number }
 
 /**
  * Belief over all candidates. The readings of device and harness fall into parts that have no unknown in common: each is
@@ -34,26 +30,31 @@ export function believe(candidates: readonly Candidate[], obs: readonly Observat
 }
 
 /** The same, with fits that may have been made before. */
-export function believeWith(fits: PartFits, candidates: readonly Candidate[], { cut = CUT, least = -Infinity }: Looking = {}): Believed[] {
-  const bounded = boundsOf(fits, candidates, fits.separate ? cut : Infinity), out: Believed[] = [];
-  let best = least + cut, mark = best, shell = Infinity;
-  for (const { candidate, bound } of bounded) {
-    if (bound < shell - SHELL) { shell = bound; mark = best; }
-    if (bound < mark - cut) break;
-    const fit = fits.fit(candidate, mark - cut);
-    const logWeight = candidate.logPrior + fit.logEvidence;
-    if (logWeight === -Infinity) continue;
-    best = Math.max(best, logWeight);
-    out.push({ candidate, fit, logWeight, p: 0 });
+export function believeWith(fits: PartFits, candidates: readonly Candidate[], { cut = CUT }: Looking = {}): Believed[] {
+  const bounds = Float64Array.from(candidates, (c) => fits.bound(c)), highest = bounds.reduce((a, b) => Math.max(a, b), -Infinity), out: Believed[] = [];
+  let best = -Infinity, mark = best, shell = Infinity;
+  for (let top = highest; top >= best - cut && top > -Infinity; top -= SLICE) {
+    for (const i of between(bounds, top - SLICE, top === highest ? Infinity : top)) {
+      const candidate = candidates[i]!, bound = bounds[i]!;
+      if (bound < shell - SHELL) { shell = bound; mark = best; }
+      if (bound < mark - cut) break;
+      const fit = fits.fit(candidate, mark - cut), logWeight = candidate.logPrior + fit.logEvidence;
+      if (logWeight === -Infinity) continue;
+      best = Math.max(best, logWeight);
+      out.push({ candidate, fit, logWeight, p: 0 });
+    }
   }
   return normalise(out, cut);
 }
 
-/** Candidates with what their log-weight is at most, best first; those further than `within` behind the best are left out. */
-function boundsOf(fits: PartFits, candidates: readonly Candidate[], within: number): Bounded[] {
-  const bounds = candidates.map((c) => fits.bound(c)), best = bounds.reduce((a, b) => Math.max(a, b), -Infinity);
-  return candidates.map((candidate, i) => ({ candidate, bound: bounds[i]! })).filter(({ bound }) => bound >= best - within)
-    .sort((a, b) => b.bound - a.bound || byId(a.candidate, b.candidate));
+/** Bounds are put in order so much of them at a time, natural-log units: most candidates are never looked at. */
+const SLICE = 8;
+
+/** Places of the bounds from `low` up to (not with) `high`, highest first. */
+function between(bounds: Float64Array, low: number, high: number): number[] {
+  const places: number[] = [];
+  for (let i = 0; i < bounds.length; i++) if (bounds[i]! >= low && bounds[i]! < high) places.push(i);
+  return places.sort((a, b) => bounds[b]! - bounds[a]! || a - b);
 }
 
 const byId = (a: Candidate, b: Candidate) => (a.hypothesis.id < b.hypothesis.id ? -1 : 1);

@@ -23,11 +23,11 @@ export interface Weighed {
 }
 
 /** Candidates looked into when a slip is weighed are at most so far behind the best without the reading, natural-log units: 2 in 100 of it. */
-const LOOKED_INTO = Number(process.env.L ?? 4);
+const LOOKED_INTO = 4;
 /** A slip less likely than this against all else is left out. */
 const NEGLIGIBLE = 1e-5;
 /** A verdict has to hold even if slips are so many times likelier than they usually are: somebody in a hurry, in gloves, in the rain. */
-const WARINESS = Number(process.env.W ?? 10);
+const WARINESS = 10;
 /** Width of what may be shown at all on the comparison scale: natural logarithm of ohms and hertz, volts, duty. */
 const WIDTH: Readonly<Record<CheckSpec["unit"], number>> = { ohm: 20, volt: 60, hertz: 12, ratio: 1, word: 1 };
 /** Chance of a word when any may have been entered. */
