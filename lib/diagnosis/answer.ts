@@ -56,7 +56,7 @@ function parseExpect(value: unknown): Expect {
   need(KINDS.includes(e.kind as Kind), "entry-kind-unknown", `"kind" is one of ${KINDS.join(", ")}.`, `${where}.kind`);
   need(isObject(e.pins) && ROLES.every((r) => [1, 2, 3].includes((e.pins as Record<string, unknown>)[r] as number)), "entry-pins-malformed", '"pins" names a pin from 1 to 3 for supply, ground and signal.', `${where}.pins`);
   need(e.supplyVolts === "battery" || positive(e.supplyVolts), "entry-supply-malformed", '"supplyVolts" is a number of volts or "battery".', `${where}.supplyVolts`);
-  for (const key of ["totalOhms", "tolerancePercent", "wiperSeriesOhms", "frequencyHz"] as const) need(e[key] === undefined || positive(e[key]) || (key === "wiperSeriesOhms" && e[key] === 0), "entry-number-malformed", `"${key}" is a number above zero.`, `${where}.${key}`);
+  for (const key of ["totalOhms", "tolerancePercent", "wiperSeriesOhms", "endOhms", "frequencyHz"] as const) need(e[key] === undefined || positive(e[key]) || ((key === "wiperSeriesOhms" || key === "endOhms") && e[key] === 0), "entry-number-malformed", `"${key}" is a number above zero.`, `${where}.${key}`);
   need(e.output === undefined || e.output === "open-collector" || e.output === "push-pull", "entry-output-unknown", '"output" is "open-collector" or "push-pull".', `${where}.output`);
   for (const key of ["signalRatio", "duty"] as const) need(e[key] === undefined || isSpan(e[key], share), "entry-span-malformed", `"${key}" takes rest and full from 0 to 1.`, `${where}.${key}`);
   need(e.signalVolts === undefined || isSpan(e.signalVolts, (v): v is number => typeof v === "number" && Number.isFinite(v) && Math.abs(v) <= 100), "entry-span-malformed", '"signalVolts" takes rest and full in volts.', `${where}.signalVolts`);

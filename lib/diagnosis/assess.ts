@@ -1,16 +1,17 @@
 import { ALL_CHECKS } from "./checks";
 import { CHECK_INDEX } from "./circuit/predict";
-import { candidatesForEntry, candidatesForUnknown } from "./inference/candidates";
+import { candidatesForEntry, candidatesForUnknown, candidatesSeldom } from "./inference/candidates";
 import { rankChecks } from "./inference/choose";
 import { contradictions, FAR, fitsBadly, misfits } from "./inference/contradiction";
-import { observe } from "./inference/observe";
+import { observe, type Observation } from "./inference/observe";
 import { believe, type Believed } from "./inference/posterior";
+import { mergeBeliefs, strained } from "./inference/seldom";
 import { weighSlips, type Weighed } from "./inference/slips";
 import { marginals, type Marginals } from "./inference/standing";
 import { DEFAULT_METER } from "./meter";
 import type { PlannedTest } from "./planning";
 import { ENTRY_IS_RIGHT } from "./priors";
-import type { Assessment, NextCheck, Reading, Setup } from "./types";
+import type { Assessment, MeterSpec, NextCheck, Reading, Setup } from "./types";
 import { validate } from "./validate";
 import { whyText } from "./words";
 import { ln } from "./numerics";
@@ -23,8 +24,19 @@ const MOST_NEXT = 5;
 /** Readings up to which each is weighed as wrong: more of them hold one another up, and take longer. */
 const MOST_WEIGHED = 16;
 
-/** Belief over everything that may be true of the machine, all readings taken as right, likeliest first. */
+/**
+ * Belief over everything that may be true of the machine, all readings taken as right, likeliest first. Rare builds are
+ * left out while the usual ones explain the readings well.
+ */
 export function beliefs(setup: Setup, readings: readonly Reading[]): Believed[] {
+  const meter = setup.meter ?? DEFAULT_METER, observations = observe(readings, meter), usual = usualBeliefs(setup, readings);
+  if (!explainsBadly(usual[0]!, observations, meter)) return usual;
+  return mergeBeliefs(usual, believe(candidatesSeldom(setup.experience), observations, meter));
+}
+
+const explainsBadly = (b: Believed, observations: readonly Observation[], meter: MeterSpec) => strained(b) || fitsBadly(b, observations, meter);
+
+function usualBeliefs(setup: Setup, readings: readonly Reading[]): Believed[] {
   const meter = setup.meter ?? DEFAULT_METER, observations = observe(readings, meter);
   if (!setup.expect) return believe(candidatesForUnknown(setup.experience), observations, meter);
   const byEntry = believe(candidatesForEntry(setup.expect, setup.experience), observations, meter);
@@ -39,7 +51,8 @@ function weighed(setup: Setup, readings: readonly Reading[]): Weighed {
   const meter = setup.meter ?? DEFAULT_METER, observations = observe(readings, meter), believed = beliefs(setup, readings);
   const far = misfits(believed[0]!, observations, meter), odd = far.some((f) => f > FAR);
   if (readings.length < 2 || readings.length > MOST_WEIGHED || !(odd || settled(marginals(believed)))) return { believed, slips: observations.map(() => 0) };
-  const everything = setup.expect ? candidatesForEntry(setup.expect, setup.experience) : candidatesForUnknown(setup.experience);
+  const usual = setup.expect ? candidatesForEntry(setup.expect, setup.experience) : candidatesForUnknown(setup.experience);
+  const everything = believed[0]!.candidate.tap ? [...usual, ...candidatesSeldom(setup.experience)] : usual;
   // Every device there is takes a while to look through: that is done without the reading that fits worst. Without any other, the device stands as identified.
   const worst = odd ? far.indexOf(Math.max(...far)) : -1, { family, pinOf } = believed[0]!.candidate;
   const likely = everything.filter((c) => c.family === family && `${c.pinOf}` === `${pinOf}`);

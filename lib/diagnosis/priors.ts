@@ -62,6 +62,9 @@ export const PULL_SHARE: Readonly<Record<Family, Readonly<Record<Pull, number>>>
   "push-pull": { down: 0.9, up: 0.06, "up-to-supply": 0.04 }, "open-collector": { down: 0, up: 0.65, "up-to-supply": 0.35 },
 };
 
+/** Share of potentiometers that have supply or ground at a tap of the track, so that the wiper may travel past it (common practice: few). */
+export const TAPPED_SHARE = 0.02;
+
 /** Chance that the device fitted is the one a catalogue entry names, pins included. */
 export const ENTRY_IS_RIGHT = 0.97;
 

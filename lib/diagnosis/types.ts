@@ -38,6 +38,8 @@ export interface Expect {
   /** Share of the supply at the wiper, 0..1, with the actuator at rest and at full travel. */
   readonly signalRatio?: { readonly rest: number; readonly full: number };
   readonly wiperSeriesOhms?: number;
+  /** Resistors in series with the ends of the track, together, ohms; `totalOhms` is then the track without them. */
+  readonly endOhms?: number;
   readonly output?: "open-collector" | "push-pull";
   readonly frequencyHz?: number;
   /** High share of the period, 0..1. */

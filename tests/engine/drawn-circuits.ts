@@ -38,14 +38,14 @@ export function drawCircuit(candidate: Candidate, draw: () => number): DrawnCirc
   return { name: `${candidate.hypothesis.id} ${candidate.family} pull ${candidate.pull}`, candidate, predicted, x, roleOf, description: describeMachine(candidate, x, (fault.pins ?? []).map(roleOf)) };
 }
 
-function describeMachine(c: Candidate, x: Float64Array, at: readonly number[]): Description {
+export function describeMachine(c: Candidate, x: Float64Array, at: readonly number[]): Description {
   const value = (place: keyof typeof P) => x[P[place]]!;
   const share = (v: number) => Math.min(0.998, Math.max(0.002, v));
   return {
     family: c.family, pull: c.pull, fault: c.code, at, brokenEnd: c.breakEnd,
     battery: value("battery"), fed: c.suppliedByBattery ? value("battery") : value("supply"), rail: value("rail"),
     supplySource: value("supplySource"), supplyBleed: value("supplyBleed"), pullOhms: value("pull"), railOff: value("railOff"), batteryOff: value("batteryOff"), faultOhms: value("fault"),
-    track: value("track"), wiper: value("wiper"), share: [share(value("rest")), share(value("full"))],
+    track: value("track"), wiper: value("wiper"), share: c.tap ? [value("rest"), value("full")] : [share(value("rest")), share(value("full"))],
     internal: value("internal"), leak: value("leak"), clamp: value("clamp"), dropSupply: value("dropSupply"), dropSignal: value("dropSignal"),
     loadAmperes: value("load"), driveLow: value("driveLow"), high: value("high"),
   };

@@ -1,5 +1,5 @@
 import type { Expect, Fault, FaultCode, Hypothesis, Kind, PinAssignment, PinNumber, Role } from "../types";
-import { rangesFor, type Family, type Pull, type Ranges } from "./parameters";
+import { rangesFor, tappedRanges, type Family, type Pull, type Ranges, type Tap } from "./parameters";
 import { exp } from "../numerics";
 
 /** Roles as array places: supply 0, ground 1, signal 2. */
@@ -20,6 +20,8 @@ export interface Candidate {
   /** Pin number of each role. */
   readonly pinOf: readonly [PinNumber, PinNumber, PinNumber];
   readonly suppliedByBattery: boolean;
+  /** Potentiometer with a tap that the wiper travels past; null for every other device. */
+  readonly tap: Tap | null;
   /** Whether the electronics run: known beforehand, or to be found from the volts across the device. */
   readonly running: Running;
   readonly ranges: Ranges;
@@ -60,7 +62,7 @@ export const FAULT_PLACES: Readonly<Record<Family, readonly FaultPlace[]>> = {
   voltage: [...WIRING, ...whole("output-dead", "output-stuck-high", "output-stuck-low")],
 };
 
-interface Parts { family: Family; kind: Kind; pins: PinAssignment; place: FaultPlace; pull: Pull; breakEnd: 0 | 1; running: Running; logPrior: number; expect?: Expect }
+interface Parts { family: Family; kind: Kind; pins: PinAssignment; place: FaultPlace; pull: Pull; breakEnd: 0 | 1; running: Running; logPrior: number; tap?: Tap; expect?: Expect }
 
 /** Findings that show on the parted device, and those that leave the parted harness sound. */
 const DEVICE_FAULTS = new Set<FaultCode>(["wiper-open", "track-open"]);
@@ -69,14 +71,14 @@ const HARNESS_SOUND = new Set<FaultCode>(["none", "wiper-open", "track-open", "t
 /** Builds one candidate; two candidates with the same `hypothesis.id` differ only in what nobody asks about. */
 export function makeCandidate(p: Parts): Candidate {
   const pinOf = ROLE_ORDER.map((role) => p.pins[role]) as [PinNumber, PinNumber, PinNumber];
-  const fault = faultOf(p.place, pinOf), ranges = rangesFor(p.family, p.pull, p.place.code, p.expect);
+  const fault = faultOf(p.place, pinOf), tap = p.tap ?? null, ranges = tap ? tappedRanges(p.pull, p.place.code, tap) : rangesFor(p.family, p.pull, p.place.code, p.expect);
   const { code, at, at2 } = p.place;
   return {
     hypothesis: { id: hypothesisId(p.kind, pinOf, fault), kind: p.kind, pins: p.pins, fault },
     family: p.family, pull: p.pull, code, at, at2, breakEnd: p.breakEnd, running: p.running, pinOf,
-    suppliedByBattery: p.expect?.supplyVolts === "battery",
+    suppliedByBattery: p.expect?.supplyVolts === "battery", tap,
     ranges, middle: ranges.mean.map((m, i) => (ranges.log[i] ? exp(m) : m)), logPrior: p.logPrior,
-    deviceKey: `${p.family}|${pinOf}|${DEVICE_FAULTS.has(code) ? code + p.breakEnd : ""}|${p.expect ? "entry" : ""}`,
+    deviceKey: `${p.family}${tap ? `-${tap.role}${tap.position}` : ""}|${pinOf}|${DEVICE_FAULTS.has(code) ? code + p.breakEnd : ""}|${p.expect ? "entry" : ""}`,
     harnessKey: `${p.family}|${p.pull}|${pinOf}|${HARNESS_SOUND.has(code) ? "" : `${code}${at}${at2}`}|${p.expect ? "entry" : ""}`,
   };
 }

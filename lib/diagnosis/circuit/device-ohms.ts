@@ -43,17 +43,27 @@ export function deviceOhms(c: Candidate, x: Float64Array, red: number, black: nu
 }
 
 function trackOhms(c: Candidate, x: Float64Array, a: number, b: number, position: number): number {
-  const share = clampShare(x[position === 0 ? P.rest : P.full]!);
+  const stands = x[position === 0 ? P.rest : P.full]!, share = wiperShare(c, stands);
   const touches = (role: number) => a === role || b === role;
   if (c.code === "wiper-open" && touches(SIGNAL)) return Infinity;
   if (c.code === "track-open" && touches(c.breakEnd)) return Infinity;
   const track = x[P.track]!;
   if (!touches(SIGNAL)) return track;
-  return x[P.wiper]! + track * (touches(GROUND) ? share : 1 - share);
+  return wiperOhms(c, x, stands) + track * (touches(GROUND) ? share : 1 - share);
+}
+
+/** Where a wiper that stands at `stands` touches the part of the track between supply and ground: a share of it. */
+export function wiperShare(c: Candidate, stands: number): number {
+  return c.tap ? Math.min(1 - 1e-6, Math.max(1e-6, stands)) : clampShare(stands);
+}
+
+/** Ohms between that place and the signal's pin: the wiper's own and, past a tap, the track up to there. */
+export function wiperOhms(c: Candidate, x: Float64Array, stands: number): number {
+  return x[P.wiper]! + (c.tap ? x[P.track]! * Math.max(0, -stands, stands - 1) : 0);
 }
 
 /** Wiper share kept within the track. */
-export function clampShare(share: number): number {
+function clampShare(share: number): number {
   return Math.min(0.998, Math.max(0.002, share));
 }
 

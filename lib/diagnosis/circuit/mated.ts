@@ -1,7 +1,7 @@
 import { NodalNetwork, THERMAL_VOLTS } from "../network/solve";
 import { GROUND, SIGNAL, SUPPLY, type Candidate } from "./candidate";
 import { cavity, supplyVolts, WIRE_OHMS_SPREAD, type Thevenin } from "./controller";
-import { clampShare, DROP_AMPERES, EMISSION } from "./device-ohms";
+import { DROP_AMPERES, EMISSION, wiperOhms, wiperShare } from "./device-ohms";
 import { P } from "./parameters";
 import { exp } from "../numerics";
 
@@ -71,13 +71,13 @@ function keep(out: MatedVolts, position: number): void {
 function solvePotentiometer(c: Candidate, x: Float64Array, out: MatedVolts): void {
   const track = x[P.track]!;
   for (let position = 0; position < 2; position++) {
-    const share = clampShare(x[position === 0 ? P.rest : P.full]!);
+    const stands = x[position === 0 ? P.rest : P.full]!, share = wiperShare(c, stands);
     stampHarness(c, x, 1);
     const wiper = firstInside(c);
     const broken = c.code === "track-open" ? c.breakEnd : -1;
     if (broken !== SUPPLY) net.resistor(pinNode(c, SUPPLY), wiper, track * (1 - share));
     if (broken !== GROUND) net.resistor(wiper, pinNode(c, GROUND), track * share);
-    if (c.code !== "wiper-open") net.resistor(wiper, pinNode(c, SIGNAL), x[P.wiper]!);
+    if (c.code !== "wiper-open") net.resistor(wiper, pinNode(c, SIGNAL), wiperOhms(c, x, stands));
     net.solve();
     keep(out, position);
   }

@@ -1,6 +1,6 @@
 import { FAMILIES, FAULT_PLACES, GROUND, makeCandidate, PERMUTATIONS, SIGNAL, SUPPLY, type Candidate, type FaultPlace, type Running } from "../circuit/candidate";
-import type { Family, Pull } from "../circuit/parameters";
-import { chancesBefore, FAMILY_SHARE, PULL_SHARE } from "../priors";
+import type { Family, Pull, Tap } from "../circuit/parameters";
+import { chancesBefore, FAMILY_SHARE, PULL_SHARE, TAPPED_SHARE } from "../priors";
 import { KINDS, type Expect, type Experience, type Kind, type PinAssignment } from "../types";
 import { ln } from "../numerics";
 
@@ -16,12 +16,12 @@ function faultLogWeights(family: Family, { findings }: Chances): readonly { plac
   return places.map((place) => ({ place, log: ln(findings[place.code] / count(place.code) / total) }));
 }
 
-function ofFamily(kind: Kind, family: Family, pins: PinAssignment, base: number, chances: Chances, expect?: Expect): Candidate[] {
+function ofFamily(kind: Kind, family: Family, pins: PinAssignment, base: number, chances: Chances, expect?: Expect, tap?: Tap): Candidate[] {
   return faultLogWeights(family, chances).flatMap(({ place, log }) => {
     const ends = place.code === "track-open" ? ([0, 1] as const) : ([0] as const);
     const states = runningStates(family, place);
     return pullsFor(family, place).flatMap((pull) => ends.flatMap((breakEnd) => states.map((running) => makeCandidate({
-      family, kind, pins, place, pull, breakEnd, running, expect,
+      family, kind, pins, place, pull, breakEnd, running, expect, tap,
       logPrior: base + log + ln(pullShare(family, pull, place)) - ln(ends.length * states.length),
     }))));
   });
@@ -68,6 +68,14 @@ export const candidatesForUnknown = remembered((experience: Experience | undefin
   const chances = chancesBefore(experience);
   return KINDS.flatMap((kind) => PERMUTATIONS.flatMap((pins) => FAMILIES[kind].flatMap((family) =>
     ofFamily(kind, family, pins, ln(chances.kinds[kind] * FAMILY_SHARE[family] / PERMUTATIONS.length), chances))));
+});
+
+const TAPS: readonly Tap[] = ([0, 1] as const).flatMap((role) => ([0, 1] as const).map((position) => ({ role, position })));
+
+/** Rare builds of the three kinds, looked at only where none of the usual ones explains the readings: a potentiometer with a tap. */
+export const candidatesSeldom = remembered((experience: Experience | undefined): readonly Candidate[] => {
+  const chances = chancesBefore(experience), base = ln(chances.kinds.potentiometer * TAPPED_SHARE / PERMUTATIONS.length / TAPS.length);
+  return PERMUTATIONS.flatMap((pins) => TAPS.flatMap((tap) => ofFamily("potentiometer", "potentiometer", pins, base, chances, undefined, tap)));
 });
 
 const forEntry = remembered(({ expect, experience }: { expect: Expect; experience?: Experience }): readonly Candidate[] => {
