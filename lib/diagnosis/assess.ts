@@ -1,6 +1,7 @@
 import { ALL_CHECKS } from "./checks";
+import type { Candidate } from "./circuit/candidate";
 import { CHECK_INDEX } from "./circuit/predict";
-import { candidatesForEntry, candidatesForUnknown, candidatesSeldom } from "./inference/candidates";
+import { candidatesDamp, candidatesForEntry, candidatesForUnknown, candidatesTapped } from "./inference/candidates";
 import { rankChecks } from "./inference/choose";
 import { contradictions, FAR, fitsBadly, misfits } from "./inference/contradiction";
 import { observe, type Observation } from "./inference/observe";
@@ -25,14 +26,20 @@ const MOST_NEXT = 5;
 const MOST_WEIGHED = 16;
 
 /**
- * Belief over everything that may be true of the machine, all readings taken as right, likeliest first. Rare builds are
- * left out while the usual ones explain the readings well.
+ * Belief over everything that may be true of the machine, all readings taken as right, likeliest first. What is rare is
+ * left out while the usual builds explain the readings well: a damp connector until a verdict is near, a tapped track altogether.
  */
 export function beliefs(setup: Setup, readings: readonly Reading[]): Believed[] {
   const meter = setup.meter ?? DEFAULT_METER, observations = observe(readings, meter), usual = usualBeliefs(setup, readings);
-  if (!explainsBadly(usual[0]!, observations, meter)) return usual;
-  return mergeBeliefs(usual, believe(candidatesSeldom(setup.experience), observations, meter));
+  const badly = explainsBadly(usual[0]!, observations, meter);
+  if (!badly && !settled(marginals(usual))) return usual;
+  return mergeBeliefs(usual, believe([...dampFor(setup), ...(badly ? tappedFor(setup) : [])], observations, meter));
 }
+
+const dampFor = ({ expect, experience }: Setup) => candidatesDamp({ expect, experience });
+/** An entry speaks of no tap: where there is one, another device is fitted. */
+const tappedFor = ({ expect, experience }: Setup) => (expect ? shifted(candidatesTapped(experience), 1 - ENTRY_IS_RIGHT) : candidatesTapped(experience));
+const shifted = (list: readonly Candidate[], share: number) => list.map((c) => ({ ...c, logPrior: c.logPrior + ln(share) }));
 
 const explainsBadly = (b: Believed, observations: readonly Observation[], meter: MeterSpec) => strained(b) || fitsBadly(b, observations, meter);
 
@@ -42,7 +49,6 @@ function usualBeliefs(setup: Setup, readings: readonly Reading[]): Believed[] {
   const byEntry = believe(candidatesForEntry(setup.expect, setup.experience), observations, meter);
   if (!fitsBadly(byEntry[0]!, observations, meter)) return byEntry;
   // The entry cannot explain the readings: another device may be fitted, or its pins may differ.
-  const shifted = (list: ReturnType<typeof candidatesForEntry>, share: number) => list.map((c) => ({ ...c, logPrior: c.logPrior + ln(share) }));
   return believe([...shifted(candidatesForEntry(setup.expect, setup.experience), ENTRY_IS_RIGHT), ...shifted(candidatesForUnknown(setup.experience), 1 - ENTRY_IS_RIGHT)], observations, meter);
 }
 
@@ -51,12 +57,16 @@ function weighed(setup: Setup, readings: readonly Reading[]): Weighed {
   const meter = setup.meter ?? DEFAULT_METER, observations = observe(readings, meter), believed = beliefs(setup, readings);
   const far = misfits(believed[0]!, observations, meter), odd = far.some((f) => f > FAR);
   if (readings.length < 2 || readings.length > MOST_WEIGHED || !(odd || settled(marginals(believed)))) return { believed, slips: observations.map(() => 0) };
-  const usual = setup.expect ? candidatesForEntry(setup.expect, setup.experience) : candidatesForUnknown(setup.experience);
-  const everything = believed[0]!.candidate.tap ? [...usual, ...candidatesSeldom(setup.experience)] : usual;
+  const everything = [...(setup.expect ? candidatesForEntry(setup.expect, setup.experience) : candidatesForUnknown(setup.experience)), ...rareLike(believed[0]!, setup)];
   // Every device there is takes a while to look through: that is done without the reading that fits worst. Without any other, the device stands as identified.
   const worst = odd ? far.indexOf(Math.max(...far)) : -1, { family, pinOf } = believed[0]!.candidate;
   const likely = everything.filter((c) => c.family === family && `${c.pinOf}` === `${pinOf}`);
   return weighSlips((i) => (i === worst || likely.length === 0 ? everything : likely), observations, meter, believed);
+}
+
+/** What is rare takes part where it is what the readings speak for. */
+function rareLike({ candidate }: Believed, setup: Setup): readonly Candidate[] {
+  return candidate.code === "connector-damp" ? dampFor(setup) : candidate.tap ? tappedFor(setup) : [];
 }
 
 /**

@@ -23,6 +23,7 @@ export const FINDING_PRIORS: readonly Prior<FaultCode>[] = [
   { code: "supply-missing", share: 0.05, source: PRACTICE },
   { code: "short-to-battery", share: 0.05, source: CONNECTION },
   { code: "wires-shorted", share: 0.04, source: CONNECTION },
+  { code: "connector-damp", share: 0.002, source: PRACTICE },
   { code: "pull-missing", share: 0.025, source: PRACTICE },
   { code: "track-worn", share: 0.055, source: RESISTOR },
   { code: "wiper-open", share: 0.03, source: RESISTOR },

@@ -13,7 +13,7 @@ export type PinNumber = 1 | 2 | 3;
 export type PinAssignment = Readonly<Record<Role, PinNumber>>;
 
 export const FAULT_CODES = [
-  "none", "wire-open", "wire-resistive", "short-to-ground", "short-to-battery", "wires-shorted", "wires-swapped",
+  "none", "wire-open", "wire-resistive", "short-to-ground", "short-to-battery", "wires-shorted", "wires-swapped", "connector-damp",
   "contact-open", "supply-missing", "pull-missing", "wiper-open", "track-open", "track-worn",
   "output-dead", "output-stuck-high", "output-stuck-low",
 ] as const;

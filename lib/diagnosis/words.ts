@@ -37,6 +37,7 @@ export function faultText(fault: Fault, labels: readonly string[]): string {
     case "short-to-ground": return `wire to ${a} shorted to ground`;
     case "short-to-battery": return `wire to ${a} shorted to battery`;
     case "wires-shorted": return `wires to ${a} and ${b} shorted together`;
+    case "connector-damp": return `damp connector: leakage between cavities ${a} and ${b}`;
     case "wires-swapped": return `wires to ${a} and ${b} exchanged`;
     case "contact-open": return `contact ${a} of the connector does not touch`;
     case "supply-missing": return "controller gives no supply";

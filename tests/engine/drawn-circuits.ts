@@ -3,6 +3,7 @@ import { beliefs } from "@/lib/diagnosis/assess";
 import type { Candidate } from "@/lib/diagnosis/circuit/candidate";
 import { P, PARAMETER_COUNT } from "@/lib/diagnosis/circuit/parameters";
 import { ALL_GROUPS, newPredictions, predictInto, WHOLE_PLAN, type Predictions } from "@/lib/diagnosis/circuit/predict";
+import { candidatesDamp } from "@/lib/diagnosis/inference/candidates";
 import { physical } from "@/lib/diagnosis/inference/misfit";
 import { normal } from "../support/draw-machine";
 import type { Description } from "../support/machine-netlist";
@@ -21,8 +22,15 @@ const ROLES = ["supply", "ground", "signal"] as const;
 
 /** Every family, fault place, pull, break and state of the electronics once, each with another order of the pins. */
 export function everyBuild(): Candidate[] {
+  return oneOfEach(beliefs({ pins: ["1", "2", "3"] }, []).map(({ candidate }) => candidate));
+}
+
+/** The same of builds with a damp connector. */
+export const everyDampBuild = () => oneOfEach(candidatesDamp({}));
+
+function oneOfEach(builds: readonly Candidate[]): Candidate[] {
   const groups = new Map<string, Candidate[]>();
-  for (const { candidate: c } of beliefs({ pins: ["1", "2", "3"] }, [])) {
+  for (const c of builds) {
     const key = [c.family, c.code, c.at, c.at2, c.pull, c.breakEnd, c.running].join();
     groups.set(key, [...(groups.get(key) ?? []), c]);
   }

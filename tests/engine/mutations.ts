@@ -49,7 +49,7 @@ export const MUTATIONS: readonly Mutation[] = [
     ["open collector pulls in the wrong state", 'if (drive === "low") net.resistor(signal, ground, x[P.driveLow]!)', 'if (drive !== "low") net.resistor(signal, ground, x[P.driveLow]!)'],
     ["stuck low is stuck high", 'return ["low", "low"]', 'return ["high", "high"]'],
     ["load a tenth", "fed / x[P.load]!", "10 * fed / x[P.load]!"],
-    ["short between wires forgotten when mated", 'if (c.code === "wires-shorted") net.resistor(', 'if (c.code === "none") net.resistor('],
+    ["short between wires forgotten when mated", 'if (joinsTwo(c.code)) net.resistor(', 'if (c.code === "none") net.resistor('],
     ["junction from the signal left out", 'if (c.family !== "open-collector") net.diode(', 'if (c.family === "potentiometer") net.diode(']),
   ...inFile("network/solve.ts",
     ["thermal voltage doubled", "THERMAL_VOLTS = 0.025864", "THERMAL_VOLTS = 0.051728"]),

@@ -44,7 +44,7 @@ export function addWires(net: Circuit, d: Description): void {
     if (has("short-to-ground", role)) net.resistor(cavity(role), "0", d.faultOhms);
     if (has("short-to-battery", role)) net.resistor(cavity(role), "battery", d.faultOhms);
   }
-  if (d.fault === "wires-shorted") net.resistor(cavity(d.at[0]!), cavity(d.at[1]!), d.faultOhms);
+  if (d.fault === "wires-shorted" || d.fault === "connector-damp") net.resistor(cavity(d.at[0]!), cavity(d.at[1]!), d.faultOhms);
 }
 
 /** The battery: its volts with the power on; off, the loads of the machine behind it. */

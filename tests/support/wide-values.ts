@@ -1,7 +1,7 @@
 import type { Expect, FaultCode } from "@/lib/diagnosis";
 import type { Candidate } from "@/lib/diagnosis/circuit/candidate";
 import type { Family } from "@/lib/diagnosis/circuit/parameters";
-import { candidatesSeldom } from "@/lib/diagnosis/inference/candidates";
+import { candidatesTapped } from "@/lib/diagnosis/inference/candidates";
 import type { Wanted } from "./wide-machine";
 
 /** A build by its family and finding; the electronics run where they can. `at` is the role of the finding's place (0 supply, 1 ground, 2 signal). */
@@ -44,7 +44,7 @@ const HELD: readonly Wanted[] = (["potentiometer", "voltage", "push-pull"] as co
 const past = (role: 0 | 1, position: 0 | 1) => (c: Candidate) => c.tap?.role === role && c.tap.position === position;
 /** Ground or supply at a tap of the track: past it the signal does not move, and the track up to there is in series with the wiper. */
 export const TAPPED: readonly Wanted[] = ([[1, 0, -0.4, 0.8], [1, 1, 0.75, -0.15], [0, 0, 1.4, 0.2], [0, 1, 0.1, 1.3]] as const).flatMap(([role, position, rest, full]) => (["none", "wire-open"] as const).map((code): Wanted => (
-  { name: `tap at the ${role === 0 ? "supply" : "ground"}, wiper at ${rest} and ${full} of the track between supply and ground, ${code}`, among: candidatesSeldom(undefined), is: build("potentiometer", code, code === "none" ? -1 : 2, past(role, position)), values: { track: 4700, wiper: 60, rest, full } }
+  { name: `tap at the ${role === 0 ? "supply" : "ground"}, wiper at ${rest} and ${full} of the track between supply and ground, ${code}`, among: candidatesTapped(undefined), is: build("potentiometer", code, code === "none" ? -1 : 2, past(role, position)), values: { track: 4700, wiper: 60, rest, full } }
 )));
 
 /** A dead band at an end of travel: the signal stands at its end stop before the actuator does, which rest and full cannot show. */

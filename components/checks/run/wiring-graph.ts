@@ -64,7 +64,7 @@ export function wiringNodes({ spec, labels, state, roles, finding, deviceName }:
   return [
     part("controller", y.controller, { title: "Controller", pins: [], marked: controllerMarked, below: true }),
     part("plug", y.plug, { title: "", pins: pins([], false), marked: false, below: true }),
-    part("harness", y.harness, { title: "", pins: pins(["contact-open"], false), marked: false, below: false }),
+    part("harness", y.harness, { title: "", pins: pins(["contact-open", "connector-damp"], false), marked: false, below: false }),
     part("device", y.device, { title: deviceName, pins: pins([], true), marked: finding !== null && DEVICE_FAULTS.includes(finding.code), below: false }),
     { id: "positive", type: "post", position: { x: METER_X, y: 0 }, data: { label: "battery +" } },
     { id: "negative", type: "post", position: { x: METER_X, y: y.device + 48 }, data: { label: "battery \u2212" } },

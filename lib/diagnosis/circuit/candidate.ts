@@ -43,6 +43,9 @@ export type Running = "yes" | "no" | "by-volts";
 /** Where a fault sits, as roles. */
 export interface FaultPlace { readonly code: FaultCode; readonly at: number; readonly at2: number }
 
+/** Two cavities joined by some resistance: a short of their wires, or leakage across a damp connector. */
+export const joinsTwo = (code: FaultCode) => code === "wires-shorted" || code === "connector-damp";
+
 const each = (code: FaultCode, roles: readonly number[]): FaultPlace[] => roles.map((at) => ({ code, at, at2: -1 }));
 const pairs = (code: FaultCode): FaultPlace[] => [[0, 1], [1, 2], [0, 2]].map(([at, at2]) => ({ code, at: at!, at2: at2! }));
 const whole = (...codes: FaultCode[]): FaultPlace[] => codes.map((code) => ({ code, at: -1, at2: -1 }));
@@ -54,7 +57,10 @@ const WIRING: readonly FaultPlace[] = [
   ...whole("supply-missing", "pull-missing"),
 ];
 
-/** Every finding a family can have. */
+/** Leakage between two cavities of a damp connector: rare, and seldom told from a pull, so it is looked at apart. */
+export const DAMP_PLACES: readonly FaultPlace[] = pairs("connector-damp");
+
+/** Every other finding a family can have. */
 export const FAULT_PLACES: Readonly<Record<Family, readonly FaultPlace[]>> = {
   potentiometer: [...WIRING, ...whole("wiper-open", "track-open", "track-worn")],
   "open-collector": [...WIRING, ...whole("output-dead", "output-stuck-high", "output-stuck-low")],

@@ -1,5 +1,5 @@
 import { NodalNetwork, THERMAL_VOLTS } from "../network/solve";
-import { GROUND, SIGNAL, SUPPLY, type Candidate } from "./candidate";
+import { GROUND, joinsTwo, SIGNAL, SUPPLY, type Candidate } from "./candidate";
 import { cavity, supplyVolts, WIRE_OHMS_SPREAD, type Thevenin } from "./controller";
 import { DROP_AMPERES, EMISSION, wiperOhms, wiperShare } from "./device-ohms";
 import { P } from "./parameters";
@@ -49,7 +49,7 @@ function stampHarness(c: Candidate, x: Float64Array, inside: number): void {
     fedSiemens[role] = 1 / scratch.ohms;
     net.resistor(role + 1, 0, METER_OHMS);
   }
-  if (c.code === "wires-shorted") net.resistor(c.at + 1, c.at2 + 1, x[P.fault]!);
+  if (joinsTwo(c.code)) net.resistor(c.at + 1, c.at2 + 1, x[P.fault]!);
 }
 
 /** Solves the mated machine for both positions of the actuator into `out` (index position * 3 + role), volts. */

@@ -37,9 +37,9 @@ class RangeBuilder {
   }
 }
 
-/** Ohms of a fault, where it has any: middle and factor. Common practice: joints corrode over decades of ohms, shorts are near 1 ohm. */
+/** Ohms of a fault, where it has any: middle and factor. Common practice: joints corrode over decades of ohms, shorts are near 1 ohm, a wet connector leaks 10 k to 1 M. */
 const FAULT_OHMS: Partial<Record<FaultCode, readonly [number, number]>> = {
-  "wire-resistive": [1500, 6.5], "short-to-ground": [0.8, 2.3], "short-to-battery": [0.8, 2.3], "wires-shorted": [1, 2.2],
+  "wire-resistive": [1500, 6.5], "short-to-ground": [0.8, 2.3], "short-to-battery": [0.8, 2.3], "wires-shorted": [1, 2.2], "connector-damp": [100_000, 3],
 };
 
 /** Ranges for one way the machine may be built; `expect` narrows what a catalogue entry states. */

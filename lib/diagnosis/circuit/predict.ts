@@ -1,7 +1,7 @@
 import { ALL_CHECKS } from "../checks";
 import { LOOSE_IF_BAD, LOOSE_IF_SOUND } from "../priors";
 import type { CheckSpec } from "../types";
-import { SIGNAL, type Candidate } from "./candidate";
+import { joinsTwo, SIGNAL, type Candidate } from "./candidate";
 import { cavity, looseToGround, parallel, wireOhms, type Thevenin } from "./controller";
 import { deviceOhms } from "./device-ohms";
 import { clampDuty, METER_OHMS, newMatedVolts, pulses, solveMated } from "./mated";
@@ -101,7 +101,7 @@ function setOhms(out: Predictions, index: number, ohms: number): void {
 }
 
 /** The partner of a cavity whose wire is shorted to another wire, or -1. */
-const shortedTo = (c: Candidate, role: number) => (c.code !== "wires-shorted" ? -1 : role === c.at ? c.at2 : role === c.at2 ? c.at : -1);
+const shortedTo = (c: Candidate, role: number) => (!joinsTwo(c.code) ? -1 : role === c.at ? c.at2 : role === c.at2 ? c.at : -1);
 
 function joined(c: Candidate, x: Float64Array, role: number, on: boolean, t: Thevenin): void {
   const partner = shortedTo(c, role);
@@ -137,7 +137,7 @@ function voltsBetween(c: Candidate, x: Float64Array, red: number, black: number)
   if (shortedTo(c, red) === black) {
     cavity(c, x, red, true, here);
     cavity(c, x, black, true, there);
-    const short = x[P.fault]!;
+    const short = x[P.fault]! * METER_OHMS / (x[P.fault]! + METER_OHMS);
     return (here.volts - there.volts) * short / (here.ohms + there.ohms + short);
   }
   joined(c, x, red, true, here);

@@ -2,7 +2,7 @@ import type { Candidate } from "../circuit/candidate";
 import { P } from "../circuit/parameters";
 import { GROUP } from "../circuit/predict";
 
-const HAS_FAULT_OHMS = new Set(["wire-resistive", "short-to-ground", "short-to-battery", "wires-shorted"]);
+const HAS_FAULT_OHMS = new Set(["wire-resistive", "short-to-ground", "short-to-battery", "wires-shorted", "connector-damp"]);
 const cache = new WeakMap<Candidate, Map<number, readonly number[]>>();
 
 /** Which unknowns the given groups of checks can speak of, for this candidate; ascending places. */
