@@ -84,7 +84,7 @@ describe("the verdict on a run", () => {
     expect(verdict.explained.map(({ finding }) => finding.code)).toEqual(["wire-open", "none"]);
     expect(verdict.explained[0]?.rows).toEqual(verdict.evidence);
     expect(verdict.carrying?.checks).toContain("res:wire:2");
-    expect(verdict.engineVersion).toBe("2");
+    expect(verdict.engineVersion).toBe("3");
   });
 
   it("comes out the same in slices", async () => {

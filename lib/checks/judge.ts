@@ -1,15 +1,18 @@
-import { assess, drain, explainSteps, tellApart, vocabulary, type Assessment } from "@/lib/diagnosis";
+import { assess, drain, explainSteps, tellApart, vocabulary, type Assessment, type Explanation } from "@/lib/diagnosis";
 import { AppError } from "@/lib/errors";
 import { buildVerdict, explainedFindings } from "./build-verdict";
 import { inSlices } from "./in-slices";
+import { refusalOf } from "./refusal";
 import type { Run } from "./run";
 import { effectiveReadings, engineSetup } from "./run-state";
 import type { Verdict } from "./verdict";
 
 /** Kept with each verdict; goes up whenever the same readings could be judged differently, or more is kept of the reasons. */
-export const ENGINE_VERSION = "2";
+export const ENGINE_VERSION = "3";
 
 export interface Judgement { readonly assessment: Exclude<Assessment, { state: "invalid-input" }>; readonly verdict: Verdict }
+
+const NO_EXPLANATION: Explanation = { evidence: [], carrying: null };
 
 function* judgeSteps(run: Pick<Run, "setup" | "steps">): Generator<void, Judgement> {
   const setup = engineSetup(run, vocabulary());
@@ -18,11 +21,12 @@ function* judgeSteps(run: Pick<Run, "setup" | "steps">): Generator<void, Judgeme
   const assessment = assess(setup, readings);
   if (assessment.state === "invalid-input") throw new AppError(assessment.code, assessment.message, 422, assessment.where);
   yield;
-  const explanation = yield* explainSteps(setup, readings, explainedFindings(assessment));
+  // Reasons are reasons for findings of the three kinds: a refusal has none.
+  const explanation = refusalOf(assessment) ? NO_EXPLANATION : yield* explainSteps(setup, readings, explainedFindings(assessment));
   const open = assessment.openFindings;
   const verdict = buildVerdict({
     labels: run.setup.cavityLabels, assessment, engineVersion: ENGINE_VERSION, explanation,
-    tellApart: open.length > 1 ? tellApart({ ...setup, excluded: undefined }, readings, open) : [],
+    tellApart: open.length > 1 && explanation !== NO_EXPLANATION ? tellApart({ ...setup, excluded: undefined }, readings, open) : [],
   });
   return { assessment, verdict };
 }

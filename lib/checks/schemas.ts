@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { FAULT_CODES, KINDS } from "@/lib/diagnosis";
+import { FAULT_CODES, KINDS, OTHER_DEVICES } from "@/lib/diagnosis";
 import { experienceSchema } from "./confirm-schemas";
 import { idSchema, ulidSchema } from "./id-schemas";
 import { SKIP_REASONS } from "./run";
@@ -40,6 +40,7 @@ const faultSchema = z.object({ code: z.enum(FAULT_CODES), pins: z.array(pinSchem
 export const standingSchema = z.object({
   state: z.string().max(40),
   kinds: z.array(z.object({ kind: z.enum(KINDS), p: chance })).max(10),
+  others: z.array(z.object({ device: z.enum(OTHER_DEVICES), p: chance })).max(10).default([]),
   pins: z.array(z.object({ supply: pinSchema, ground: pinSchema, signal: pinSchema, p: chance })).max(6),
   faults: z.array(faultSchema).max(200),
   openFindings: z.array(faultSchema).max(200),

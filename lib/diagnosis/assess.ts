@@ -10,9 +10,11 @@ import { mergeBeliefs, strained } from "./inference/seldom";
 import { weighSlips, type Weighed } from "./inference/slips";
 import { marginals, type Marginals } from "./inference/standing";
 import { DEFAULT_METER } from "./meter";
+import { othersBeside } from "./others";
+import { overLimitOf } from "./over-limit";
 import type { PlannedTest } from "./planning";
 import { ENTRY_IS_RIGHT } from "./priors";
-import type { Assessment, MeterSpec, NextCheck, Reading, Setup } from "./types";
+import type { Assessment, MeterSpec, NextCheck, OtherChance, Reading, Setup } from "./types";
 import { validate } from "./validate";
 import { whyText } from "./words";
 import { ln } from "./numerics";
@@ -22,6 +24,8 @@ const SETTLED = 0.985;
 /** Bits per unit of effort below which a further check is not worth a technician's while. */
 const WORTH_WHILE = 0.012;
 const MOST_NEXT = 5;
+/** Other devices less likely than this are left out. */
+const LEAST_OTHER = 1e-6;
 /** Readings up to which each is weighed as wrong: more of them hold one another up, and take longer. */
 const MOST_WEIGHED = 16;
 
@@ -78,17 +82,36 @@ function rareLike({ candidate }: Believed, setup: Setup): readonly Candidate[] {
 export function assess(setup: Setup, readings: readonly Reading[]): Assessment {
   const problem = validate(setup, readings);
   if (problem) return { state: "invalid-input", ...problem };
-  const meter = setup.meter ?? DEFAULT_METER, { believed, slips } = weighed(setup, readings), m = marginals(believed);
-  const ranked = rankChecks(setup, readings, believed, meter);
-  const answered = settled(m), worth = ranked.filter((r) => r.gainBits / r.effort >= WORTH_WHILE);
-  const done = answered || worth.length === 0;
+  const meter = setup.meter ?? DEFAULT_METER, { believed, slips } = weighed(setup, readings), overLimit = overLimitOf(readings);
+  const ranked = overLimit ? [] : rankChecks(setup, readings, believed, meter), worth = ranked.filter((r) => r.gainBits / r.effort >= WORTH_WHILE);
+  const others = othersFor(setup, readings, believed, worth.length === 0), m = besideOthers(marginals(believed), others);
+  const done = worth.length === 0 || settled(m) || others.some(({ p }) => p >= SETTLED);
   const standing = {
-    ...m, done, inseparable: done && m.openFindings.length > 1 && worth.length === 0,
+    ...m, others, overLimit, done, inseparable: done && m.openFindings.length > 1 && worth.length === 0,
     next: ranked.slice(0, MOST_NEXT).map((r) => nextCheck(r, setup)),
   };
-  const suspects = contradictions(believed[0]!, readings, meter, slips);
+  const suspects = overLimit || otherwise(others) ? [] : contradictions(believed[0]!, readings, meter, slips);
   if (suspects.length > 0) return { state: "contradictory", suspects, ...standing };
   return { state: readings.length === 0 ? "needs-reading" : "ranked", ...standing };
+}
+
+/**
+ * Devices that are none of the three kinds, beside what is believed of the three: looked at before a verdict (`last`: no reading is worth
+ * taking), and where the three do not explain the readings well. One reading says nothing of them.
+ */
+function othersFor(setup: Setup, readings: readonly Reading[], believed: readonly Believed[], last: boolean): readonly OtherChance[] {
+  const best = believed[0]!, meter = setup.meter ?? DEFAULT_METER, observations = observe(readings, meter);
+  if (readings.length < 2 || !(last || settled(marginals(believed)) || explainsBadly(best, observations, meter))) return [];
+  return othersBeside(best.logWeight - ln(best.p), observations, setup.expect ? 1 - ENTRY_IS_RIGHT : 1).filter(({ p }) => p >= LEAST_OTHER);
+}
+
+const sumOf = (others: readonly OtherChance[]) => others.reduce((sum, { p }) => sum + p, 0);
+/** Whether the readings speak for something that is none of the three kinds. */
+const otherwise = (others: readonly OtherChance[]) => sumOf(others) > 0.5;
+
+function besideOthers(m: Marginals, others: readonly OtherChance[]): Marginals {
+  const left = 1 - sumOf(others);
+  return { ...m, kinds: m.kinds.map(({ kind, p }) => ({ kind, p: p * left })) };
 }
 
 function settled(m: Marginals): boolean {

@@ -1,5 +1,5 @@
 import type { Family, Pull } from "./circuit/parameters";
-import type { Experience, FaultCode, Kind } from "./types";
+import type { Experience, FaultCode, Kind, OtherDevice } from "./types";
 
 /** What is believed of one finding or kind before the first reading, as a share, and where the figure comes from. */
 export interface Prior<Code> { readonly code: Code; readonly share: number; readonly source: string }
@@ -38,6 +38,16 @@ export const KIND_PRIORS: readonly Prior<Kind>[] = [
   { code: "potentiometer", share: 0.38, source: PRACTICE },
   { code: "pwm", share: 0.4, source: PRACTICE },
   { code: "voltage", share: 0.22, source: PRACTICE },
+];
+
+/** Devices that are none of the three kinds; about one in seventy is worth the walk (common practice). */
+export const OTHER_PRIORS: readonly Prior<OtherDevice>[] = [
+  { code: "current-loop", share: 0.004, source: PRACTICE },
+  { code: "switch-pnp", share: 0.003, source: PRACTICE },
+  { code: "switch-npn", share: 0.002, source: PRACTICE },
+  { code: "edge-protocol", share: 0.002, source: PRACTICE },
+  { code: "can-pair", share: 0.002, source: PRACTICE },
+  { code: "mains", share: 0.001, source: PRACTICE },
 ];
 
 /** The published chances count as much as this many checks of the workshop's own (common practice; shown with them). */

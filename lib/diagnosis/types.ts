@@ -6,6 +6,10 @@
 export const KINDS = ["potentiometer", "pwm", "voltage"] as const;
 export type Kind = (typeof KINDS)[number];
 
+/** Things found at a connector that are none of the three kinds; they are recognised, not diagnosed. */
+export const OTHER_DEVICES = ["current-loop", "switch-pnp", "switch-npn", "edge-protocol", "can-pair", "mains"] as const;
+export type OtherDevice = (typeof OTHER_DEVICES)[number];
+
 export const ROLES = ["supply", "ground", "signal"] as const;
 export type Role = (typeof ROLES)[number];
 
@@ -117,6 +121,7 @@ export interface Hypothesis {
 }
 
 export interface KindChance { readonly kind: Kind; readonly p: number }
+export interface OtherChance { readonly device: OtherDevice; readonly p: number }
 export interface PinsChance extends PinAssignment { readonly p: number }
 export interface FaultChance extends Fault { readonly p: number }
 export interface HypothesisChance { readonly hypothesis: Hypothesis; readonly p: number }
@@ -130,55 +135,13 @@ export interface NextCheck {
   readonly effort: number;
 }
 
-/** What a hypothesis predicts for one check: a band of numbers, or words with their chances. */
-export interface Prediction {
-  readonly check: string;
-  /** Middle and limits of the number expected (95 %), or null when a word is expected. */
-  readonly number: { readonly low: number; readonly middle: number; readonly high: number } | null;
-  readonly words: readonly { readonly word: SymbolValue; readonly p: number }[];
-}
-
-/** How one reading moved the chances: factor > 1 speaks for, < 1 against (relative to the mean of all still possible). */
-export interface ReadingEffect {
-  readonly check: string;
-  readonly value: ReadingValue;
-  readonly kinds: readonly { readonly kind: Kind; readonly factor: number }[];
-  readonly faults: readonly { readonly fault: Fault; readonly factor: number }[];
-}
-
-export interface EvidenceRow {
-  readonly check: string;
-  readonly value: ReadingValue;
-  readonly ifSound: Prediction;
-  readonly ifFinding: Prediction;
-  /** Meter's limit of error at this value, in the check's unit; null for words. */
-  readonly limit: number | null;
-  /** Reading less the middle expected if the finding is true, in units of `limit`; null for words, and where a word is expected. */
-  readonly offLimits: number | null;
-  /** The same if all were sound. */
-  readonly offIfSound: number | null;
-  /** Chance of the finding with this reading over its chance without it, the others alike; 1e-6 to 1e6. Null in records of before it was kept. */
-  readonly factor: number | null;
-  /** Chance of the finding, 0..1, had this reading not been taken. Null in records of before it was kept. */
-  readonly without: number | null;
-}
-
-/** Readings that by themselves lead to the same verdict as all of them. */
-export interface Carrying {
-  /** Codes of the checks, in the order of the vocabulary. */
-  readonly checks: readonly string[];
-  /** True: no smaller set does. False: none of these can be left out, but a smaller set may exist. */
-  readonly smallest: boolean;
-}
-
-/** Part of a hypothesis, or a whole one: everything that agrees with what is stated belongs to it. */
-export interface Possibility { readonly kind?: Kind; readonly pins?: PinAssignment; readonly fault?: Fault }
-
-/** A check that would tell possibilities apart, with what each of them expects of it, in the order they were given. */
-export interface TellingCheck extends NextCheck { readonly reads: readonly Prediction[] }
-
 export interface Standing {
+  /** With `others` they sum to 1. */
   readonly kinds: readonly KindChance[];
+  /** Devices that are not one of the three kinds, likeliest first. Pins, findings and hypotheses hold on the condition that it is none of these. */
+  readonly others: readonly OtherChance[];
+  /** A reading above 30 V a.c. or 60 V d.c.: the check ends there. */
+  readonly overLimit: { readonly check: string; readonly value: number } | null;
   readonly pins: readonly PinsChance[];
   readonly faults: readonly FaultChance[];
   readonly hypotheses: readonly HypothesisChance[];
@@ -194,3 +157,5 @@ export type Assessment =
   | ({ readonly state: "ranked" | "needs-reading" } & Standing)
   | ({ readonly state: "contradictory"; readonly suspects: readonly { readonly check: string; readonly why: string }[] } & Standing)
   | { readonly state: "invalid-input"; readonly code: string; readonly message: string; readonly where: string };
+
+export * from "./explained-types";
