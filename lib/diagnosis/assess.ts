@@ -1,6 +1,7 @@
 import { ALL_CHECKS } from "./checks";
 import type { Candidate } from "./circuit/candidate";
 import { CHECK_INDEX } from "./circuit/predict";
+import { hinted } from "./hints";
 import { candidatesDamp, candidatesForEntry, candidatesForUnknown, candidatesTapped } from "./inference/candidates";
 import { rankChecks } from "./inference/choose";
 import { contradictions, FAR, fitsBadly, misfits } from "./inference/contradiction";
@@ -34,6 +35,11 @@ const MOST_WEIGHED = 16;
  * left out while the usual builds explain the readings well: a damp connector until a verdict is near, a tapped track altogether.
  */
 export function beliefs(setup: Setup, readings: readonly Reading[]): Believed[] {
+  return hinted(measuredBeliefs(setup, readings), readings);
+}
+
+/** The same by what was measured alone. */
+function measuredBeliefs(setup: Setup, readings: readonly Reading[]): Believed[] {
   const meter = setup.meter ?? DEFAULT_METER, observations = observe(readings, meter), usual = usualBeliefs(setup, readings);
   const badly = explainsBadly(usual[0]!, observations, meter);
   if (!badly && !settled(marginals(usual))) return usual;
@@ -58,9 +64,9 @@ function usualBeliefs(setup: Setup, readings: readonly Reading[]): Believed[] {
 
 /** The belief, with the chance that one reading is wrong counted in where it matters: before a verdict, and where something does not fit. */
 function weighed(setup: Setup, readings: readonly Reading[]): Weighed {
-  const meter = setup.meter ?? DEFAULT_METER, observations = observe(readings, meter), believed = beliefs(setup, readings);
+  const meter = setup.meter ?? DEFAULT_METER, observations = observe(readings, meter), believed = measuredBeliefs(setup, readings);
   const far = misfits(believed[0]!, observations, meter), odd = far.some((f) => f > FAR);
-  if (readings.length < 2 || readings.length > MOST_WEIGHED || !(odd || settled(marginals(believed)))) return { believed, slips: observations.map(() => 0) };
+  if (observations.length < 2 || observations.length > MOST_WEIGHED || !(odd || settled(marginals(believed)))) return { believed, slips: observations.map(() => 0) };
   const everything = [...(setup.expect ? candidatesForEntry(setup.expect, setup.experience) : candidatesForUnknown(setup.experience)), ...rareLike(believed[0]!, setup)];
   // Every device there is takes a while to look through: that is done without the reading that fits worst. Without any other, the device stands as identified.
   const worst = odd ? far.indexOf(Math.max(...far)) : -1, { family, pinOf } = believed[0]!.candidate;
@@ -84,8 +90,9 @@ export function assess(setup: Setup, readings: readonly Reading[]): Assessment {
   if (problem) return { state: "invalid-input", ...problem };
   const meter = setup.meter ?? DEFAULT_METER, { believed, slips } = weighed(setup, readings), overLimit = overLimitOf(readings);
   const ranked = overLimit ? [] : rankChecks(setup, readings, believed, meter), worth = ranked.filter((r) => r.gainBits / r.effort >= WORTH_WHILE);
-  const others = othersFor(setup, readings, believed, worth.length === 0), m = besideOthers(marginals(believed), others);
-  const done = worth.length === 0 || settled(m) || others.some(({ p }) => p >= SETTLED);
+  const others = othersFor(setup, readings, believed, worth.length === 0), m = besideOthers(marginals(hinted(believed, readings)), others);
+  // What was only looked at is no ground to end a check.
+  const done = worth.length === 0 || settled(besideOthers(marginals(believed), others)) || others.some(({ p }) => p >= SETTLED);
   const standing = {
     ...m, others, overLimit, done, inseparable: done && m.openFindings.length > 1 && worth.length === 0,
     next: ranked.slice(0, MOST_NEXT).map((r) => nextCheck(r, setup)),
@@ -101,7 +108,7 @@ export function assess(setup: Setup, readings: readonly Reading[]): Assessment {
  */
 function othersFor(setup: Setup, readings: readonly Reading[], believed: readonly Believed[], last: boolean): readonly OtherChance[] {
   const best = believed[0]!, meter = setup.meter ?? DEFAULT_METER, observations = observe(readings, meter);
-  if (readings.length < 2 || !(last || settled(marginals(believed)) || explainsBadly(best, observations, meter))) return [];
+  if (observations.length < 2 || !(last || settled(marginals(believed)) || explainsBadly(best, observations, meter))) return [];
   return othersBeside(best.logWeight - ln(best.p), observations, setup.expect ? 1 - ENTRY_IS_RIGHT : 1).filter(({ p }) => p >= LEAST_OTHER);
 }
 

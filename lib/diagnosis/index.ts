@@ -1,7 +1,7 @@
 /** The only door of the wiring-check engine. Pure: same input, same output, on server and phone. */
 export * from "./types";
 export { faultId } from "./circuit/candidate";
-export { parseCheck, vocabulary } from "./checks";
+export { optionalVocabulary, parseCheck, vocabulary } from "./checks";
 export { DEFAULT_METER, meterLimit, standardUncertainty } from "./meter";
 export { assess } from "./assess";
 export { answerRequest, type Answer, type Refusal } from "./answer";

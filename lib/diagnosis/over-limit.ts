@@ -9,7 +9,8 @@ export const MOST_DC_VOLTS = 60, MOST_AC_VOLTS = 30;
 /** The first reading above the limits, in the order taken, or null. */
 export function overLimitOf(readings: readonly Reading[]): { readonly check: string; readonly value: number } | null {
   for (const [check, value] of readings) {
-    if (typeof value === "number" && parseCheck(check)?.unit === "volt" && Math.abs(value) > MOST_DC_VOLTS) return { check, value };
+    const spec = parseCheck(check), most = spec?.meter === "ac-volts" ? MOST_AC_VOLTS : MOST_DC_VOLTS;
+    if (typeof value === "number" && spec?.unit === "volt" && Math.abs(value) > most) return { check, value };
   }
   return null;
 }

@@ -27,7 +27,12 @@ export type FaultCode = (typeof FAULT_CODES)[number];
 export interface Fault { readonly code: FaultCode; readonly pins?: readonly PinNumber[] }
 
 /** "OL": over range or open. "none": the meter shows no frequency or duty. */
-export type SymbolValue = "OL" | "none" | "smooth" | "jumps" | "still" | "grips" | "loose";
+export type SymbolValue = "OL" | "none" | "smooth" | "jumps" | "still" | "grips" | "loose" | WireColour | FaultMessage;
+/** Letters of IEC 60757 for the colours that wires of devices carry. */
+export const WIRE_COLOURS = ["BK", "BN", "RD", "OG", "YE", "GN", "BU", "VT", "GY", "WH", "PK", "TQ", "GNYE"] as const;
+export type WireColour = (typeof WIRE_COLOURS)[number];
+/** A controller's own fault message: failure mode indicator of SAE J1939-73, 0 to 31. */
+export type FaultMessage = `FMI ${number}`;
 export type ReadingValue = number | SymbolValue;
 export type Reading = readonly [check: string, value: ReadingValue];
 
@@ -64,6 +69,8 @@ export interface Setup {
   readonly meter?: MeterSpec;
   /** Shifts the chances before the first reading; the published ones alone when absent. */
   readonly experience?: Experience;
+  /** Proposes optional readings as well: half way, and AC volts. */
+  readonly proposeOptional?: boolean;
   /** Checks the technician cannot do here; never proposed. */
   readonly excluded?: readonly string[];
   /** State of the machine now, where it is known; else it follows from the readings taken. */
@@ -86,8 +93,8 @@ export interface MeterSpec {
 }
 
 export type Terminal = PinNumber | "gnd" | "battery";
-export type Position = "rest" | "full";
-export type MeterFunction = "ohms" | "dc-volts" | "hertz" | "duty" | "watch" | "grip";
+export type Position = "rest" | "half" | "full";
+export type MeterFunction = "ohms" | "dc-volts" | "ac-volts" | "hertz" | "duty" | "watch" | "grip" | "look";
 
 /** State of the machine a check needs; null where it does not matter. */
 export interface MachineState {
@@ -99,14 +106,16 @@ export interface MachineState {
 /** A check of the vocabulary, taken apart. */
 export interface CheckSpec {
   readonly code: string;
-  /** What the leads touch: the device's own pins, the harness's cavities, wire ends, mated and back-probed, one contact, the battery. */
-  readonly place: "device" | "harness" | "wire" | "loose" | "mated" | "contact" | "battery";
+  /** What the leads touch: the device's own pins, the harness's cavities, wire ends, mated and back-probed, one contact, the battery; or what is looked at: a wire's colour, the controller's display. */
+  readonly place: "device" | "harness" | "wire" | "loose" | "mated" | "contact" | "battery" | "colour" | "controller";
   readonly meter: MeterFunction;
   readonly unit: "ohm" | "volt" | "hertz" | "ratio" | "word";
   readonly red: Terminal;
   readonly black: Terminal;
   readonly position: Position | null;
   readonly state: MachineState;
+  /** Never proposed unless the setup asks for it; may be entered out of turn at any time. */
+  readonly optional: boolean;
   /** Words that may be answered beside, or instead of, a number. */
   readonly words: readonly SymbolValue[];
 }

@@ -70,8 +70,8 @@ export const FAULT_PLACES: Readonly<Record<Family, readonly FaultPlace[]>> = {
 
 interface Parts { family: Family; kind: Kind; pins: PinAssignment; place: FaultPlace; pull: Pull; breakEnd: 0 | 1; running: Running; logPrior: number; tap?: Tap; expect?: Expect }
 
-/** Findings that show on the parted device, and those that leave the parted harness sound. */
-const DEVICE_FAULTS = new Set<FaultCode>(["wiper-open", "track-open"]);
+/** Findings that show on the parted device (a worn track only half way), and those that leave the parted harness sound. */
+const DEVICE_FAULTS = new Set<FaultCode>(["wiper-open", "track-open", "track-worn"]);
 const HARNESS_SOUND = new Set<FaultCode>(["none", "wiper-open", "track-open", "track-worn", "output-dead", "output-stuck-high", "output-stuck-low"]);
 
 /** Builds one candidate; two candidates with the same `hypothesis.id` differ only in what nobody asks about. */

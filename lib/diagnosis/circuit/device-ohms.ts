@@ -37,13 +37,13 @@ function currentThrough(series: number, drop: number, junctions: number): number
   return amperes;
 }
 
-/** Ohms between two roles of the parted device; `position` is 0 at rest, 1 at full travel. Infinity where nothing conducts. */
+/** Ohms between two roles of the parted device; `position` is 0 at rest, 0.5 half way, 1 at full travel. Infinity where nothing conducts. */
 export function deviceOhms(c: Candidate, x: Float64Array, red: number, black: number, position: number): number {
   return c.family === "potentiometer" ? trackOhms(c, x, red, black, position) : electronicOhms(c, x, red, black);
 }
 
 function trackOhms(c: Candidate, x: Float64Array, a: number, b: number, position: number): number {
-  const stands = x[position === 0 ? P.rest : P.full]!, share = wiperShare(c, stands);
+  const stands = position === 0.5 ? 0.5 * (x[P.rest]! + x[P.full]!) : x[position === 0 ? P.rest : P.full]!, share = wiperShare(c, stands);
   const touches = (role: number) => a === role || b === role;
   if (c.code === "wiper-open" && touches(SIGNAL)) return Infinity;
   if (c.code === "track-open" && touches(c.breakEnd)) return Infinity;

@@ -100,3 +100,9 @@ export function candidatesForEntry(expect: Expect, experience?: Experience): rea
 /** The same devices on a damp connector: looked at before a verdict, and where the usual builds do not explain the readings. */
 export const candidatesDamp = remembered(({ expect, experience }: { readonly expect?: Expect; readonly experience?: Experience }): readonly Candidate[] =>
   (expect ? ofEntry({ expect, experience, places: DAMP_PLACES }) : ofUnknown(experience, DAMP_PLACES)));
+
+/** Every way an unknown device may be built, the rare ones too. */
+export const everyCandidateForUnknown = (experience?: Experience): readonly Candidate[] => [...candidatesForUnknown(experience), ...candidatesDamp({ experience })];
+
+/** Every way an entry's device may be built and wired, a damp connector too. */
+export const everyCandidateForEntry = (expect: Expect, experience?: Experience): readonly Candidate[] => [...candidatesForEntry(expect, experience), ...candidatesDamp({ expect, experience })];

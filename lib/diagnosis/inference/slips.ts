@@ -37,7 +37,7 @@ export function weighSlips(poolFor: (left: number) => readonly Candidate[], obs:
     const without = believe(poolFor(i), obs.filter((_, k) => k !== i), meter);
     for (const b of without) {
       if (b.p < LOOKED_INTO) break;
-      const logWeight = b.logWeight + ln(slipChance(o, outlookOf(b, meter)));
+      const logWeight = b.logWeight + ln(slipChance(o, outlookOf(b, meter, o.spec.optional)));
       if (logWeight < best + ln(NEGLIGIBLE)) continue;
       entries.push({ ...b, logWeight });
       from.push(i);

@@ -1,6 +1,6 @@
 import type { CheckSpec, Terminal } from "../types";
 import { between, near, word, type Expected } from "./density";
-import { EVERY_ORDER, grid, GROUND_OHMS, harnessVolts, JUNCTIONS, NO_PULSES, SUPPLY_OHMS, wiringExpects, type OtherFamily } from "./family";
+import { EVERY_ORDER, grid, GROUND_OHMS, harnessVolts, JUNCTIONS, NO_PULSES, STEADY, SUPPLY_OHMS, wiringExpects, type OtherFamily } from "./family";
 
 /**
  * CAN pair: lines high, low and a third (ground, supply or not connected). Source: ISO 11898-2: both lines at 2.5 V when recessive, 120 ohm at each
@@ -27,6 +27,7 @@ function expects(spec: CheckSpec, line: (t: Terminal) => number, s: Setting): Ex
     return [near(0.98, harnessVolts(spec, line, [HIGH, LOW, 2].map((l) => busVolts(l, s))), spec.black === "gnd" ? spreadOf(red, s) : Math.max(spreadOf(red, s), spreadOf(line(spec.black), s)))];
   }
   if (spec.meter === "dc-volts") return [near(0.98, busVolts(red, s), spreadOf(red, s))];
+  if (spec.meter === "ac-volts") return onBus ? [between(0.98, 0, 1.2)] : STEADY;
   if (spec.meter === "watch") return [word(0.9, "still"), word(0.06, "jumps"), word(0.04, "smooth")];
   if (!onBus || s.apart === 0) return NO_PULSES;
   return spec.meter === "hertz" ? [between(0.75, 100, 600_000), word(0.25, "none")] : [between(0.75, 0.05, 0.95), word(0.25, "none")];

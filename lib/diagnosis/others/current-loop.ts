@@ -1,6 +1,6 @@
 import type { CheckSpec, Terminal } from "../types";
 import { between, near, word, type Expected } from "./density";
-import { EVERY_ORDER, grid, harnessVolts, NO_PULSES, SUPPLY_OHMS, wiringExpects, type OtherFamily } from "./family";
+import { EVERY_ORDER, grid, harnessVolts, NO_PULSES, STEADY, SUPPLY_OHMS, wiringExpects, type OtherFamily } from "./family";
 
 /**
  * Two-wire current loop: lines plus, minus and one that is not connected or a shield. The controller feeds plus and reads the
@@ -23,6 +23,7 @@ function expects(spec: CheckSpec, line: (t: Terminal) => number, { supply, shunt
     return red === PLUS ? SUPPLY_OHMS : red === MINUS ? [near(0.98, shunt, 0.05 * shunt)] : [word(0.65, "OL"), between(0.35, 0, 3)];
   }
   if (spec.meter === "dc-volts") return [red === PLUS ? near(0.98, supply, spread) : red === MINUS ? between(0.98, LEAST_AMPERES * shunt, MOST_AMPERES * shunt) : near(0.98, 0, 0.03)];
+  if (spec.meter === "ac-volts") return STEADY;
   if (spec.meter === "watch") return red === MINUS ? [word(0.9, "smooth"), word(0.08, "still"), word(0.02, "jumps")] : [word(0.97, "still"), word(0.03, "smooth")];
   return NO_PULSES;
 }

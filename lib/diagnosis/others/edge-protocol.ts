@@ -1,6 +1,6 @@
 import type { CheckSpec, Terminal } from "../types";
 import { between, near, word, type Expected } from "./density";
-import { EVERY_ORDER, grid, GROUND_OHMS, harnessVolts, JUNCTIONS, NO_PULSES, SUPPLY_OHMS, wiringExpects, type OtherFamily } from "./family";
+import { EVERY_ORDER, grid, GROUND_OHMS, harnessVolts, JUNCTIONS, NO_PULSES, STEADY, SUPPLY_OHMS, wiringExpects, type OtherFamily } from "./family";
 
 /**
  * Digital protocol of falling edges on the signal's wire: lines supply, ground, signal. Source: SAE J2716: tick 3 to 90 microseconds,
@@ -25,6 +25,7 @@ function expects(spec: CheckSpec, line: (t: Terminal) => number, { highShare }: 
   }
   switch (spec.meter) {
     case "dc-volts": return [signal ? near(0.98, highShare * HIGH_VOLTS + (1 - highShare) * LOW_VOLTS, 0.2) : red === SUPPLY ? near(0.98, 5, 0.15) : near(0.98, 0, 0.02)];
+    case "ac-volts": return signal ? [near(0.98, (HIGH_VOLTS - LOW_VOLTS) * Math.sqrt(highShare * (1 - highShare)), 0.4)] : STEADY;
     case "hertz": return signal ? RATE : NO_PULSES;
     case "duty": return signal ? [near(0.95, highShare, 0.02), word(0.05, "none")] : NO_PULSES;
     default: return [word(0.85, "still"), word(0.1, "smooth"), word(0.05, "jumps")];

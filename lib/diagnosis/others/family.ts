@@ -62,4 +62,6 @@ export const SUPPLY_OHMS: Expected = [between(0.85, 300, 200_000), word(0.15, "O
 export const GROUND_OHMS: Expected = [near(0.98, 0.5, 0.3)];
 /** Ohms of unknown electronics, by way of their junctions. */
 export const JUNCTIONS: Expected = [between(0.55, 1000, 60e6), word(0.45, "OL")];
+/** AC volts of a line that stands still. */
+export const STEADY: Expected = [near(0.98, 0, 0.05)];
 export const NO_PULSES: Expected = [word(0.98, "none")];

@@ -14,6 +14,7 @@ function expects(spec: CheckSpec, line: (t: Terminal) => number, { hertz }: Sett
   const live = line(spec.red) === LIVE;
   switch (spec.meter) {
     case "dc-volts": return [near(0.7, 0, 0.05), near(0.28, 0, 0.6)];
+    case "ac-volts": return live ? [between(0.98, 10, 260)] : [between(0.9, 0, 5), between(0.08, 5, 260)];
     case "hertz": return live ? [near(0.95, hertz, 0.12), word(0.05, "none")] : [word(0.7, "none"), near(0.28, hertz, 0.12)];
     case "duty": return live ? [near(0.95, 0.5, 0.02), word(0.05, "none")] : [word(0.7, "none"), near(0.28, 0.5, 0.03)];
     case "watch": return [word(0.97, "still"), word(0.03, "jumps")];
