@@ -7,7 +7,7 @@ import { rankChecks } from "./inference/choose";
 import { contradictions, FAR, fitsBadly, misfits } from "./inference/contradiction";
 import { observe, type Observation } from "./inference/observe";
 import { believe, type Believed } from "./inference/posterior";
-import { mergeBeliefs, strained } from "./inference/seldom";
+import { mergeBeliefs, slipRelief, strained } from "./inference/seldom";
 import { weighSlips, type Weighed } from "./inference/slips";
 import { marginals, type Marginals } from "./inference/standing";
 import { DEFAULT_METER } from "./meter";
@@ -97,7 +97,7 @@ export function assess(setup: Setup, readings: readonly Reading[]): Assessment {
     ...m, others, overLimit, done, inseparable: done && m.openFindings.length > 1 && worth.length === 0,
     next: ranked.slice(0, MOST_NEXT).map((r) => nextCheck(r, setup)),
   };
-  const suspects = overLimit || otherwise(others) ? [] : contradictions(believed[0]!, readings, meter, slips);
+  const suspects = otherwise(others) ? [] : contradictions(believed[0]!, readings, meter, slips);
   if (suspects.length > 0) return { state: "contradictory", suspects, ...standing };
   return { state: readings.length === 0 ? "needs-reading" : "ranked", ...standing };
 }
@@ -109,7 +109,9 @@ export function assess(setup: Setup, readings: readonly Reading[]): Assessment {
 function othersFor(setup: Setup, readings: readonly Reading[], believed: readonly Believed[], last: boolean): readonly OtherChance[] {
   const best = believed[0]!, meter = setup.meter ?? DEFAULT_METER, observations = observe(readings, meter);
   if (observations.length < 2 || !(last || settled(marginals(believed)) || explainsBadly(best, observations, meter))) return [];
-  return othersBeside(best.logWeight - ln(best.p), observations, setup.expect ? 1 - ENTRY_IS_RIGHT : 1).filter(({ p }) => p >= LEAST_OTHER);
+  // With so many readings none was weighed as wrong: the one that fits worst may cost the three kinds no more than a slip does.
+  const relief = observations.length > MOST_WEIGHED ? slipRelief(misfits(best, observations, meter)) : 0;
+  return othersBeside(best.logWeight - ln(best.p) + relief, observations, setup.expect ? 1 - ENTRY_IS_RIGHT : 1).filter(({ p }) => p >= LEAST_OTHER);
 }
 
 const sumOf = (others: readonly OtherChance[]) => others.reduce((sum, { p }) => sum + p, 0);

@@ -130,7 +130,7 @@ export function CheckReport({ check, verdict, outcome }: ReportProps) {
       <Head check={check} verdict={verdict} />
       <Part title="Verdict">
         <p className="mb-3 text-xl leading-snug font-bold print:text-lg">{verdict.sentence}</p>
-        {verdict.refusal ? <Kinds verdict={verdict} /> : <Concluded check={check} verdict={verdict} />}
+        {verdict.refusal ? verdict.refusal.device && <Kinds verdict={verdict} /> : <Concluded check={check} verdict={verdict} />}
       </Part>
       <Open check={check} verdict={verdict} />
       <Part title="Readings and evidence">

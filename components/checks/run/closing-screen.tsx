@@ -40,7 +40,7 @@ export function ClosingScreen({ reason, standing, labels, onVerdict, onCarryOn }
       {several && !standing.inseparable ? <p>More readings could still tell these findings apart.</p> : null}
       {refusal && isDangerous(refusal) ? <ul className="list-disc pl-6">{refusal.next.map((line) => <li key={line}>{line}</li>)}</ul> : <p>Leave the machine safe: power off, test terminals out, connectors mated.</p>}
       <Button tone="main" size="glove" className="w-full text-2xl" onClick={onVerdict}>See the verdict</Button>
-      {enough ? <Button size="glove" className="w-full" onClick={onCarryOn}>Carry on reading</Button> : null}
+      {enough && !(refusal && isDangerous(refusal)) ? <Button size="glove" className="w-full" onClick={onCarryOn}>Carry on reading</Button> : null}
     </section>
   );
 }

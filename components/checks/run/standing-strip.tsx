@@ -29,9 +29,15 @@ function leading({ kinds, others }: Pick<Extract<Assessment, { kinds: unknown }>
   return kind ? { name: kindTitle(kind.kind), chance: kind.p } : null;
 }
 
+/** Nothing is worth believing above the limits. */
+function Stopped() {
+  return <span className="block bg-stop px-1.5 py-1 leading-tight font-bold text-on-stop"><span aria-hidden="true">■ </span>Stop: above the limits of this tool</span>;
+}
+
 /** The standing in one sentence, for the live region. */
 export function standingSentence(assessment: Assessment | null, labels: Labels): string {
   if (!assessment || assessment.state === "invalid-input") return "";
+  if (assessment.overLimit) return "Stop: above the limits of this tool.";
   const kind = leading(assessment), fault = refusalOf(assessment) ? undefined : assessment.faults[0];
   const parts = [
     kind ? `${kind.name} ${chanceWords(kind.chance)}, ${chanceText(kind.chance)}` : null,
@@ -59,8 +65,8 @@ export function StandingStrip({ assessment, working, labels, open, onToggle }: S
       className="grid min-h-glove w-full cursor-pointer grid-cols-[minmax(0,1fr)_auto] items-center gap-3 border-b-2 border-rule bg-paper py-1.5 text-left hover:bg-(--hover)"
     >
       <span className="grid min-w-0 grid-cols-1 gap-1">
-        {kind ? <Line {...kind} /> : <span className="font-bold">Standing</span>}
-        {contradictory ? <Contradiction /> : refusal ? <span>No finding is named for it.</span> : fault ? <Line name={findingHeading(fault, labels)} chance={fault.p} /> : <span>{working ? "Working it out …" : "Nothing is believed yet"}</span>}
+        {standing?.overLimit ? <Stopped /> : kind ? <Line {...kind} /> : <span className="font-bold">Standing</span>}
+        {contradictory ? <Contradiction /> : refusal ? <span>{refusal.device ? "No finding is named for it." : "Take no more readings."}</span> : fault ? <Line name={findingHeading(fault, labels)} chance={fault.p} /> : <span>{working ? "Working it out …" : "Nothing is believed yet"}</span>}
       </span>
       <span className="flex w-12 flex-col items-center text-base font-bold">
         <svg aria-hidden="true" viewBox="0 0 24 14" className={`w-6 ${open ? "rotate-180" : ""}`} fill="none" stroke="currentColor" strokeWidth={3}><path d="M2 2l10 10L22 2" /></svg>

@@ -22,7 +22,7 @@ export function WordKeys({ spec, busy, onWord }: WordKeysProps) {
       {spec.words.map((word) => {
         const said = WORDS[word] ?? { face: word.replace("FMI ", ""), means: colourWords(word) ?? "" };
         return (
-          <Button key={word} size="glove" aria-disabled={busy || undefined} onClick={() => { if (!busy) onWord(word); }} className="w-full flex-col gap-0 py-3">
+          <Button key={word} size="glove" aria-disabled={busy || undefined} onClick={() => { if (!busy) onWord(word); }} className="w-full flex-col gap-0 px-1 py-3 last:nth-[3n+1]:col-span-3 last:nth-[3n+2]:col-span-2">
             <span className="font-mono text-4xl leading-tight">{said.face}</span>
             {said.means ? <span className="text-base leading-tight font-normal">{said.means}</span> : null}
           </Button>

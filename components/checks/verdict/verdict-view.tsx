@@ -135,7 +135,7 @@ function RefusalView({ check, verdict, refusal, actions }: RefusalViewProps) {
       <Cautions lines={verdict.cautions} />
       <div className="grid items-start gap-6 lg:grid-cols-2">
         <Sheet title="What to do next"><RefusalSteps refusal={refusal} /></Sheet>
-        <Sheet title="Kind of device"><KindChances verdict={verdict} /></Sheet>
+        {refusal.device ? <Sheet title="Kind of device"><KindChances verdict={verdict} /></Sheet> : null}
       </div>
       <Sheet title="Readings" id="evidence"><PlainReadings check={check} /></Sheet>
     </div>

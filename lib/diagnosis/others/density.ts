@@ -13,8 +13,12 @@ export const word = (p: number, shown: SymbolValue): Part => ({ p, word: shown }
 export const near = (p: number, at: number, sd: number): Part => ({ p, at, sd });
 export const between = (p: number, from: number, to: number): Part => ({ p, from, to });
 
-/** Least log-chance of a word, and log-density of a number, that is not expected: as for the three kinds (inference/observe.ts). */
-const WORD_FLOOR = -11, STRAY_NUMBER = -13;
+/**
+ * Least log-chance of a word that is not expected, as for the three kinds (inference/observe.ts), and log-density of a number that
+ * is not. These models are so wide that a number beyond all of them contradicts them: with less, one mistyped reading of a usual device,
+ * which costs the three kinds up to a hundred, would be laid at their door.
+ */
+const WORD_FLOOR = -11, STRAY_NUMBER = -60;
 const LOG_ROOT_TWO_PI = 0.5 * ln(2 * Math.PI);
 
 /** Width of a spread at a number on the comparison scale: relative for ohms and hertz. */
