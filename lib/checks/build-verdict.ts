@@ -1,7 +1,8 @@
 import { faultId, type Assessment, type Explanation, type Fault, type FaultChance, type NextCheck, type Standing } from "@/lib/diagnosis";
 import { adviceFor, cautionsFor } from "./advice";
 import type { Labels } from "./check-name";
-import { refusalOf, refusalSentence, shortRefusal, type Refusal } from "./refusal";
+import { refusalOf, shortRefusal, type Refusal } from "./refusal";
+import { refusalSentence, refusalSteps } from "./refusal-advice";
 import type { FindingAdvice, Verdict } from "./verdict";
 import { shortVerdict, SURE, verdictSentence } from "./verdict-sentence";
 
@@ -47,7 +48,7 @@ function adviceOf(open: readonly FaultChance[], labels: Labels): FindingAdvice[]
 /** A verdict that names no finding: pins, findings and evidence all hold on the condition that it is one of the three kinds. */
 function refused(assessment: VerdictInput["assessment"], refusal: Refusal, labels: Labels, engineVersion: string): Verdict {
   return {
-    sentence: refusalSentence(assessment, labels), short: shortRefusal(refusal), state: assessment.state, kinds: assessment.kinds, others: assessment.others, refusal,
+    sentence: refusalSentence(assessment, labels), short: shortRefusal(refusal), state: assessment.state, kinds: assessment.kinds, others: assessment.others, refusal: { ...refusal, next: refusalSteps(refusal) },
     pins: [], faults: [], openFindings: [], inseparable: false, contradictory: false, suspects: [], tellApart: [],
     evidence: [], evidenceFinding: null, explained: [], carrying: null, advice: [], cautions: cautionsFor(null), engineVersion,
   };

@@ -2,7 +2,8 @@ import { describe, expect, it } from "vitest";
 import { OTHER_DEVICES, type Reading } from "@/lib/diagnosis";
 import { DEFERRAL } from "./advice";
 import { judge } from "./judge";
-import { isDangerous, refusalOf, refusalSentence, shortRefusal } from "./refusal";
+import { isDangerous, refusalOf, shortRefusal } from "./refusal";
+import { refusalSentence, refusalSteps } from "./refusal-advice";
 import type { RunStep } from "./run";
 import { verdictColumns } from "./verdict-columns";
 
@@ -12,8 +13,8 @@ const steps = (readings: readonly Reading[]): RunStep[] => readings.map(([check,
 describe("a refusal", () => {
   it.each(OTHER_DEVICES.map((device) => [device]))("of %s says in whole sentences what to do, and who decides", (device) => {
     const refusal = refusalOf({ others: [{ device, p: 0.97 }], overLimit: null })!;
-    for (const line of refusal.next) expect(line).toMatch(/^[A-Z].*\.$/);
-    expect(refusal.next.at(-1)).toBe(DEFERRAL);
+    for (const line of refusalSteps(refusal)) expect(line).toMatch(/^[A-Z].*\.$/);
+    expect(refusalSteps(refusal).at(-1)).toBe(DEFERRAL);
     expect(refusalSentence({ others: [{ device, p: 0.97 }], overLimit: null }, LABELS)).toMatch(/^Not one of the three kinds: it reads like .*\.$/);
     expect(refusalSentence({ others: [{ device, p: 0.8 }], overLimit: null }, LABELS)).toMatch(/^Most likely not/);
     expect(shortRefusal(refusal)).toMatch(/^Not one of the three: [a-zC].*\.$/);
@@ -28,7 +29,7 @@ describe("a refusal", () => {
   it("stops at a reading above the limits, whatever it may be", () => {
     const over = { others: [], overLimit: { check: "volt:mated:2-gnd@rest", value: 72 } };
     expect(refusalSentence(over, LABELS)).toMatch(/^Stop: .*72\sV.*Above 30 V a\.c\. or 60 V d\.c\. this tool ends\.$/);
-    expect(refusalOf(over)?.next.join(" ")).toMatch(/licensed person/);
+    expect(refusalSteps(refusalOf(over)!).join(" ")).toMatch(/licensed person/);
     expect(isDangerous(refusalOf(over)!)).toBe(true);
     expect(isDangerous(refusalOf({ others: [{ device: "can-pair", p: 1 }], overLimit: null })!)).toBe(false);
   });

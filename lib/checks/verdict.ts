@@ -24,7 +24,7 @@ export interface Verdict {
   /** Devices that are none of the three kinds, likeliest first; with the kinds they sum to 1. */
   readonly others: readonly OtherChance[];
   /** Set where the readings speak for none of the three kinds, or one is above the limits: then there are no pins, findings and evidence. */
-  readonly refusal: Refusal | null;
+  readonly refusal: (Refusal & { /** What to do next, in order. */ readonly next: readonly string[] }) | null;
   readonly pins: readonly PinsChance[];
   readonly faults: readonly FaultChance[];
   /** Smallest set of findings holding 95 %, best first. */

@@ -3,14 +3,15 @@ import type { Assessment } from "@/lib/diagnosis";
 import type { Labels } from "@/lib/checks/check-words";
 import { chanceWords } from "@/lib/checks/chance-words";
 import { findingHeading, kindTitle } from "@/lib/checks/finding-words";
-import { isDangerous, refusalOf, refusalSentence } from "@/lib/checks/refusal";
+import { isDangerous, refusalOf, shortRefusal, STOP_NOW } from "@/lib/checks/refusal";
 import { ScreenHeading } from "./screen-heading";
 
 type Standing = Exclude<Assessment, { state: "invalid-input" }>;
 
 function Beliefs({ standing, labels }: { readonly standing: Standing; readonly labels: Labels }) {
   const kind = standing.kinds[0];
-  if (refusalOf(standing)) return <p className="text-lg font-bold">{refusalSentence(standing, labels)}</p>;
+  const refusal = refusalOf(standing);
+  if (refusal) return <p className="text-lg font-bold">{shortRefusal(refusal)}</p>;
   const open = standing.openFindings;
   return (
     <ul className="grid gap-1 text-lg">
@@ -38,7 +39,7 @@ export function ClosingScreen({ reason, standing, labels, onVerdict, onCarryOn }
       <Beliefs standing={standing} labels={labels} />
       {several && standing.inseparable ? <p>These findings read alike with a meter; the verdict names them all.</p> : null}
       {several && !standing.inseparable ? <p>More readings could still tell these findings apart.</p> : null}
-      {refusal && isDangerous(refusal) ? <ul className="list-disc pl-6">{refusal.next.map((line) => <li key={line}>{line}</li>)}</ul> : <p>Leave the machine safe: power off, test terminals out, connectors mated.</p>}
+      {refusal && isDangerous(refusal) ? <ul className="list-disc pl-6">{STOP_NOW.map((line) => <li key={line}>{line}</li>)}</ul> : <p>Leave the machine safe: power off, test terminals out, connectors mated.</p>}
       <Button tone="main" size="glove" className="w-full text-2xl" onClick={onVerdict}>See the verdict</Button>
       {enough && !(refusal && isDangerous(refusal)) ? <Button size="glove" className="w-full" onClick={onCarryOn}>Carry on reading</Button> : null}
     </section>

@@ -28,8 +28,8 @@ function positionTitle(spec: CheckSpec): string {
 function handWords(spec: CheckSpec): string | null {
   if (spec.meter === "watch") return "Move the actuator slowly from rest to full and watch the reading. Nobody near what moves.";
   if (spec.meter === "grip") return "Push a matching test terminal in and pull it out: feel whether the contact grips. Never force a probe tip in.";
-  if (spec.place === "colour") return "The main colour of the wire on the device's side. A weak hint: it never decides by itself.";
-  if (spec.place === "controller") return "The number after FMI on the controller's display or tester. A weak hint: a broken and a shorted wire often give the same.";
+  if (spec.place === "colour") return "The main colour of the wire on the device's side. A weak hint.";
+  if (spec.place === "controller") return "The number after FMI on the controller's display or tester. A weak hint.";
   if (spec.position === "half") return "Hold half way, as near as you can judge. Nobody near what moves.";
   if (spec.position === "full") return "Hold at full travel. Nobody near what moves.";
   if (spec.place === "mated") return "Probe in from behind, along the wire. Never pierce insulation.";

@@ -3,7 +3,7 @@ import { ChanceFigure, chanceText } from "@/components/ui";
 import { chanceWords } from "@/lib/checks/chance-words";
 import type { Labels } from "@/lib/checks/check-words";
 import { findingHeading, kindTitle } from "@/lib/checks/finding-words";
-import { OTHER_SHORT, refusalOf } from "@/lib/checks/refusal";
+import { ABOVE_LIMITS, OTHER_SHORT, refusalOf } from "@/lib/checks/refusal";
 
 interface LineProps { readonly name: string; readonly chance: number }
 
@@ -31,13 +31,13 @@ function leading({ kinds, others }: Pick<Extract<Assessment, { kinds: unknown }>
 
 /** Nothing is worth believing above the limits. */
 function Stopped() {
-  return <span className="block bg-stop px-1.5 py-1 leading-tight font-bold text-on-stop"><span aria-hidden="true">■ </span>Stop: above the limits of this tool</span>;
+  return <span className="block bg-stop px-1.5 py-1 leading-tight font-bold text-on-stop"><span aria-hidden="true">■ </span>{ABOVE_LIMITS}</span>;
 }
 
 /** The standing in one sentence, for the live region. */
 export function standingSentence(assessment: Assessment | null, labels: Labels): string {
   if (!assessment || assessment.state === "invalid-input") return "";
-  if (assessment.overLimit) return "Stop: above the limits of this tool.";
+  if (assessment.overLimit) return ABOVE_LIMITS;
   const kind = leading(assessment), fault = refusalOf(assessment) ? undefined : assessment.faults[0];
   const parts = [
     kind ? `${kind.name} ${chanceWords(kind.chance)}, ${chanceText(kind.chance)}` : null,

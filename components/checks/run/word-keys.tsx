@@ -1,5 +1,4 @@
 import type { CheckSpec, SymbolValue } from "@/lib/diagnosis";
-import { colourWords } from "@/lib/units";
 import { Button } from "@/components/ui";
 
 const WORDS: Readonly<Partial<Record<SymbolValue, { readonly face: string; readonly means: string }>>> = {
@@ -8,6 +7,11 @@ const WORDS: Readonly<Partial<Record<SymbolValue, { readonly face: string; reado
   still: { face: "Still", means: "does not move at all" },
   grips: { face: "Grips", means: "holds the test terminal" },
   loose: { face: "Loose", means: "lets it slide" },
+};
+
+/** Names of the colours; the letters are those of IEC 60757. */
+const COLOURS: Readonly<Partial<Record<SymbolValue, string>>> = {
+  BK: "black", BN: "brown", RD: "red", OG: "orange", YE: "yellow", GN: "green", BU: "blue", VT: "violet", GY: "grey", WH: "white", PK: "pink", TQ: "turquoise", GNYE: "green-and-yellow",
 };
 
 /** More answers than this stand in columns. */
@@ -20,7 +24,7 @@ export function WordKeys({ spec, busy, onWord }: WordKeysProps) {
   return (
     <div role="group" aria-label={spec.meter === "look" ? "What does it show?" : "What did it do?"} className={`grid gap-2 ${spec.words.length > IN_ONE_COLUMN ? "grid-cols-3" : ""}`}>
       {spec.words.map((word) => {
-        const said = WORDS[word] ?? { face: word.replace("FMI ", ""), means: colourWords(word) ?? "" };
+        const said = WORDS[word] ?? { face: word.replace("FMI ", ""), means: COLOURS[word] ?? "" };
         return (
           <Button key={word} size="glove" aria-disabled={busy || undefined} onClick={() => { if (!busy) onWord(word); }} className="w-full flex-col gap-0 px-1 py-3 last:nth-[3n+1]:col-span-3 last:nth-[3n+2]:col-span-2">
             <span className="font-mono text-4xl leading-tight">{said.face}</span>

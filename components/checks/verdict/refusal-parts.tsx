@@ -1,10 +1,10 @@
 import { checkName, readingWords } from "@/lib/checks/check-name";
 import type { CheckView } from "@/lib/checks/check-view";
-import type { Refusal } from "@/lib/checks/refusal";
+import type { Verdict } from "@/lib/checks/verdict";
 import { readingSteps } from "@/lib/checks/run-state";
 
 /** What to do where the check names no finding, in order. */
-export function RefusalSteps({ refusal }: { readonly refusal: Refusal }) {
+export function RefusalSteps({ refusal }: { readonly refusal: NonNullable<Verdict["refusal"]> }) {
   return <ol className="list-decimal space-y-1.5 pl-7 marker:font-mono">{refusal.next.map((line) => <li key={line}>{line}</li>)}</ol>;
 }
 

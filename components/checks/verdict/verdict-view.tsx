@@ -3,7 +3,7 @@ import { Notice, Sheet } from "@/components/ui";
 import { checkName, type Labels } from "@/lib/checks/check-name";
 import type { CheckView } from "@/lib/checks/check-view";
 import { findingHeading } from "@/lib/checks/finding-words";
-import { isDangerous, type Refusal } from "@/lib/checks/refusal";
+import { isDangerous } from "@/lib/checks/refusal";
 import type { Verdict } from "@/lib/checks/verdict";
 import { settledPins } from "@/lib/checks/verdict-sentence";
 import { AdviceList } from "./advice-list";
@@ -124,7 +124,7 @@ export function VerdictView({ check, actions, finding, apart }: VerdictViewProps
   );
 }
 
-interface RefusalViewProps extends Pick<VerdictViewProps, "check" | "actions"> { readonly verdict: Verdict; readonly refusal: Refusal }
+interface RefusalViewProps extends Pick<VerdictViewProps, "check" | "actions"> { readonly verdict: Verdict; readonly refusal: NonNullable<Verdict["refusal"]> }
 
 /** A device that is none of the three, or a reading above the limits: what to do, without pins, findings and evidence. */
 function RefusalView({ check, verdict, refusal, actions }: RefusalViewProps) {
