@@ -5,7 +5,7 @@ import { adviceFor, cautionsFor, DEFERRAL } from "./advice";
 const LABELS = ["A", "B", "C"] as const;
 /** Findings that have a place of their own, by the bench's vocabulary. */
 const PLACED = new Set(["wire-open", "wire-resistive", "short-to-ground", "short-to-battery", "contact-open"]);
-const PAIRED = new Set(["wires-shorted", "wires-swapped"]);
+const PAIRED = new Set(["wires-shorted", "wires-swapped", "connector-damp"]);
 const CASES = FAULT_CODES.map((code): Fault => (PLACED.has(code) ? { code, pins: [2] } : PAIRED.has(code) ? { code, pins: [1, 3] } : { code }));
 
 describe("advice", () => {

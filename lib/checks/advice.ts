@@ -68,6 +68,15 @@ export const ADVICE: Readonly<Record<FaultCode, AdviceLines>> = {
     ],
     prove: ["Both ends parted: ohms between the wires of cavities {at} reads OL.", WIGGLE, CLEAR_CODE],
   },
+  "connector-damp": {
+    next: [
+      POWER_OFF,
+      "Part the connector and look into both halves at cavities {at}: water, green or white salts, a seal that is torn, swollen or missing, an empty cavity without its plug.",
+      "Dry both halves with clean dry air, clean them with the cleaner that the maker allows, and let it dry away before anything is powered.",
+      "Renew the seals, and every terminal that has gone green. Find out where the water came in, or it will come back.",
+    ],
+    prove: ["Both ends parted: ohms between the wires of cavities {at} reads OL.", "Mated again and wetted as it is in service, or a day later: the same reading still holds.", CLEAR_CODE],
+  },
   "wires-swapped": {
     next: [
       POWER_OFF,

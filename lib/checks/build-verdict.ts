@@ -1,6 +1,8 @@
 import { faultId, type Assessment, type Explanation, type Fault, type FaultChance, type NextCheck, type Standing } from "@/lib/diagnosis";
 import { adviceFor, cautionsFor } from "./advice";
 import type { Labels } from "./check-name";
+import { refusalOf, shortRefusal, type Refusal } from "./refusal";
+import { refusalSentence, refusalSteps } from "./refusal-advice";
 import type { FindingAdvice, Verdict } from "./verdict";
 import { shortVerdict, SURE, verdictSentence } from "./verdict-sentence";
 
@@ -47,11 +49,22 @@ function adviceOf(open: readonly FaultChance[], labels: Labels): FindingAdvice[]
   return open.slice(0, MAX_ADVICE).map((finding) => ({ finding, ...adviceFor(finding, labels) }));
 }
 
+/** A verdict that names no finding: pins, findings and evidence all hold on the condition that it is one of the three kinds. */
+function refused(assessment: VerdictInput["assessment"], refusal: Refusal, labels: Labels, engineVersion: string): Verdict {
+  return {
+    sentence: refusalSentence(assessment, labels), short: shortRefusal(refusal), state: assessment.state, kinds: assessment.kinds, others: assessment.others, refusal: { ...refusal, next: refusalSteps(refusal) },
+    pins: [], faults: [], openFindings: [], inseparable: false, contradictory: false, suspects: [], tellApart: [], tellKindsApart: null,
+    evidence: [], evidenceFinding: null, explained: [], carrying: null, advice: [], cautions: cautionsFor(null), engineVersion,
+  };
+}
+
 /**
  * Turns an assessment into what is shown, printed and stored. Pure: no clock, no chance.
  * A contradictory set of readings gets no advice on repairs, only the readings to take again.
  */
 export function buildVerdict({ labels, assessment, explanation, tellApart, tellKindsApart, engineVersion }: VerdictInput): Verdict {
+  const refusal = refusalOf(assessment);
+  if (refusal) return refused(assessment, refusal, labels, engineVersion);
   const contradictory = assessment.state === "contradictory";
   const suspects = contradictory ? assessment.suspects : [];
   const open = assessment.openFindings;
@@ -64,6 +77,8 @@ export function buildVerdict({ labels, assessment, explanation, tellApart, tellK
     short: shortVerdict(open, labels, contradictory),
     state: assessment.state,
     kinds: assessment.kinds,
+    others: assessment.others,
+    refusal: null,
     pins: assessment.pins,
     faults: assessment.faults,
     openFindings: open,

@@ -14,19 +14,22 @@ export interface LeadWords { readonly red: string; readonly black: string }
 
 const PLACE: Record<CheckSpec["place"], string> = {
   device: "device pin", harness: "harness cavity", wire: "harness cavity", loose: "harness cavity",
-  mated: "back of cavity", contact: "harness contact", battery: "",
+  mated: "back of cavity", contact: "harness contact", battery: "", colour: "", controller: "",
 };
 
-/** Where the red and the black lead go, e.g. "device pin 1" and "device pin 2"; null for a grip test, which needs no meter. */
+/** Whether a check needs a meter with two leads: a grip test does not, nor what is only looked at. */
+export const usesLeads = (spec: CheckSpec): boolean => spec.meter !== "grip" && spec.meter !== "look";
+
+/** Where the red and the black lead go, e.g. "device pin 1" and "device pin 2"; null where no lead is used. */
 export function leadWords(spec: CheckSpec, labels: Labels): LeadWords | null {
-  if (spec.meter === "grip") return null;
+  if (!usesLeads(spec)) return null;
   const place = PLACE[spec.place];
   if (spec.place === "wire") return { red: terminal(spec.red, "controller-side cavity for", labels), black: terminal(spec.black, place, labels) };
   return { red: terminal(spec.red, place, labels), black: terminal(spec.black, place, labels) };
 }
 
 const MEASURED: Record<CheckSpec["meter"], string> = {
-  ohms: "Resistance", "dc-volts": "Voltage", hertz: "Frequency", duty: "Duty", watch: "Sweep", grip: "Grip",
+  ohms: "Resistance", "dc-volts": "Voltage", "ac-volts": "AC voltage", hertz: "Frequency", duty: "Duty", watch: "Sweep", grip: "Grip", look: "Seen",
 };
 
 /** What is measured, e.g. "Resistance", "Duty". */
@@ -34,17 +37,21 @@ export function measuredWords(spec: CheckSpec): string {
   return MEASURED[spec.meter];
 }
 
+const POSITION = { rest: "actuator at rest", half: "actuator half way", full: "actuator at full travel" } as const;
+
 /** Actuator position in words, or null when it does not matter. */
 export function positionWords(spec: CheckSpec): string | null {
   if (spec.meter === "watch") return "actuator moved slowly from rest to full";
   if (spec.position === null) return null;
-  return spec.position === "rest" ? "actuator at rest" : "actuator at full travel";
+  return POSITION[spec.position];
 }
 
 function between(spec: CheckSpec, labels: Labels): string {
   const pin = (end: Terminal): string => (end === "gnd" ? "battery negative" : end === "battery" ? "battery positive" : labels[end - 1] ?? "");
   switch (spec.place) {
     case "battery": return "battery";
+    case "colour": return `colour of the wire at ${pin(spec.red)}`;
+    case "controller": return "fault message on the controller's display";
     case "contact": return `harness contact ${pin(spec.red)}`;
     case "wire": return `wire ${pin(spec.red)}, end to end`;
     case "device": return `device pin ${pin(spec.red)} to pin ${pin(spec.black)}`;
@@ -76,6 +83,8 @@ export function meterWords(spec: CheckSpec): { readonly dial: string; readonly r
   switch (spec.meter) {
     case "ohms": return { dial: "Ω", range: "auto or highest" };
     case "dc-volts": return { dial: "V DC", range: "auto or highest" };
+    case "ac-volts": return { dial: "V AC", range: "auto" };
+    case "look": return { dial: "No meter", range: "" };
     case "hertz": return { dial: "Hz", range: "auto" };
     case "duty": return { dial: "% duty", range: "auto" };
     case "watch": return { dial: "V DC", range: "auto; watch it move" };

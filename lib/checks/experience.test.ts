@@ -1,7 +1,7 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
-import { assess, chancesBefore, FAULT_CODES, FINDING_PRIORS, KIND_PRIORS, KINDS, PRIOR_CHECKS, vocabulary, type Experience, type Reading } from "@/lib/diagnosis";
-import { FAMILIES, FAULT_PLACES } from "@/lib/diagnosis/circuit/candidate";
+import { assess, chancesBefore, FAULT_CODES, FINDING_PRIORS, KIND_PRIORS, KINDS, PRIOR_CHECKS, vocabulary, type Experience, type Kind, type Reading } from "@/lib/diagnosis";
+import { DAMP_PLACES, FAMILIES, FAULT_PLACES, type FaultPlace } from "@/lib/diagnosis/circuit/candidate";
 import { barScale, chanceTable, shareWords, shiftWords } from "./chance-rows";
 import { experienceSchema } from "./confirm-schemas";
 import { countOutcomes, NO_EXPERIENCE, ownChecks, sameExperience, tidyExperience } from "./experience";
@@ -85,9 +85,10 @@ describe("what a check may turn out to be", () => {
   it("is every finding of the engine at each of its places, and belongs to the same kinds", () => {
     const offered = OUTCOME_GROUPS.flatMap((group) => group.faults);
     expect(new Set(offered.map((fault) => fault.code))).toEqual(new Set(FAULT_CODES));
+    const placesOf = (kind: Kind): readonly FaultPlace[] => FAMILIES[kind].flatMap((family) => [...FAULT_PLACES[family], ...DAMP_PLACES]);
     for (const code of FAULT_CODES) {
-      for (const kind of KINDS) expect(isOfKind(code, kind), `${code} of ${kind}`).toBe(FAMILIES[kind].some((family) => FAULT_PLACES[family].some((place) => place.code === code)));
-      const places = new Set(KINDS.flatMap((kind) => FAMILIES[kind].flatMap((family) => FAULT_PLACES[family].filter((place) => place.code === code).map((place) => (place.at < 0 ? "none" : place.at2 < 0 ? "one" : "two")))));
+      for (const kind of KINDS) expect(isOfKind(code, kind), `${code} of ${kind}`).toBe(placesOf(kind).some((place) => place.code === code));
+      const places = new Set(KINDS.flatMap((kind) => placesOf(kind).filter((place) => place.code === code).map((place) => (place.at < 0 ? "none" : place.at2 < 0 ? "one" : "two"))));
       expect([...places], code).toEqual([OUTCOMES[code].places]);
     }
   });

@@ -95,8 +95,8 @@ describe("the verdict on a run", () => {
 
   it("leaves the kind open where a shorted signal hides it, and says so", () => {
     const verdict = judge({ setup: { cavityLabels: ["1", "2", "3"] }, steps: steps(SHORTED_SIGNAL) }).verdict;
-    expect(verdict.tellKindsApart).toEqual([]);
-    expect(verdict.sentence).toMatch(/^The wire of cavity 3 \(signal\) is shorted to ground; .* is either an analogue voltage device or a PWM device: no reading with a meter tells these apart\.$/);
+    expect(verdict.tellKindsApart?.map(({ check }) => check)).toEqual(["volt:mated:1-gnd@full", "volt:mated:3-gnd@full"]);
+    expect(verdict.sentence).toMatch(/^The wire of cavity 3 \(signal\) is shorted to ground; .* is either an analogue voltage device or a PWM device, which the readings so far do not tell\.$/);
     expect(verdictColumns(verdict)).toMatchObject({ kind: null, findingCode: "short-to-ground" });
     expect(verdictOf(OPEN_B, POT).tellKindsApart).toBeNull();
     expect(verdictColumns(verdictOf(OPEN_B, POT)).kind).toBe("potentiometer");

@@ -1,7 +1,8 @@
-import { assess, drain, explainSteps, tellApart, vocabulary, type Assessment } from "@/lib/diagnosis";
+import { assess, drain, explainSteps, tellApart, vocabulary, type Assessment, type Explanation } from "@/lib/diagnosis";
 import { AppError } from "@/lib/errors";
 import { buildVerdict, explainedFindings } from "./build-verdict";
 import { inSlices } from "./in-slices";
+import { refusalOf } from "./refusal";
 import type { Run } from "./run";
 import { effectiveReadings, engineSetup } from "./run-state";
 import type { Verdict } from "./verdict";
@@ -12,6 +13,8 @@ export const ENGINE_VERSION = "3";
 
 export interface Judgement { readonly assessment: Exclude<Assessment, { state: "invalid-input" }>; readonly verdict: Verdict }
 
+const NO_EXPLANATION: Explanation = { evidence: [], carrying: null };
+
 function* judgeSteps(run: Pick<Run, "setup" | "steps">): Generator<void, Judgement> {
   const setup = engineSetup(run, vocabulary());
   const readings = effectiveReadings(run.steps);
@@ -19,12 +22,13 @@ function* judgeSteps(run: Pick<Run, "setup" | "steps">): Generator<void, Judgeme
   const assessment = assess(setup, readings);
   if (assessment.state === "invalid-input") throw new AppError(assessment.code, assessment.message, 422, assessment.where);
   yield;
-  const explanation = yield* explainSteps(setup, readings, explainedFindings(assessment));
+  // Reasons are reasons for findings of the three kinds: a refusal has none.
+  const refused = refusalOf(assessment) !== null, explanation = refused ? NO_EXPLANATION : yield* explainSteps(setup, readings, explainedFindings(assessment));
   const open = assessment.openFindings, kinds = openKinds(assessment.kinds), anywhere = { ...setup, excluded: undefined };
   const verdict = buildVerdict({
     labels: run.setup.cavityLabels, assessment, engineVersion: ENGINE_VERSION, explanation,
-    tellApart: open.length > 1 ? tellApart(anywhere, readings, open) : [],
-    tellKindsApart: assessment.state !== "contradictory" && kinds.length > 1 ? tellApart(anywhere, readings, kinds.map(({ kind }) => ({ kind }))) : null,
+    tellApart: open.length > 1 && !refused ? tellApart(anywhere, readings, open) : [],
+    tellKindsApart: assessment.state !== "contradictory" && kinds.length > 1 && !refused ? tellApart(anywhere, readings, kinds.map(({ kind }) => ({ kind }))) : null,
   });
   return { assessment, verdict };
 }

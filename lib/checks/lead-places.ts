@@ -1,9 +1,9 @@
 import { matingHalf } from "@/lib/catalogue/connector-shapes";
 import type { ConnectorShape } from "@/lib/catalogue/entry-data";
 import type { CheckSpec, Terminal } from "@/lib/diagnosis";
-import type { Labels } from "./check-words";
+import { usesLeads, type Labels } from "./check-words";
 
-/** Which face the technician looks at while placing the leads; null for the battery. */
+/** Which face the technician looks at while placing the leads; null for the battery, and where nothing is touched. */
 export interface FaceView {
   /** Laid out as it is seen; null when the connector's shape is not known. */
   readonly shape: ConnectorShape | null;
@@ -20,7 +20,7 @@ function half(shape: ConnectorShape, gender: ConnectorShape["gender"]): Connecto
  * that is how its mating half lies, so the mating half's layout is drawn with the plug's own sockets.
  */
 export function faceView(spec: CheckSpec, shape: ConnectorShape | undefined): FaceView | null {
-  if (spec.place === "battery") return null;
+  if (spec.place === "battery" || spec.place === "colour" || spec.place === "controller") return null;
   const words = {
     device: "device, mating side", harness: "harness, mating side", loose: "harness, mating side", wire: "harness, mating side",
     contact: "harness, mating side", mated: "harness, wire side",
@@ -35,9 +35,9 @@ export function faceView(spec: CheckSpec, shape: ConnectorShape | undefined): Fa
 /** A lead on the face's cavity, or at a place that is not on the face. */
 export interface LeadPlace { readonly cavity: string | null; readonly away: string | null }
 
-/** Where a lead goes with respect to the face; null where no lead is used (a grip test). */
+/** Where a lead goes with respect to the face; null where no lead is used (a grip test, a look). */
 export function leadPlaces(spec: CheckSpec, labels: Labels): { readonly red: LeadPlace; readonly black: LeadPlace } | null {
-  if (spec.meter === "grip") return null;
+  if (!usesLeads(spec)) return null;
   const place = (end: Terminal): LeadPlace => {
     if (end === "gnd") return { cavity: null, away: "battery negative" };
     if (end === "battery") return { cavity: null, away: "battery positive" };

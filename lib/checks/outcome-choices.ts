@@ -12,7 +12,7 @@ export const OUTCOMES: Readonly<Record<FaultCode, Outcome>> = {
   none: { places: "none" },
   "wire-open": { places: "one" }, "wire-resistive": { places: "one" }, "short-to-ground": { places: "one" }, "short-to-battery": { places: "one" },
   "wires-shorted": { places: "two" }, "wires-swapped": { places: "two" },
-  "contact-open": { places: "one" },
+  "contact-open": { places: "one" }, "connector-damp": { places: "two" },
   "supply-missing": { places: "none" }, "pull-missing": { places: "none" },
   "wiper-open": { places: "none", only: ["potentiometer"] }, "track-open": { places: "none", only: ["potentiometer"] }, "track-worn": { places: "none", only: ["potentiometer"] },
   "output-dead": { places: "none", only: ELECTRONIC }, "output-stuck-high": { places: "none", only: ELECTRONIC }, "output-stuck-low": { places: "none", only: ELECTRONIC },
@@ -36,7 +36,7 @@ function atEachPlace(code: FaultCode): readonly Fault[] {
 export const OUTCOME_GROUPS: readonly { readonly title: string; readonly faults: readonly Fault[] }[] = ([
   { title: "Nothing wrong", codes: ["none"] },
   { title: "Wires", codes: ["wire-open", "wire-resistive", "short-to-ground", "short-to-battery", "wires-shorted", "wires-swapped"] },
-  { title: "Connector", codes: ["contact-open"] },
+  { title: "Connector", codes: ["contact-open", "connector-damp"] },
   { title: "Controller", codes: ["supply-missing", "pull-missing"] },
   { title: "Device", codes: ["wiper-open", "track-open", "track-worn", "output-dead", "output-stuck-high", "output-stuck-low"] },
 ] as const satisfies readonly { title: string; codes: readonly FaultCode[] }[]).map(({ title, codes }) => ({ title, faults: codes.flatMap(atEachPlace) }));

@@ -5,7 +5,7 @@ import { nextScreen } from "./run-screen";
 
 const at = "2026-03-02T09:00:00.000Z";
 const cold: RunStep = { id: "01", at, type: "state", deviceParted: true, controllerParted: false, powerOn: false };
-const standing = { kinds: [], pins: [], faults: [], hypotheses: [], openFindings: [], inseparable: false };
+const standing = { kinds: [], pins: [], faults: [], hypotheses: [], openFindings: [], others: [], overLimit: null, inseparable: false };
 const proposing = (check: string | null, done = false): Assessment => ({
   state: "ranked", ...standing, done, next: check === null ? [] : [{ check, why: "It tells most.", gainBits: 1, effort: 1 }],
 });

@@ -74,7 +74,7 @@ export function machineState(steps: readonly RunStep[]): MachineState {
 function sharesObstacle(reason: SkipReason, skipped: CheckSpec, other: CheckSpec): boolean {
   switch (reason) {
     case "no-function-on-meter": return other.meter === skipped.meter;
-    case "cannot-move-actuator": return other.position === "full" || other.meter === "watch";
+    case "cannot-move-actuator": return other.position === "full" || other.position === "half" || other.meter === "watch";
     case "cannot-part-connector":
       return skipped.state.controllerParted === true ? other.state.controllerParted === true : other.state.deviceParted === true;
     case "cannot-reach": case "not-safe-here": case "other": return false;

@@ -22,6 +22,7 @@ function settle(needed: boolean | null, known: boolean | null): boolean {
  * Connectors are parted and mated only with the power off, and power comes on last. Unknown counts as "not there".
  */
 export function transition(known: MachineState, needed: MachineState): Transition | null {
+  if (needed.deviceParted === null && needed.controllerParted === null && needed.powerOn === null) return null;
   const deviceParted = settle(needed.deviceParted, known.deviceParted);
   const controllerParted = settle(needed.controllerParted, known.controllerParted);
   const deviceMoves = known.deviceParted !== deviceParted;

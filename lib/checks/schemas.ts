@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { FAULT_CODES, KINDS } from "@/lib/diagnosis";
+import { FAULT_CODES, KINDS, OTHER_DEVICES, WIRE_COLOURS, type FaultMessage } from "@/lib/diagnosis";
 import { experienceSchema } from "./confirm-schemas";
 import { idSchema, ulidSchema } from "./id-schemas";
 import { SKIP_REASONS } from "./run";
@@ -9,8 +9,10 @@ import { SETUP_PARTS } from "./setup-schema";
 export const MAX_STEPS = 400;
 export const MAX_STEP_BYTES = 64 * 1024;
 
+const faultMessageSchema = z.custom<FaultMessage>((value) => typeof value === "string" && /^FMI (\d|[12]\d|3[01])$/.test(value));
+
 export const readingValueSchema = z.union([
-  z.number(), z.enum(["OL", "none", "smooth", "jumps", "still", "grips", "loose"]),
+  z.number(), z.enum(["OL", "none", "smooth", "jumps", "still", "grips", "loose", ...WIRE_COLOURS]), faultMessageSchema,
 ], "A reading is a number, or one of the words that the check takes.");
 
 const checkCodeSchema = z.string().max(40);
@@ -40,6 +42,7 @@ const faultSchema = z.object({ code: z.enum(FAULT_CODES), pins: z.array(pinSchem
 export const standingSchema = z.object({
   state: z.string().max(40),
   kinds: z.array(z.object({ kind: z.enum(KINDS), p: chance })).max(10),
+  others: z.array(z.object({ device: z.enum(OTHER_DEVICES), p: chance })).max(10).default([]),
   pins: z.array(z.object({ supply: pinSchema, ground: pinSchema, signal: pinSchema, p: chance })).max(6),
   faults: z.array(faultSchema).max(200),
   openFindings: z.array(faultSchema).max(200),

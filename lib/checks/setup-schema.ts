@@ -20,6 +20,7 @@ const expectSchema = z.strictObject({
   tolerancePercent: z.number().min(0).max(100).optional(),
   signalRatio: restFull(share).optional(),
   wiperSeriesOhms: z.number().min(0).max(1e8).optional(),
+  endOhms: z.number().min(0).max(1e8).optional(),
   output: z.enum(["open-collector", "push-pull"]).optional(),
   frequencyHz: z.number().positive().max(1e6).optional(),
   duty: restFull(share).optional(),

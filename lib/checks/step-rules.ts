@@ -14,6 +14,9 @@ const BOUNDS: Readonly<Record<Exclude<CheckSpec["unit"], "word">, { readonly min
   ratio: { min: 0, max: 1, words: "Duty lies between 0 and 100 %." },
 };
 
+/** AC volts are kept beyond 30 V, so that the record shows why the check stopped. */
+const AC_BOUNDS = { min: 0, max: 1000, words: "AC volts lie between 0 and 1000." };
+
 function valueProblem(spec: CheckSpec, value: ReadingValue): StepProblem | null {
   if (typeof value === "string") {
     if (spec.words.includes(value)) return null;
@@ -21,7 +24,7 @@ function valueProblem(spec: CheckSpec, value: ReadingValue): StepProblem | null 
     return { code: "wrong-value", message: `"${value}" is no answer to ${spec.code}; it takes ${takes}.` };
   }
   if (spec.unit === "word") return { code: "wrong-value", message: `${spec.code} takes one of the words ${spec.words.join(", ")}, not a number.` };
-  const bounds = BOUNDS[spec.unit];
+  const bounds = spec.meter === "ac-volts" ? AC_BOUNDS : BOUNDS[spec.unit];
   return value >= bounds.min && value <= bounds.max ? null : { code: "out-of-bounds", message: bounds.words };
 }
 

@@ -7,7 +7,7 @@ const run = { setup: { cavityLabels: ["A", "B", "C"] as const }, steps: [{ id: "
 /** A verdict as version 1 stored it. */
 function oldOne(): StoredVerdict {
   const verdict = judge(run).verdict;
-  return { ...verdict, explained: undefined, carrying: undefined, tellKindsApart: undefined, engineVersion: "1", evidence: verdict.evidence.map(({ check, value, ifSound, ifFinding, limit }) => ({ check, value, ifSound, ifFinding, limit })) };
+  return { ...verdict, explained: undefined, carrying: undefined, tellKindsApart: undefined, others: undefined, refusal: undefined, engineVersion: "1", evidence: verdict.evidence.map(({ check, value, ifSound, ifFinding, limit }) => ({ check, value, ifSound, ifFinding, limit })) };
 }
 
 describe("a stored verdict", () => {
@@ -19,7 +19,7 @@ describe("a stored verdict", () => {
   it("of version 1 stays readable: what it did not keep is unknown, and what it kept is unchanged", () => {
     const old = oldOne(), read = readVerdict(old);
     expect(read?.carrying).toBeNull();
-    expect(read?.tellKindsApart).toBeNull();
+    expect([read?.others, read?.refusal, read?.tellKindsApart]).toEqual([[], null, null]);
     expect(read?.explained).toHaveLength(1);
     expect(read?.explained[0]?.rows[0]).toMatchObject({ check: "volt:battery", factor: null, offLimits: null, ifSound: old.evidence[0]?.ifSound });
     expect(read?.sentence).toBe(old.sentence);

@@ -12,7 +12,7 @@ function standing(change: Partial<Told> = {}): Told {
   const openFindings: readonly FaultChance[] = [{ ...OPEN_WIRE, p: 0.99 }];
   return {
     kinds: [{ kind: "potentiometer", p: 0.99 }, { kind: "pwm", p: 0.01 }], pins: [{ ...PINS, p: 0.99 }],
-    faults: openFindings, openFindings, hypotheses: [], done: true, inseparable: false, kindsInseparable: false, next: [], ...change,
+    faults: openFindings, openFindings, hypotheses: [], others: [], overLimit: null, done: true, inseparable: false, kindsInseparable: false, next: [], ...change,
   };
 }
 const say = (change: Partial<Told> = {}) => verdictSentence(standing(change), LABELS, null);

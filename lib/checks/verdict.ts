@@ -1,4 +1,5 @@
-import type { Carrying, EvidenceRow, Fault, FaultChance, KindChance, NextCheck, PinsChance } from "@/lib/diagnosis";
+import type { Carrying, EvidenceRow, Fault, FaultChance, KindChance, NextCheck, OtherChance, PinsChance } from "@/lib/diagnosis";
+import type { Refusal } from "./refusal";
 
 /** What to do about one finding that is still possible, and how to prove that it was mended. */
 export interface FindingAdvice {
@@ -20,6 +21,10 @@ export interface Verdict {
   readonly short: string;
   readonly state: "ranked" | "needs-reading" | "contradictory";
   readonly kinds: readonly KindChance[];
+  /** Devices that are none of the three kinds, likeliest first; with the kinds they sum to 1. */
+  readonly others: readonly OtherChance[];
+  /** Set where the readings speak for none of the three kinds, or one is above the limits: then there are no pins, findings and evidence. */
+  readonly refusal: (Refusal & { /** What to do next, in order. */ readonly next: readonly string[] }) | null;
   readonly pins: readonly PinsChance[];
   readonly faults: readonly FaultChance[];
   /** Smallest set of findings holding 95 %, best first. */

@@ -8,12 +8,15 @@ export interface Answer {
   readonly kinds: Readonly<Record<Kind, number>>;
   readonly pins: readonly { readonly supply: number; readonly ground: number; readonly signal: number; readonly p: number }[];
   readonly faults: readonly { readonly code: string; readonly pins?: readonly number[]; readonly p: number }[];
+  /** Devices that are none of the three kinds, from a chance of 0.01 on. */
+  readonly others?: readonly { readonly device: string; readonly p: number }[];
   readonly done: boolean;
   readonly next: readonly { readonly check: string; readonly why: string }[];
 }
 export interface Refusal { readonly id?: string; readonly error: { readonly code: string; readonly message: string; readonly where: string } }
 
 const MOST_READINGS = 400;
+const SHOWN_FROM = 0.01;
 const isObject = (v: unknown): v is Record<string, unknown> => typeof v === "object" && v !== null && !Array.isArray(v);
 const share = (v: unknown): v is number => typeof v === "number" && v >= 0 && v <= 1;
 const positive = (v: unknown): v is number => typeof v === "number" && Number.isFinite(v) && v > 0;
@@ -31,7 +34,8 @@ export function answerRequest(request: unknown): Answer | Refusal {
     const a = assess(setup, readings);
     if (a.state === "invalid-input") return { ...id, error: { code: a.code, message: a.message, where: a.where } };
     const kinds = Object.fromEntries(a.kinds.map((k) => [k.kind, k.p])) as Record<Kind, number>;
-    return { ...id, kinds, pins: a.pins, faults: a.faults, done: a.done, next: a.next.map(({ check, why }) => ({ check, why })) };
+    const others = a.others.filter(({ p }) => p >= SHOWN_FROM);
+    return { ...id, kinds, pins: a.pins, faults: a.faults, ...(others.length > 0 ? { others } : {}), done: a.done, next: a.next.map(({ check, why }) => ({ check, why })) };
   } catch (error) {
     if (error instanceof Malformed) return { ...id, error: { code: error.code, message: error.message, where: error.where } };
     throw error;
@@ -56,7 +60,7 @@ function parseExpect(value: unknown): Expect {
   need(KINDS.includes(e.kind as Kind), "entry-kind-unknown", `"kind" is one of ${KINDS.join(", ")}.`, `${where}.kind`);
   need(isObject(e.pins) && ROLES.every((r) => [1, 2, 3].includes((e.pins as Record<string, unknown>)[r] as number)), "entry-pins-malformed", '"pins" names a pin from 1 to 3 for supply, ground and signal.', `${where}.pins`);
   need(e.supplyVolts === "battery" || positive(e.supplyVolts), "entry-supply-malformed", '"supplyVolts" is a number of volts or "battery".', `${where}.supplyVolts`);
-  for (const key of ["totalOhms", "tolerancePercent", "wiperSeriesOhms", "frequencyHz"] as const) need(e[key] === undefined || positive(e[key]) || (key === "wiperSeriesOhms" && e[key] === 0), "entry-number-malformed", `"${key}" is a number above zero.`, `${where}.${key}`);
+  for (const key of ["totalOhms", "tolerancePercent", "wiperSeriesOhms", "endOhms", "frequencyHz"] as const) need(e[key] === undefined || positive(e[key]) || ((key === "wiperSeriesOhms" || key === "endOhms") && e[key] === 0), "entry-number-malformed", `"${key}" is a number above zero.`, `${where}.${key}`);
   need(e.output === undefined || e.output === "open-collector" || e.output === "push-pull", "entry-output-unknown", '"output" is "open-collector" or "push-pull".', `${where}.output`);
   for (const key of ["signalRatio", "duty"] as const) need(e[key] === undefined || isSpan(e[key], share), "entry-span-malformed", `"${key}" takes rest and full from 0 to 1.`, `${where}.${key}`);
   need(e.signalVolts === undefined || isSpan(e.signalVolts, (v): v is number => typeof v === "number" && Number.isFinite(v) && Math.abs(v) <= 100), "entry-span-malformed", '"signalVolts" takes rest and full in volts.', `${where}.signalVolts`);

@@ -1,4 +1,4 @@
-import type { CheckSpec, MachineState, MeterFunction, PinNumber, Position, SymbolValue, Terminal } from "./types";
+import { WIRE_COLOURS, type CheckSpec, type FaultMessage, type MachineState, type MeterFunction, type PinNumber, type Position, type SymbolValue, type Terminal } from "./types";
 
 const PINS = [1, 2, 3] as const satisfies readonly PinNumber[];
 const PAIRS = [[1, 2], [2, 3], [1, 3]] as const satisfies readonly (readonly [PinNumber, PinNumber])[];
@@ -10,17 +10,21 @@ const BOTH_PARTED: MachineState = { deviceParted: true, controllerParted: true, 
 const HARNESS_COLD: MachineState = { deviceParted: true, controllerParted: false, powerOn: false };
 const HARNESS_LIVE: MachineState = { deviceParted: true, controllerParted: false, powerOn: true };
 const MATED_LIVE: MachineState = { deviceParted: false, controllerParted: false, powerOn: true };
+const ANY: MachineState = { deviceParted: null, controllerParted: null, powerOn: null };
 const POWERED: MachineState = { deviceParted: null, controllerParted: null, powerOn: true };
 
-const UNIT = { ohms: "ohm", "dc-volts": "volt", hertz: "hertz", duty: "ratio", watch: "word", grip: "word" } as const satisfies Record<MeterFunction, CheckSpec["unit"]>;
+const UNIT = { ohms: "ohm", "dc-volts": "volt", "ac-volts": "volt", hertz: "hertz", duty: "ratio", watch: "word", grip: "word", look: "word" } as const satisfies Record<MeterFunction, CheckSpec["unit"]>;
 const WORDS: Record<MeterFunction, readonly SymbolValue[]> = {
-  ohms: ["OL"], "dc-volts": [], hertz: ["none"], duty: ["none"], watch: ["smooth", "jumps", "still"], grip: ["grips", "loose"],
+  ohms: ["OL"], "dc-volts": [], "ac-volts": [], hertz: ["none"], duty: ["none"], watch: ["smooth", "jumps", "still"], grip: ["grips", "loose"], look: [],
 };
 
-interface Build { place: CheckSpec["place"]; meter: MeterFunction; red: Terminal; black: Terminal; position?: Position; state: MachineState }
+/** Failure mode indicators run from 0 to 31 (SAE J1939-73). */
+const MESSAGES: readonly FaultMessage[] = Array.from({ length: 32 }, (_, i): FaultMessage => `FMI ${i}`);
+
+interface Build { place: CheckSpec["place"]; meter: MeterFunction; red: Terminal; black: Terminal; position?: Position; state: MachineState; optional?: boolean }
 
 function spec(code: string, b: Build): CheckSpec {
-  return { code, place: b.place, meter: b.meter, unit: UNIT[b.meter], red: b.red, black: b.black, position: b.position ?? null, state: b.state, words: WORDS[b.meter] };
+  return { code, place: b.place, meter: b.meter, unit: UNIT[b.meter], red: b.red, black: b.black, position: b.position ?? null, state: b.state, optional: b.optional ?? false, words: WORDS[b.meter] };
 }
 
 function deviceChecks(): CheckSpec[] {
@@ -55,23 +59,51 @@ function matedChecks(): CheckSpec[] {
   ];
 }
 
-/** Every check a three-pin device can be given, in a fixed order. */
-export const ALL_CHECKS: readonly CheckSpec[] = [
+/**
+ * Readings that nobody is asked for, but that may be at hand: the actuator half way, and the AC part of a pulsing signal,
+ * taken at rest.
+ */
+function optionalChecks(): CheckSpec[] {
+  const mated = (code: string, meter: MeterFunction, red: PinNumber, position: Position) => spec(code, { place: "mated", meter, red, black: "gnd", position, state: MATED_LIVE, optional: true });
+  return [
+    ...PAIRS.flatMap(([a, b]) => [[a, b], [b, a]] as const).map(([red, black]) => spec(`res:device:${red}-${black}@half`, { place: "device", meter: "ohms", red, black, position: "half", state: DEVICE_PARTED, optional: true })),
+    ...PINS.flatMap((a) => [mated(`volt:mated:${a}-gnd@half`, "dc-volts", a, "half"), mated(`duty:mated:${a}@half`, "duty", a, "half")]),
+    ...PINS.map((a) => mated(`ac:mated:${a}`, "ac-volts", a, "rest")),
+  ];
+}
+
+/** Every check that may be proposed to anybody, in a fixed order. */
+const PLANNED: readonly CheckSpec[] = [
   spec("volt:battery", { place: "battery", meter: "dc-volts", red: "battery", black: "gnd", state: POWERED }),
   ...deviceChecks(), ...harnessChecks(), ...matedChecks(),
   ...PINS.map((a) => spec(`fit:contact:${a}`, { place: "contact", meter: "grip", red: a, black: a, state: DEVICE_PARTED })),
   ...wireChecks(),
 ];
 
-const BY_CODE = new Map(ALL_CHECKS.map((c) => [c.code, c]));
+/** What is seen without a meter: weak evidence, weighed apart from the circuits (hints.ts). */
+const HINTS: readonly CheckSpec[] = [
+  ...PINS.map((a): CheckSpec => ({ ...spec(`colour:${a}`, { place: "colour", meter: "look", red: a, black: a, state: ANY, optional: true }), words: WIRE_COLOURS })),
+  { ...spec("fmi:controller", { place: "controller", meter: "look", red: "gnd", black: "gnd", state: ANY, optional: true }), words: MESSAGES },
+];
+
+/** How many of the checks are proposed to anybody: the first ones of the list. */
+export const PLANNED_COUNT = PLANNED.length;
+
+/** Every check that is compared with circuits, the optional ones last. */
+export const ALL_CHECKS: readonly CheckSpec[] = [...PLANNED, ...optionalChecks()];
+
+const BY_CODE = new Map([...ALL_CHECKS, ...HINTS].map((c) => [c.code, c]));
 
 /** The check named by a code such as "res:device:1-2@rest", or null when the vocabulary has no such check. */
 export function parseCheck(code: string): CheckSpec | null {
   return BY_CODE.get(code) ?? null;
 }
 
-/** The checks open to this setup: the whole vocabulary less what cannot be done here. */
-export function vocabulary(setup?: { readonly excluded?: readonly string[] }): readonly CheckSpec[] {
-  const excluded = new Set(setup?.excluded ?? []);
-  return excluded.size === 0 ? ALL_CHECKS : ALL_CHECKS.filter((c) => !excluded.has(c.code));
+/** The checks that may be proposed to this setup: the vocabulary less what cannot be done here. */
+export function vocabulary(setup?: { readonly excluded?: readonly string[]; readonly proposeOptional?: boolean }): readonly CheckSpec[] {
+  const excluded = new Set(setup?.excluded ?? []), open = setup?.proposeOptional ? ALL_CHECKS : PLANNED;
+  return excluded.size === 0 ? open : open.filter((c) => !excluded.has(c.code));
 }
+
+/** Readings that may be entered although nobody is asked for them. */
+export const optionalVocabulary = (): readonly CheckSpec[] => [...ALL_CHECKS.slice(PLANNED_COUNT), ...HINTS];

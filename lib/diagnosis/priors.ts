@@ -1,5 +1,5 @@
 import type { Family, Pull } from "./circuit/parameters";
-import type { Experience, FaultCode, Kind } from "./types";
+import type { Experience, FaultCode, Kind, OtherDevice } from "./types";
 
 /** What is believed of one finding or kind before the first reading, as a share, and where the figure comes from. */
 export interface Prior<Code> { readonly code: Code; readonly share: number; readonly source: string }
@@ -23,6 +23,7 @@ export const FINDING_PRIORS: readonly Prior<FaultCode>[] = [
   { code: "supply-missing", share: 0.05, source: PRACTICE },
   { code: "short-to-battery", share: 0.05, source: CONNECTION },
   { code: "wires-shorted", share: 0.04, source: CONNECTION },
+  { code: "connector-damp", share: 0.002, source: PRACTICE },
   { code: "pull-missing", share: 0.025, source: PRACTICE },
   { code: "track-worn", share: 0.055, source: RESISTOR },
   { code: "wiper-open", share: 0.03, source: RESISTOR },
@@ -37,6 +38,16 @@ export const KIND_PRIORS: readonly Prior<Kind>[] = [
   { code: "potentiometer", share: 0.38, source: PRACTICE },
   { code: "pwm", share: 0.4, source: PRACTICE },
   { code: "voltage", share: 0.22, source: PRACTICE },
+];
+
+/** Devices that are none of the three kinds; about one in seventy is worth the walk (common practice). */
+export const OTHER_PRIORS: readonly Prior<OtherDevice>[] = [
+  { code: "current-loop", share: 0.004, source: PRACTICE },
+  { code: "switch-pnp", share: 0.003, source: PRACTICE },
+  { code: "switch-npn", share: 0.002, source: PRACTICE },
+  { code: "edge-protocol", share: 0.002, source: PRACTICE },
+  { code: "can-pair", share: 0.002, source: PRACTICE },
+  { code: "mains", share: 0.001, source: PRACTICE },
 ];
 
 /** The published chances count as much as this many checks of the workshop's own (common practice; shown with them). */
@@ -61,6 +72,9 @@ export const PULL_SHARE: Readonly<Record<Family, Readonly<Record<Pull, number>>>
   potentiometer: { down: 0.7, up: 0.08, "up-to-supply": 0.22 }, voltage: { down: 0.7, up: 0.08, "up-to-supply": 0.22 },
   "push-pull": { down: 0.9, up: 0.06, "up-to-supply": 0.04 }, "open-collector": { down: 0, up: 0.65, "up-to-supply": 0.35 },
 };
+
+/** Share of potentiometers that have supply or ground at a tap of the track, so that the wiper may travel past it (common practice: few). */
+export const TAPPED_SHARE = 0.02;
 
 /** Chance that the device fitted is the one a catalogue entry names, pins included. */
 export const ENTRY_IS_RIGHT = 0.97;

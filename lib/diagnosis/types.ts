@@ -6,6 +6,10 @@
 export const KINDS = ["potentiometer", "pwm", "voltage"] as const;
 export type Kind = (typeof KINDS)[number];
 
+/** Things found at a connector that are none of the three kinds; they are recognised, not diagnosed. */
+export const OTHER_DEVICES = ["current-loop", "switch-pnp", "switch-npn", "edge-protocol", "can-pair", "mains"] as const;
+export type OtherDevice = (typeof OTHER_DEVICES)[number];
+
 export const ROLES = ["supply", "ground", "signal"] as const;
 export type Role = (typeof ROLES)[number];
 
@@ -13,7 +17,7 @@ export type PinNumber = 1 | 2 | 3;
 export type PinAssignment = Readonly<Record<Role, PinNumber>>;
 
 export const FAULT_CODES = [
-  "none", "wire-open", "wire-resistive", "short-to-ground", "short-to-battery", "wires-shorted", "wires-swapped",
+  "none", "wire-open", "wire-resistive", "short-to-ground", "short-to-battery", "wires-shorted", "wires-swapped", "connector-damp",
   "contact-open", "supply-missing", "pull-missing", "wiper-open", "track-open", "track-worn",
   "output-dead", "output-stuck-high", "output-stuck-low",
 ] as const;
@@ -23,7 +27,12 @@ export type FaultCode = (typeof FAULT_CODES)[number];
 export interface Fault { readonly code: FaultCode; readonly pins?: readonly PinNumber[] }
 
 /** "OL": over range or open. "none": the meter shows no frequency or duty. */
-export type SymbolValue = "OL" | "none" | "smooth" | "jumps" | "still" | "grips" | "loose";
+export type SymbolValue = "OL" | "none" | "smooth" | "jumps" | "still" | "grips" | "loose" | WireColour | FaultMessage;
+/** Letters of IEC 60757 for the colours that wires of devices carry. */
+export const WIRE_COLOURS = ["BK", "BN", "RD", "OG", "YE", "GN", "BU", "VT", "GY", "WH", "PK", "TQ", "GNYE"] as const;
+export type WireColour = (typeof WIRE_COLOURS)[number];
+/** A controller's own fault message: failure mode indicator of SAE J1939-73, 0 to 31. */
+export type FaultMessage = `FMI ${number}`;
 export type ReadingValue = number | SymbolValue;
 export type Reading = readonly [check: string, value: ReadingValue];
 
@@ -38,6 +47,8 @@ export interface Expect {
   /** Share of the supply at the wiper, 0..1, with the actuator at rest and at full travel. */
   readonly signalRatio?: { readonly rest: number; readonly full: number };
   readonly wiperSeriesOhms?: number;
+  /** Resistors in series with the ends of the track, together, ohms; `totalOhms` is then the track without them. */
+  readonly endOhms?: number;
   readonly output?: "open-collector" | "push-pull";
   readonly frequencyHz?: number;
   /** High share of the period, 0..1. */
@@ -58,6 +69,8 @@ export interface Setup {
   readonly meter?: MeterSpec;
   /** Shifts the chances before the first reading; the published ones alone when absent. */
   readonly experience?: Experience;
+  /** Proposes optional readings as well: half way, and AC volts. */
+  readonly proposeOptional?: boolean;
   /** Checks the technician cannot do here; never proposed. */
   readonly excluded?: readonly string[];
   /** State of the machine now, where it is known; else it follows from the readings taken. */
@@ -80,8 +93,8 @@ export interface MeterSpec {
 }
 
 export type Terminal = PinNumber | "gnd" | "battery";
-export type Position = "rest" | "full";
-export type MeterFunction = "ohms" | "dc-volts" | "hertz" | "duty" | "watch" | "grip";
+export type Position = "rest" | "half" | "full";
+export type MeterFunction = "ohms" | "dc-volts" | "ac-volts" | "hertz" | "duty" | "watch" | "grip" | "look";
 
 /** State of the machine a check needs; null where it does not matter. */
 export interface MachineState {
@@ -93,14 +106,16 @@ export interface MachineState {
 /** A check of the vocabulary, taken apart. */
 export interface CheckSpec {
   readonly code: string;
-  /** What the leads touch: the device's own pins, the harness's cavities, wire ends, mated and back-probed, one contact, the battery. */
-  readonly place: "device" | "harness" | "wire" | "loose" | "mated" | "contact" | "battery";
+  /** What the leads touch: the device's own pins, the harness's cavities, wire ends, mated and back-probed, one contact, the battery; or what is looked at: a wire's colour, the controller's display. */
+  readonly place: "device" | "harness" | "wire" | "loose" | "mated" | "contact" | "battery" | "colour" | "controller";
   readonly meter: MeterFunction;
   readonly unit: "ohm" | "volt" | "hertz" | "ratio" | "word";
   readonly red: Terminal;
   readonly black: Terminal;
   readonly position: Position | null;
   readonly state: MachineState;
+  /** Never proposed unless the setup asks for it; may be entered out of turn at any time. */
+  readonly optional: boolean;
   /** Words that may be answered beside, or instead of, a number. */
   readonly words: readonly SymbolValue[];
 }
@@ -115,6 +130,7 @@ export interface Hypothesis {
 }
 
 export interface KindChance { readonly kind: Kind; readonly p: number }
+export interface OtherChance { readonly device: OtherDevice; readonly p: number }
 export interface PinsChance extends PinAssignment { readonly p: number }
 export interface FaultChance extends Fault { readonly p: number }
 export interface HypothesisChance { readonly hypothesis: Hypothesis; readonly p: number }
@@ -128,55 +144,13 @@ export interface NextCheck {
   readonly effort: number;
 }
 
-/** What a hypothesis predicts for one check: a band of numbers, or words with their chances. */
-export interface Prediction {
-  readonly check: string;
-  /** Middle and limits of the number expected (95 %), or null when a word is expected. */
-  readonly number: { readonly low: number; readonly middle: number; readonly high: number } | null;
-  readonly words: readonly { readonly word: SymbolValue; readonly p: number }[];
-}
-
-/** How one reading moved the chances: factor > 1 speaks for, < 1 against (relative to the mean of all still possible). */
-export interface ReadingEffect {
-  readonly check: string;
-  readonly value: ReadingValue;
-  readonly kinds: readonly { readonly kind: Kind; readonly factor: number }[];
-  readonly faults: readonly { readonly fault: Fault; readonly factor: number }[];
-}
-
-export interface EvidenceRow {
-  readonly check: string;
-  readonly value: ReadingValue;
-  readonly ifSound: Prediction;
-  readonly ifFinding: Prediction;
-  /** Meter's limit of error at this value, in the check's unit; null for words. */
-  readonly limit: number | null;
-  /** Reading less the middle expected if the finding is true, in units of `limit`; null for words, and where a word is expected. */
-  readonly offLimits: number | null;
-  /** The same if all were sound. */
-  readonly offIfSound: number | null;
-  /** Chance of the finding with this reading over its chance without it, the others alike; 1e-6 to 1e6. Null in records of before it was kept. */
-  readonly factor: number | null;
-  /** Chance of the finding, 0..1, had this reading not been taken. Null in records of before it was kept. */
-  readonly without: number | null;
-}
-
-/** Readings that by themselves lead to the same verdict as all of them. */
-export interface Carrying {
-  /** Codes of the checks, in the order of the vocabulary. */
-  readonly checks: readonly string[];
-  /** True: no smaller set does. False: none of these can be left out, but a smaller set may exist. */
-  readonly smallest: boolean;
-}
-
-/** Part of a hypothesis, or a whole one: everything that agrees with what is stated belongs to it. */
-export interface Possibility { readonly kind?: Kind; readonly pins?: PinAssignment; readonly fault?: Fault }
-
-/** A check that would tell possibilities apart, with what each of them expects of it, in the order they were given. */
-export interface TellingCheck extends NextCheck { readonly reads: readonly Prediction[] }
-
 export interface Standing {
+  /** With `others` they sum to 1. */
   readonly kinds: readonly KindChance[];
+  /** Devices that are not one of the three kinds, likeliest first. Pins, findings and hypotheses hold on the condition that it is none of these. */
+  readonly others: readonly OtherChance[];
+  /** A reading above 30 V a.c. or 60 V d.c.: the check ends there. */
+  readonly overLimit: { readonly check: string; readonly value: number } | null;
   readonly pins: readonly PinsChance[];
   readonly faults: readonly FaultChance[];
   readonly hypotheses: readonly HypothesisChance[];
@@ -192,3 +166,5 @@ export type Assessment =
   | ({ readonly state: "ranked" | "needs-reading" } & Standing)
   | ({ readonly state: "contradictory"; readonly suspects: readonly { readonly check: string; readonly why: string }[] } & Standing)
   | { readonly state: "invalid-input"; readonly code: string; readonly message: string; readonly where: string };
+
+export * from "./explained-types";

@@ -11,6 +11,8 @@ export function whyText(spec: CheckSpec, labels: readonly string[]): string {
     case "wire": return `Shows whether the wire to cavity ${red} is whole from end to end.`;
     case "loose": return spec.black === "gnd" ? `Shows whether the wire to cavity ${red} touches ground or another line.` : `Shows whether the wires to ${red} and ${black} touch each other.`;
     case "contact": return `Shows whether contact ${red} still grips its terminal.`;
+    case "colour": return `The colour of the wire at ${red} is a weak hint at what the pin is.`;
+    case "controller": return "The controller's own fault message is a weak hint: a broken and a shorted wire often give the same.";
     case "harness": return spec.meter === "ohms" ? `Shows what the controller and wire put on cavity ${red} with the power off.` : spec.black === "gnd" ? `Shows what the controller feeds to cavity ${red}.` : `Shows the volts between cavities ${red} and ${black}.`;
     case "mated": return matedText(spec, red);
   }
@@ -20,8 +22,9 @@ function matedText(spec: CheckSpec, red: string): string {
   switch (spec.meter) {
     case "hertz": return `Shows whether the signal on ${red} pulses: only a pulsed output has a frequency.`;
     case "duty": return `Shows the share of each period that ${red} is high.`;
+    case "ac-volts": return `Shows how much the signal on ${red} swings about its mean.`;
     case "watch": return `Shows whether ${red} follows the actuator, and smoothly.`;
-    default: return `Shows the volts on ${red} with everything connected, actuator ${spec.position === "full" ? "at full travel" : "at rest"}.`;
+    default: return `Shows the volts on ${red} with everything connected, actuator ${spec.position === "full" ? "at full travel" : spec.position === "half" ? "half way" : "at rest"}.`;
   }
 }
 
@@ -37,6 +40,7 @@ export function faultText(fault: Fault, labels: readonly string[]): string {
     case "short-to-ground": return `wire to ${a} shorted to ground`;
     case "short-to-battery": return `wire to ${a} shorted to battery`;
     case "wires-shorted": return `wires to ${a} and ${b} shorted together`;
+    case "connector-damp": return `damp connector: leakage between cavities ${a} and ${b}`;
     case "wires-swapped": return `wires to ${a} and ${b} exchanged`;
     case "contact-open": return `contact ${a} of the connector does not touch`;
     case "supply-missing": return "controller gives no supply";

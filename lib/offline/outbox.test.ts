@@ -39,7 +39,7 @@ describe("flush", () => {
 
   it("says at start and finish which own checks the phone counted in", async () => {
     const experience = { kinds: {}, findings: { none: 2 } };
-    const standing = { state: "ranked", kinds: [], pins: [], faults: [], openFindings: [], done: true, inseparable: false } as const;
+    const standing = { state: "ranked", kinds: [], others: [], pins: [], faults: [], openFindings: [], done: true, inseparable: false } as const;
     const store = memoryStore([run("r1", { setup: { cavityLabels: ["1", "2", "3"], experience }, finish: "asked", standing })], []);
     const bodies: unknown[] = [];
     await flush(store, async (_path, body) => { bodies.push(body); return ok(); }, "p1");

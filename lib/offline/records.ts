@@ -2,7 +2,7 @@ import type { RunSetup, RunStep } from "@/lib/checks/run";
 import type { Assessment, Standing } from "@/lib/diagnosis";
 
 /** The parts of a standing that decide a verdict. */
-export type PhoneStanding = Pick<Standing, "kinds" | "pins" | "faults" | "openFindings" | "done" | "inseparable"> & { readonly state: Assessment["state"] };
+export type PhoneStanding = Pick<Standing, "kinds" | "others" | "pins" | "faults" | "openFindings" | "done" | "inseparable"> & { readonly state: Assessment["state"] };
 
 /** A run as the phone keeps it, under the person who made it: signing out hides it, signing in shows it again. */
 export interface RunRecord {

@@ -75,7 +75,11 @@ export function contactLines(truth: MachineTruth): string[] {
   return ROLES.map((role) => resistor(`c${SHORT[role]}`, `h${SHORT[role]}`, `d${SHORT[role]}`, hits(truth, "contact-open", role) ? OPEN : 0.02));
 }
 
-const share = (truth: MachineTruth, position: Position): number => truth.device.signalRatio?.[position] ?? 0.5;
+/** A value that moves with the actuator; half way lies midway. */
+export const atPosition = (span: { readonly rest: number; readonly full: number } | undefined, position: Position): number | undefined =>
+  (position === "half" ? span && (span.rest + span.full) / 2 : span?.[position]);
+
+const share = (truth: MachineTruth, position: Position): number => atPosition(truth.device.signalRatio, position) ?? 0.5;
 
 function trackLines(truth: MachineTruth, position: Position): string[] {
   const total = truth.device.totalOhms ?? 5000;
@@ -96,7 +100,7 @@ function driveLines(truth: MachineTruth, drive: Drive): string[] {
   const load = resistor("load", "ds", "dg", fedVolts(truth) / 0.006);
   if (drive === "released") return [load];
   if (truth.device.output === "open-collector") return drive === "low" ? [load, resistor("out", "do", "dg", 42)] : [load];
-  const volts = drive === "low" ? 0.05 : drive === "high" ? Math.min(5.1, fedVolts(truth)) - 0.1 : truth.device.signalVolts?.[drive] ?? 2.5;
+  const volts = drive === "low" ? 0.05 : drive === "high" ? Math.min(5.1, fedVolts(truth)) - 0.1 : atPosition(truth.device.signalVolts, drive) ?? 2.5;
   return [load, `Vout drv dg ${volts}`, resistor("out", "drv", "do", 100)];
 }
 

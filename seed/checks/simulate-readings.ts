@@ -1,6 +1,6 @@
 import { type CheckSpec, type MeterSpec, type PinNumber, type Position, type ReadingValue, type Terminal } from "@/lib/diagnosis";
 import { operatingPoint } from "@/tests/support/spice";
-import { contactLines, controllerLines, deviceLines, fedVolts, type Drive, type MachineTruth, node, wireLines } from "./netlist";
+import { atPosition, contactLines, controllerLines, deviceLines, fedVolts, type Drive, type MachineTruth, node, wireLines } from "./netlist";
 
 /** True value of a check before the meter's own error, SI; or a word. */
 export type TrueValue = number | Exclude<ReadingValue, number>;
@@ -61,7 +61,7 @@ async function mated(truth: MachineTruth, pin: PinNumber, position: Position): P
   if (across < Math.min(4.3, 0.85 * fedVolts(truth))) return { mean: await still(null), swing: 0, pulses: false };
   const low = voltsAt(first, at);
   const high = drives[1] ? await still(drives[1]) : low;
-  const duty = drives.length > 1 ? truth.device.duty?.[position] ?? 0.5 : 0;
+  const duty = drives.length > 1 ? atPosition(truth.device.duty, position) ?? 0.5 : 0;
   return { mean: low + duty * (high - low), swing: high - low, pulses: drives.length > 1 };
 }
 
@@ -69,7 +69,7 @@ async function pulse(truth: MachineTruth, spec: CheckSpec, pin: PinNumber, meter
   const position = spec.position ?? "rest";
   const { swing, pulses } = await mated(truth, pin, position);
   if (!pulses || Math.abs(swing) < meter.triggerVolts) return "none";
-  return spec.meter === "hertz" ? truth.device.frequencyHz ?? 500 : truth.device.duty?.[position] ?? 0.5;
+  return spec.meter === "hertz" ? truth.device.frequencyHz ?? 500 : atPosition(truth.device.duty, position) ?? 0.5;
 }
 
 async function sweep(truth: MachineTruth, pin: PinNumber): Promise<TrueValue> {
@@ -100,6 +100,7 @@ export async function trueValue(truth: MachineTruth, spec: CheckSpec, meter: Met
       const volts = await solve([...lines, `${METER} ${red} ${black} 10e6`]);
       return voltsAt(volts, red) - voltsAt(volts, black);
     }
+    case "colour": case "controller": throw new Error(`${spec.code} is no reading of a circuit`);
     case "mated":
       if (spec.meter === "watch") return sweep(truth, pin);
       return spec.meter === "dc-volts" ? (await mated(truth, pin, spec.position ?? "rest")).mean : pulse(truth, spec, pin, meter);

@@ -11,8 +11,8 @@ const CASES = [
   { name: "potentiometer with an open wire", says: NAMED, kind: /potentiometer/i, finding: /wire.*(open|broken)|open.*wire/i },
   { name: "sound PWM sensor", says: NAMED, kind: /PWM/i, finding: /sound|no fault|nothing wrong/i },
   { name: "voltage sensor with a bad joint", says: NAMED, kind: /voltage/i, finding: /joint|resist/i },
-  // With its signal on ground a device shows no output to tell its kind by: the finding is named, the kind is left open.
-  { name: "voltage sensor with a short to ground", says: /^The wire of cavity 3 \(signal\) /, kind: /is either an .+ or a .+: no reading with a meter tells these apart/, finding: /shorted to ground/i },
+  // With its signal on ground a device shows hardly any output to tell its kind by: the finding is sure, the kind is not.
+  { name: "voltage sensor with a short to ground", says: /^Most likely it is /, kind: /voltage/i, finding: /shorted to ground/i },
 ] as const;
 
 /** A screen's sort: what is measured where, without pins and position. */

@@ -31,7 +31,7 @@ const seeds = fc.integer({ min: 0, max: 2 ** 31 });
 const holds = (law: (seed: number) => void, numRuns: number) => fc.assert(fc.property(seeds, law), { numRuns, seed: 2_024 });
 
 function expectSound(a: ReturnType<typeof standing>): void {
-  for (const list of [a.kinds, a.pins, a.faults, a.hypotheses]) {
+  for (const list of [[...a.kinds, ...a.others].sort((x, y) => y.p - x.p), a.pins, a.faults, a.hypotheses]) {
     expect(Math.abs(sum(list) - 1)).toBeLessThan(1e-9);
     for (const { p } of list) expect(p >= 0 && p <= 1).toBe(true);
     list.slice(1).forEach(({ p }, i) => expect(p).toBeLessThanOrEqual(list[i]!.p));

@@ -36,6 +36,8 @@ const CASES: readonly (readonly [string, Expect, readonly Reading[], string])[] 
   ["a wire of 2.2 kohm from end to end", POT, [["res:wire:1", 0.4], ["res:wire:2", 2200], ["res:wire:3", 0.5]], "wire-resistive:2"],
   ["a loose wire at 0.9 ohm to ground", POT, [...WHOLE, ["res:loose:3-gnd", 0.9], ["res:loose:1-gnd", "OL"]], "short-to-ground:3"],
   ["two loose wires 1.1 ohm from each other", OPEN, [...WHOLE, ["res:loose:1-2", 1.1], ["res:loose:2-3", "OL"]], "wires-shorted:1,2"],
+  // Common practice: a wet connector leaks tens of kilohms to a megohm; 120 k from 5 V against 180 k to ground stand at 3 V (divider, computed).
+  ["a pulled-down input that stands at 3 V with the device away", POT, [...FEED, ["volt:harness:3-gnd", 3], ["res:harness:3-gnd", 74_000], ["res:loose:1-3", 121_000], ["res:loose:2-3", "OL"], ...WHOLE], "connector-damp:1,3"],
   ["5 V where ground belongs and none where the supply does", POT, [["volt:harness:1-gnd", 0.001], ["volt:harness:2-gnd", 5.01], ["res:harness:1-gnd", 0.6], ...CLEAR.slice(0, 2)], "wires-swapped:1,2"],
   ["supply at the cavity, none in the device, a loose grip", POT, [...FEED, ["volt:mated:1-gnd@rest", 5.01], ["volt:mated:3-gnd@rest", 0], ["volt:mated:3-gnd@full", 0], ...TRACK, ["fit:contact:1", "loose"]], "contact-open:1"],
   ["no supply though its wire is whole and clear", POT, [["volt:harness:1-gnd", 0.001], ["volt:harness:2-gnd", 0], ...WHOLE, ...CLEAR, ["res:harness:1-gnd", 7000]], "supply-missing"],

@@ -63,7 +63,7 @@ export function shown(unit: "ohm" | "volt" | "hertz" | "ratio", value: number): 
 }
 
 /** What the meter shows of one check: a word by its chance, else the number with an error evenly inside the meter's limits. */
-function reading(check: ReturnType<typeof vocabulary>[number], p: Predictions, draw: Draw): ReadingValue {
+export function reading(check: ReturnType<typeof vocabulary>[number], p: Predictions, draw: Draw): ReadingValue {
   const i = CHECK_INDEX.get(check.code)!, word = p.word[i]!, luck = draw();
   if (check.meter === "watch") return luck < word ? "still" : luck < word + p.jumps[i]! ? "jumps" : "smooth";
   if (check.meter === "grip") return luck < word ? "loose" : "grips";

@@ -19,6 +19,10 @@ export interface Description {
   readonly supplySource: number; readonly supplyBleed: number; readonly pullOhms: number; readonly railOff: number; readonly batteryOff: number; readonly faultOhms: number;
   readonly track: number; readonly wiper: number; readonly share: readonly [number, number];
   readonly internal: number; readonly leak: number; readonly clamp: number; readonly dropSupply: number; readonly dropSignal: number;
+  /** An input held by a pull-up and a pull-down, ohms, in place of `pull`. */
+  readonly divided?: { readonly up: number; readonly down: number };
+  /** Resistors in series with the supply's and the ground's end of the track, ohms. */
+  readonly ends?: readonly [number, number];
   readonly loadAmperes: number; readonly driveLow: number; readonly high: number;
 }
 
@@ -40,7 +44,7 @@ export function addWires(net: Circuit, d: Description): void {
     if (has("short-to-ground", role)) net.resistor(cavity(role), "0", d.faultOhms);
     if (has("short-to-battery", role)) net.resistor(cavity(role), "battery", d.faultOhms);
   }
-  if (d.fault === "wires-shorted") net.resistor(cavity(d.at[0]!), cavity(d.at[1]!), d.faultOhms);
+  if (d.fault === "wires-shorted" || d.fault === "connector-damp") net.resistor(cavity(d.at[0]!), cavity(d.at[1]!), d.faultOhms);
 }
 
 /** The battery: its volts with the power on; off, the loads of the machine behind it. */
@@ -54,7 +58,10 @@ export function addController(net: Circuit, d: Description, on: boolean): void {
   if (on && d.fault !== "supply-missing") net.feed("e0", "0", d.fed, d.supplySource);
   else net.resistor("e0", "0", d.supplyBleed);
   net.source("e1", "0", 0);
-  if (d.fault === "pull-missing") net.resistor("e2", "0", INPUT_LEAK);
+  if (d.divided) {
+    net.resistor("e2", "0", d.divided.down);
+    if (on) net.feed("e2", "0", d.rail, d.divided.up); else net.resistor("e2", "0", d.divided.up + d.railOff);
+  } else if (d.fault === "pull-missing") net.resistor("e2", "0", INPUT_LEAK);
   else if (d.pull === "down") net.resistor("e2", "0", d.pullOhms);
   else if (on) net.feed("e2", "0", d.pull === "up" ? d.rail : d.fed, d.pullOhms);
   else net.resistor("e2", "0", d.pullOhms + d.railOff);
@@ -71,8 +78,19 @@ export function addConnector(net: Circuit, d: Description): void {
 export function addPotentiometer(net: Circuit, d: Description, position: 0 | 1): void {
   const broken = d.fault === "track-open" ? d.brokenEnd : -1, share = d.share[position];
   net.hold("w", pin(0), pin(1), pin(2));
-  if (broken !== 0) net.resistor(pin(0), "w", d.track * (1 - share));
-  if (broken !== 1) net.resistor("w", pin(1), d.track * share);
+  if (share < 0 || share > 1) {
+    // The track goes on past the tap; the wiper stands there.
+    net.resistor(pin(0), pin(1), d.track);
+    net.resistor("w", pin(share < 0 ? 1 : 0), d.track * (share < 0 ? -share : share - 1));
+  } else if (d.ends) {
+    net.resistor(pin(0), "a", d.ends[0]);
+    net.resistor("a", "w", d.track * (1 - share));
+    net.resistor("w", "b", d.track * share);
+    net.resistor("b", pin(1), d.ends[1]);
+  } else {
+    if (broken !== 0) net.resistor(pin(0), "w", d.track * (1 - share));
+    if (broken !== 1) net.resistor("w", pin(1), d.track * share);
+  }
   if (d.fault !== "wiper-open") net.resistor("w", pin(2), d.wiper);
 }
 

@@ -1,4 +1,4 @@
-import { vocabulary, type Reading, type ReadingValue } from "@/lib/diagnosis";
+import { optionalVocabulary, vocabulary, type Reading, type ReadingValue } from "@/lib/diagnosis";
 import { pick, type DrawnMachine } from "./draw-machine";
 
 type Draw = () => number;
@@ -28,10 +28,12 @@ function anyValue(check: ReturnType<typeof vocabulary>[number], draw: Draw): Rea
   return draw() < 0.5 ? low + draw() * (high - low) : Math.min(high, 10 ** (12 * draw() - 3));
 }
 
+const EVERY_CHECK = [...vocabulary(), ...optionalVocabulary()];
+
 /** Readings that mean nothing: any check, any value it takes, the same check more than once. */
 export function nonsense(count: number, draw: Draw): Reading[] {
   return Array.from({ length: count }, () => {
-    const check = pick(vocabulary(), draw);
+    const check = pick(EVERY_CHECK, draw);
     return [check.code, anyValue(check, draw)] as const;
   });
 }

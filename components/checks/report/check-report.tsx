@@ -7,12 +7,14 @@ import type { ConfirmationView } from "@/lib/checks/confirmation-view";
 import { momentWords } from "@/lib/checks/date-words";
 import { findingHeading, KIND_TITLES } from "@/lib/checks/finding-words";
 import { alikeKindsWords } from "@/lib/checks/kinds-apart-words";
+import { OTHER_SHORT } from "@/lib/checks/refusal";
 import { effectiveReadings } from "@/lib/checks/run-state";
 import type { Verdict } from "@/lib/checks/verdict";
 import { settledPins } from "@/lib/checks/verdict-sentence";
 import { OutcomeWords } from "../outcome/outcome-words";
 import { AdviceList } from "../verdict/advice-list";
 import { PinsTable } from "../verdict/pins-table";
+import { PlainReadings, RefusalSteps } from "../verdict/refusal-parts";
 import { WiringSketch } from "../verdict/wiring-sketch";
 import { ReportReadings, ReportSkips } from "./report-readings";
 
@@ -75,10 +77,16 @@ function Chances({ check, verdict }: ReportProps) {
   const findings = verdict.faults.filter((fault, index) => index === 0 || fault.p >= 0.01);
   return (
     <>
-      <p><strong>Kind:</strong> {verdict.kinds.map(({ kind, p }) => `${KIND_TITLES[kind]} ${chanceText(p)}`).join("; ")}.</p>
+      <Kinds verdict={verdict} />
       <p className="mt-1"><strong>Finding:</strong> {findings.map((fault) => `${findingHeading(fault, labels)} ${chanceText(fault.p)}`).join("; ")}.</p>
     </>
   );
+}
+
+/** The three kinds, and what else it may be from a chance of 1 % on. */
+function Kinds({ verdict }: { readonly verdict: Verdict }) {
+  const others = verdict.others.filter(({ p }) => p >= 0.01).map(({ device, p }) => `${OTHER_SHORT[device]} ${chanceText(p)}`);
+  return <p><strong>Kind:</strong> {[...others, ...verdict.kinds.map(({ kind, p }) => `${KIND_TITLES[kind]} ${chanceText(p)}`)].join("; ")}.</p>;
 }
 
 function Open({ check, verdict }: ReportProps) {
@@ -116,6 +124,19 @@ function carriedNames(check: CheckView, { carrying }: Verdict): string {
   return ` ${carrying.checks.map((code) => checkName(code, check.setup.cavityLabels)).join("; ")}.`;
 }
 
+/** Chances, drawing and pins. */
+function Concluded({ check, verdict }: ReportProps) {
+  return (
+    <>
+      <Chances check={check} verdict={verdict} />
+      <div className="mt-4 grid items-start gap-6 sm:grid-cols-2 print:grid-cols-2">
+        <WiringSketch labels={check.setup.cavityLabels} pins={settledPins(verdict.pins)} findings={verdict.openFindings} wireColours={check.setup.wireColours} />
+        <PinsTable verdict={verdict} setup={check.setup} captionHidden={false} />
+      </div>
+    </>
+  );
+}
+
 /** The whole record of a finished check for the work order: one column, A4, readable in black and white. */
 export function CheckReport({ check, verdict, outcome }: ReportProps) {
   const labels = check.setup.cavityLabels;
@@ -124,19 +145,16 @@ export function CheckReport({ check, verdict, outcome }: ReportProps) {
       <Head check={check} verdict={verdict} />
       <Part title="Verdict">
         <p className="mb-3 text-xl leading-snug font-bold print:text-lg">{verdict.sentence}</p>
-        <Chances check={check} verdict={verdict} />
-        <div className="mt-4 grid items-start gap-6 sm:grid-cols-2 print:grid-cols-2">
-          <WiringSketch labels={labels} pins={settledPins(verdict.pins)} findings={verdict.openFindings} wireColours={check.setup.wireColours} />
-          <PinsTable verdict={verdict} setup={check.setup} captionHidden={false} />
-        </div>
+        {verdict.refusal ? verdict.refusal.device && <Kinds verdict={verdict} /> : <Concluded check={check} verdict={verdict} />}
       </Part>
       <Open check={check} verdict={verdict} />
       <KindOpen check={check} verdict={verdict} />
       <Part title="Readings and evidence">
         {verdict.carrying ? <p className="mb-3"><strong>{carryingSentence(verdict.carrying, effectiveReadings(check.steps).length)}</strong>{carriedNames(check, verdict)}</p> : null}
-        <ReportReadings check={check} verdict={verdict} />
+        {verdict.refusal ? <PlainReadings check={check} /> : <ReportReadings check={check} verdict={verdict} />}
         <ReportSkips check={check} />
       </Part>
+      {verdict.refusal ? <Part title="What to do next"><RefusalSteps refusal={verdict.refusal} /></Part> : null}
       {verdict.advice.length > 0 ? (
         <>
           <Part title="What to do next"><AdviceList advice={verdict.advice} labels={labels} part="next" /></Part>

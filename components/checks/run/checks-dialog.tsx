@@ -1,6 +1,6 @@
 "use client";
 
-import { vocabulary, type CheckSpec } from "@/lib/diagnosis";
+import { optionalVocabulary, vocabulary, type CheckSpec } from "@/lib/diagnosis";
 import { checkTitle, measuredWords, stateWords, type Labels } from "@/lib/checks/check-words";
 import { Dialog } from "./dialog";
 
@@ -9,7 +9,7 @@ interface Group { readonly name: string; readonly specs: readonly CheckSpec[] }
 function groups(specs: readonly CheckSpec[]): readonly Group[] {
   const byState = new Map<string, CheckSpec[]>();
   for (const spec of specs) {
-    const name = stateWords(spec.state).join(" · ");
+    const name = stateWords(spec.state).join(" · ") || "any state, nothing measured";
     byState.set(name, [...(byState.get(name) ?? []), spec]);
   }
   return [...byState].map(([name, list]) => ({ name, specs: list }));
@@ -42,7 +42,7 @@ export function ChecksDialog({ open, labels, taken, excluded, onClose, onChoose 
   return (
     <Dialog open={open} title="Another reading" onClose={onClose}>
       <p>Take any reading you like. Where the machine must change first, you are told how.</p>
-      {groups(vocabulary()).map((group) => (
+      {groups([...vocabulary(), ...optionalVocabulary()]).map((group) => (
         <details key={group.name} className="border-t-2 border-rule">
           <summary className="flex min-h-glove cursor-pointer items-center gap-3 text-lg font-bold">
             <span aria-hidden="true" className="font-mono text-2xl">+</span>

@@ -3,6 +3,7 @@
 import { Button } from "@/components/ui";
 import type { CheckSpec } from "@/lib/diagnosis";
 import { SKIP_REASONS, type SkipReason } from "@/lib/checks/run";
+import { usesLeads } from "@/lib/checks/check-words";
 import { Dialog } from "./dialog";
 
 const WORDS: Readonly<Record<SkipReason, string>> = {
@@ -18,8 +19,8 @@ const WORDS: Readonly<Record<SkipReason, string>> = {
 export function reasonsFor(spec: CheckSpec): readonly SkipReason[] {
   return SKIP_REASONS.filter((reason) => {
     if (reason === "cannot-part-connector") return spec.state.deviceParted === true || spec.state.controllerParted === true;
-    if (reason === "cannot-move-actuator") return spec.position === "full" || spec.meter === "watch";
-    if (reason === "no-function-on-meter") return spec.meter !== "grip";
+    if (reason === "cannot-move-actuator") return spec.position === "full" || spec.position === "half" || spec.meter === "watch";
+    if (reason === "no-function-on-meter") return usesLeads(spec);
     return true;
   });
 }

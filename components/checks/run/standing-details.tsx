@@ -5,6 +5,7 @@ import { chanceWords } from "@/lib/checks/chance-words";
 import { readingWords } from "@/lib/checks/check-name";
 import { checkWords, type Labels } from "@/lib/checks/check-words";
 import { findingHeading, kindTitle } from "@/lib/checks/finding-words";
+import { OTHER_SHORT } from "@/lib/checks/refusal";
 import type { Explained } from "./use-engine";
 
 /** Below this chance a possibility is counted, not listed. */
@@ -60,6 +61,11 @@ function Effects({ effects, labels }: { readonly effects: readonly ReadingEffect
   return <ol>{effects.map((effect) => <EffectRow key={effect.check} effect={effect} labels={labels} />)}</ol>;
 }
 
+/** The three kinds and whatever else it may be, likeliest first. */
+function kindRows({ kinds, others }: Standing) {
+  return [...kinds.map(({ kind, p }) => ({ name: kindTitle(kind), p })), ...others.map(({ device, p }) => ({ name: `Not one of the three: ${OTHER_SHORT[device]}`, p }))].sort((a, b) => b.p - a.p);
+}
+
 interface StandingDetailsProps {
   readonly standing: Standing;
   readonly labels: Labels;
@@ -75,7 +81,7 @@ export function StandingDetails({ standing, labels, why, effects, evidence }: St
   return (
     <div className="grid gap-6 py-4">
       {why ? <section><h2 className="text-xl font-bold">Why this reading</h2><p>{why}</p></section> : null}
-      <Possibilities title="Kind of device" rows={standing.kinds.map(({ kind, p }) => ({ name: kindTitle(kind), p }))} />
+      <Possibilities title="Kind of device" rows={kindRows(standing)} />
       <Possibilities title="Findings" rows={standing.faults.map((fault) => ({ name: findingHeading(fault, labels), p: fault.p }))} />
       <Possibilities title="Pins" rows={standing.pins.map((pins) => ({ name: `+V ${pin(pins.supply)} \u00b7 0V ${pin(pins.ground)} \u00b7 SIG ${pin(pins.signal)}`, p: pins.p }))} />
       <section>

@@ -30,8 +30,8 @@ const judged = (assessment: Assessment | null) => (assessment && assessment.stat
 function phoneStanding(assessment: Assessment | null): PhoneStanding | undefined {
   const standing = judged(assessment);
   if (!standing) return undefined;
-  const { state, kinds, pins, faults, openFindings, done, inseparable } = standing;
-  return { state, kinds, pins, faults, openFindings, done, inseparable };
+  const { state, kinds, others, pins, faults, openFindings, done, inseparable } = standing;
+  return { state, kinds, others, pins, faults, openFindings, done, inseparable };
 }
 
 /** Asks for the verdict or gives the check up, and leaves for the server's page once the server has answered. */

@@ -1,6 +1,6 @@
 import type { Edge, Node } from "@xyflow/react";
 import type { CheckSpec, Fault, MachineState, PinNumber, Role, Terminal } from "@/lib/diagnosis";
-import type { Labels } from "@/lib/checks/check-words";
+import { usesLeads, type Labels } from "@/lib/checks/check-words";
 
 /** Columns of the three wires and rows of the parts, in drawing units (CSS pixels at natural size). */
 export const COLUMNS = [48, 120, 192] as const;
@@ -64,15 +64,15 @@ export function wiringNodes({ spec, labels, state, roles, finding, deviceName }:
   return [
     part("controller", y.controller, { title: "Controller", pins: [], marked: controllerMarked, below: true }),
     part("plug", y.plug, { title: "", pins: pins([], false), marked: false, below: true }),
-    part("harness", y.harness, { title: "", pins: pins(["contact-open"], false), marked: false, below: false }),
+    part("harness", y.harness, { title: "", pins: pins(["contact-open", "connector-damp"], false), marked: false, below: false }),
     part("device", y.device, { title: deviceName, pins: pins([], true), marked: finding !== null && DEVICE_FAULTS.includes(finding.code), below: false }),
     { id: "positive", type: "post", position: { x: METER_X, y: 0 }, data: { label: "battery +" } },
     { id: "negative", type: "post", position: { x: METER_X, y: y.device + 48 }, data: { label: "battery \u2212" } },
-    ...(spec && spec.meter !== "grip" ? [{ id: "meter", type: "meter", position: { x: METER_X, y: middle - 36 }, data: { dial: DIALS[spec.meter] } } satisfies MeterNode] : []),
+    ...(spec && usesLeads(spec) ? [{ id: "meter", type: "meter", position: { x: METER_X, y: middle - 36 }, data: { dial: DIALS[spec.meter] } } satisfies MeterNode] : []),
   ];
 }
 
-const DIALS: Readonly<Record<CheckSpec["meter"], string>> = { ohms: "\u03a9", "dc-volts": "V DC", hertz: "Hz", duty: "%", watch: "V DC", grip: "" };
+const DIALS: Readonly<Record<CheckSpec["meter"], string>> = { ohms: "\u03a9", "dc-volts": "V DC", hertz: "Hz", duty: "%", watch: "V DC", "ac-volts": "V AC", grip: "", look: "" };
 
 /** Which box of which part a lead touches. */
 function touched(spec: CheckSpec, end: Terminal, lead: "red" | "black"): { readonly node: string; readonly handle: string } {
@@ -84,7 +84,7 @@ function touched(spec: CheckSpec, end: Terminal, lead: "red" | "black"): { reado
 }
 
 function leadEdges(spec: CheckSpec | null): Edge[] {
-  if (!spec || spec.meter === "grip") return [];
+  if (!spec || !usesLeads(spec)) return [];
   return (["red", "black"] as const).map((lead) => {
     const to = touched(spec, spec[lead], lead);
     return {

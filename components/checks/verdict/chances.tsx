@@ -2,6 +2,7 @@ import { ChanceBar } from "@/components/ui";
 import type { Labels } from "@/lib/checks/check-name";
 import { chanceWords } from "@/lib/checks/chance-words";
 import { findingHeading, KIND_TITLES } from "@/lib/checks/finding-words";
+import { OTHER_SHORT } from "@/lib/checks/refusal";
 import type { Verdict } from "@/lib/checks/verdict";
 import { markLetter } from "./wiring-sketch";
 
@@ -13,9 +14,11 @@ function Rest({ count }: { count: number }) {
 }
 
 /** The kinds with their chances, in words and bars. */
-export function KindChances({ kinds }: { kinds: Verdict["kinds"] }) {
+export function KindChances({ verdict: { kinds, others } }: { verdict: Pick<Verdict, "kinds" | "others"> }) {
+  const shown = others.filter(({ p }) => p >= SHOWN_FROM);
   return (
     <div className="grid gap-4">
+      {shown.map(({ device, p }) => <ChanceBar key={device} label={`Not one of the three: ${OTHER_SHORT[device]}`} chance={p} note={chanceWords(p)} />)}
       {kinds.map(({ kind, p }) => <ChanceBar key={kind} label={KIND_TITLES[kind]} chance={p} note={chanceWords(p)} />)}
     </div>
   );

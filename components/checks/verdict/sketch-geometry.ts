@@ -34,7 +34,7 @@ export function findingPoint(fault: Fault, pins: PinAssignment | null): Point | 
     case "none": return null;
     case "wire-open": case "wire-resistive": case "short-to-ground": case "short-to-battery": return { x: MIDDLE, y: at };
     case "wires-shorted": case "wires-swapped": return { x: MIDDLE, y: at };
-    case "contact-open": return { x: SKETCH.gap, y: at };
+    case "contact-open": case "connector-damp": return { x: SKETCH.gap, y: at };
     case "supply-missing": return { x: SKETCH.controller.right, y: places.length > 0 ? at : pins ? wireY(pins.supply) : wireY(2) };
     case "pull-missing": return { x: SKETCH.controller.right, y: places.length > 0 ? at : signal };
     case "wiper-open": case "track-open": case "track-worn": case "output-dead": case "output-stuck-high": case "output-stuck-low":

@@ -38,6 +38,7 @@ function Short({ fault }: { fault: Fault }) {
   if (fault.code === "short-to-ground") return <><path d={`M${x} ${wireY(first)}V${rail}`} strokeDasharray="7 5" /><Ground x={x} y={rail} /></>;
   if (fault.code === "short-to-battery") return <path d={`M${x} ${wireY(first)}V${top - 10}M${x - 6} ${top - 4}L${x} ${top - 14}L${x + 6} ${top - 4}`} strokeDasharray="7 5" />;
   if (fault.code === "wires-shorted" && second !== undefined) return <path d={`M${MID} ${wireY(first)}V${wireY(second)}`} strokeDasharray="7 5" />;
+  if (fault.code === "connector-damp" && second !== undefined) return <path d={`M${SKETCH.gap} ${wireY(first)}V${wireY(second)}`} strokeDasharray="2 6" />;
   return null;
 }
 

@@ -4,12 +4,14 @@ import { checkName, type Labels } from "@/lib/checks/check-name";
 import type { CheckView } from "@/lib/checks/check-view";
 import { findingHeading } from "@/lib/checks/finding-words";
 import { alikeKindsWords } from "@/lib/checks/kinds-apart-words";
+import { isDangerous } from "@/lib/checks/refusal";
 import type { Verdict } from "@/lib/checks/verdict";
 import { settledPins } from "@/lib/checks/verdict-sentence";
 import { AdviceList } from "./advice-list";
 import { FindingChances, KindChances, MarkLetter } from "./chances";
 import { EvidenceSection } from "./evidence-section";
 import { PinsTable } from "./pins-table";
+import { PlainReadings, RefusalSteps } from "./refusal-parts";
 import { VerdictFace } from "./verdict-face";
 import { WiringSketch } from "./wiring-sketch";
 
@@ -25,6 +27,7 @@ interface VerdictViewProps {
 
 function tone(verdict: Verdict): "sound" | "stop" | "plain" {
   const [only, second] = verdict.openFindings;
+  if (verdict.refusal) return isDangerous(verdict.refusal) ? "stop" : "plain";
   if (verdict.contradictory || !only || second) return "plain";
   return only.code === "none" ? "sound" : "stop";
 }
@@ -39,7 +42,7 @@ function Sentence({ verdict }: { verdict: Verdict }) {
         <svg viewBox="0 0 24 24" aria-hidden="true" className="size-6 fill-none stroke-ink [stroke-width:2.5]">
           {kind === "sound" ? <path d="M3 3h18v18H3ZM7 12l4 4 6-8" /> : kind === "stop" ? <path d="M8 2h8l6 6v8l-6 6H8l-6-6V8ZM12 6v8M12 16v2" /> : <path d="M12 3 22 21H2ZM12 10v5M12 17v1.5" />}
         </svg>
-        {verdict.contradictory ? "Contradictory" : STATE_WORDS[kind]}
+        {verdict.refusal ? (kind === "stop" ? "Stop" : "Another device") : verdict.contradictory ? "Contradictory" : STATE_WORDS[kind]}
       </p>
       <p className="balanced mt-2 max-w-[34ch] text-2xl leading-snug font-bold sm:max-w-[52ch] sm:text-3xl">{verdict.sentence}</p>
     </Sheet>
@@ -104,6 +107,7 @@ export function VerdictView({ check, actions, finding, apart }: VerdictViewProps
   const { verdict } = check;
   const labels: Labels = check.setup.cavityLabels;
   if (!verdict) return <Notice tone="plain" title="This check has no verdict yet." />;
+  if (verdict.refusal) return <RefusalView check={check} verdict={verdict} refusal={verdict.refusal} actions={actions} />;
   return (
     <div className="grid gap-6">
       <Sentence verdict={verdict} />
@@ -126,10 +130,28 @@ export function VerdictView({ check, actions, finding, apart }: VerdictViewProps
       ) : null}
       <div className="grid gap-6 lg:grid-cols-2">
         <Sheet title="Findings and their chances"><FindingChances verdict={verdict} labels={labels} /></Sheet>
-        <Sheet title="Kind of device"><KindChances kinds={verdict.kinds} /></Sheet>
+        <Sheet title="Kind of device"><KindChances verdict={verdict} /></Sheet>
       </div>
       <EvidenceSection check={check} verdict={verdict} finding={finding} />
       {apart}
+    </div>
+  );
+}
+
+interface RefusalViewProps extends Pick<VerdictViewProps, "check" | "actions"> { readonly verdict: Verdict; readonly refusal: NonNullable<Verdict["refusal"]> }
+
+/** A device that is none of the three, or a reading above the limits: what to do, without pins, findings and evidence. */
+function RefusalView({ check, verdict, refusal, actions }: RefusalViewProps) {
+  return (
+    <div className="grid gap-6">
+      <Sentence verdict={verdict} />
+      {actions}
+      <Cautions lines={verdict.cautions} />
+      <div className="grid items-start gap-6 lg:grid-cols-2">
+        <Sheet title="What to do next"><RefusalSteps refusal={refusal} /></Sheet>
+        {refusal.device ? <Sheet title="Kind of device"><KindChances verdict={verdict} /></Sheet> : null}
+      </div>
+      <Sheet title="Readings" id="evidence"><PlainReadings check={check} /></Sheet>
     </div>
   );
 }

@@ -37,19 +37,29 @@ function currentThrough(series: number, drop: number, junctions: number): number
   return amperes;
 }
 
-/** Ohms between two roles of the parted device; `position` is 0 at rest, 1 at full travel. Infinity where nothing conducts. */
+/** Ohms between two roles of the parted device; `position` is 0 at rest, 0.5 half way, 1 at full travel. Infinity where nothing conducts. */
 export function deviceOhms(c: Candidate, x: Float64Array, red: number, black: number, position: number): number {
   return c.family === "potentiometer" ? trackOhms(c, x, red, black, position) : electronicOhms(c, x, red, black);
 }
 
 function trackOhms(c: Candidate, x: Float64Array, a: number, b: number, position: number): number {
-  const share = x[position === 0 ? P.rest : P.full]!;
+  const stands = position === 0.5 ? 0.5 * (x[P.rest]! + x[P.full]!) : x[position === 0 ? P.rest : P.full]!, share = wiperShare(c, stands);
   const touches = (role: number) => a === role || b === role;
   if (c.code === "wiper-open" && touches(SIGNAL)) return Infinity;
   if (c.code === "track-open" && touches(c.breakEnd)) return Infinity;
   const track = x[P.track]!;
   if (!touches(SIGNAL)) return track;
-  return x[P.wiper]! + track * (touches(GROUND) ? share : 1 - share);
+  return wiperOhms(c, x, stands) + track * (touches(GROUND) ? share : 1 - share);
+}
+
+/** Where a wiper that stands at `stands` touches the part of the track between supply and ground: a share of it. */
+export function wiperShare(c: Candidate, stands: number): number {
+  return c.tap ? Math.min(1 - 1e-6, Math.max(1e-6, stands)) : stands;
+}
+
+/** Ohms between that place and the signal's pin: the wiper's own and, past a tap, the track up to there. */
+export function wiperOhms(c: Candidate, x: Float64Array, stands: number): number {
+  return x[P.wiper]! + (c.tap ? x[P.track]! * Math.max(0, -stands, stands - 1) : 0);
 }
 
 function electronicOhms(c: Candidate, x: Float64Array, red: number, black: number): number {

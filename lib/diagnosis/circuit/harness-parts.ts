@@ -1,5 +1,5 @@
 import type { CheckSpec, PinNumber } from "../types";
-import { SIGNAL, type Candidate } from "./candidate";
+import { joinsTwo, SIGNAL, type Candidate } from "./candidate";
 import { terminalFor } from "./controller";
 import { controllerClass } from "./parameters";
 
@@ -57,7 +57,7 @@ export function harnessParts(c: Candidate): readonly HarnessPart[] {
 }
 
 function partsOf(c: Candidate): readonly HarnessPart[] {
-  const touching = c.code === "wires-shorted" ? pinsOf(c, -1) : 0;
+  const touching = joinsTwo(c.code) ? pinsOf(c, -1) : 0;
   return SCOPES.flatMap(({ pins, apart }, scope): HarnessPart[] => {
     const held = ([1, 2, 3] as const).filter((pin) => pins & bit(pin));
     if (apart) return pins === touching ? [] : [{ scope, key: `apart ${scope}` }];

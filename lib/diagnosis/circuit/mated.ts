@@ -1,7 +1,7 @@
 import { NodalNetwork, THERMAL_VOLTS } from "../network/solve";
-import { GROUND, SIGNAL, SUPPLY, type Candidate } from "./candidate";
+import { GROUND, joinsTwo, SIGNAL, SUPPLY, type Candidate } from "./candidate";
 import { cavity, supplyVolts, WIRE_OHMS_SPREAD, type Thevenin } from "./controller";
-import { DROP_AMPERES, EMISSION } from "./device-ohms";
+import { DROP_AMPERES, EMISSION, wiperOhms, wiperShare } from "./device-ohms";
 import { P } from "./parameters";
 import { exp } from "../numerics";
 
@@ -70,7 +70,7 @@ function stampHarness(c: Candidate, x: Float64Array, inside: number): void {
     fedSiemens[role] = 1 / scratch.ohms;
     net.resistor(role + 1, 0, METER_OHMS);
   }
-  if (c.code === "wires-shorted") net.resistor(c.at + 1, c.at2 + 1, x[P.fault]!);
+  if (joinsTwo(c.code)) net.resistor(c.at + 1, c.at2 + 1, x[P.fault]!);
 }
 
 /** Both positions of the actuator; rest is the first bit, full travel the second. */
@@ -101,13 +101,13 @@ function solvePotentiometer(c: Candidate, x: Float64Array, out: MatedVolts, posi
   const track = x[P.track]!;
   for (let position = 0; position < 2; position++) {
     if (!(positions & (position + 1))) continue;
-    const share = x[position === 0 ? P.rest : P.full]!;
+    const stands = x[position === 0 ? P.rest : P.full]!, share = wiperShare(c, stands);
     stampHarness(c, x, 1);
     const wiper = firstInside(c);
     const broken = c.code === "track-open" ? c.breakEnd : -1;
     if (broken !== SUPPLY) net.resistor(pinNode(c, SUPPLY), wiper, track * (1 - share));
     if (broken !== GROUND) net.resistor(wiper, pinNode(c, GROUND), track * share);
-    if (c.code !== "wiper-open") net.resistor(wiper, pinNode(c, SIGNAL), x[P.wiper]!);
+    if (c.code !== "wiper-open") net.resistor(wiper, pinNode(c, SIGNAL), wiperOhms(c, x, stands));
     net.solve();
     keep(out, position);
   }

@@ -62,9 +62,9 @@ class RangeBuilder {
   }
 }
 
-/** Ohms of a fault, where it has any: middle and factor. Common practice: joints corrode over decades of ohms, shorts are near 1 ohm. */
+/** Ohms of a fault, where it has any: middle and factor. Common practice: joints corrode over decades of ohms, shorts are near 1 ohm, a wet connector leaks 10 k to 1 M. */
 const FAULT_OHMS: Partial<Record<FaultCode, readonly [number, number]>> = {
-  "wire-resistive": [1500, 6.5], "short-to-ground": [0.8, 2.3], "short-to-battery": [0.8, 2.3], "wires-shorted": [1, 2.2],
+  "wire-resistive": [1500, 6.5], "short-to-ground": [0.8, 2.3], "short-to-battery": [0.8, 2.3], "wires-shorted": [1, 2.2], "connector-damp": [100_000, 3],
 };
 
 /** Ranges for one way the machine may be built; `expect` narrows what a catalogue entry states. */
@@ -83,6 +83,18 @@ export function controllerClass({ family }: { readonly family: Family }): string
   return family === "open-collector" || family === "push-pull" ? family : "analogue";
 }
 
+/** Which role's pin goes to a tap of the track (0 supply, 1 ground), and in which position the wiper stands past it (0 rest, 1 full travel). */
+export interface Tap { readonly role: 0 | 1; readonly position: 0 | 1 }
+
+/** The same for a potentiometer with a tap: the wiper stands past it by some part of the track between supply and ground. */
+export function tappedRanges(pull: Pull, fault: FaultCode, tap: Tap): Ranges {
+  const r = rangesFor("potentiometer", pull, fault), place = tap.position === 0 ? P.rest : P.full;
+  r.mean[place] = tap.role === 1 ? -0.5 : 1.5;
+  r.sd[place] = 0.4;
+  r.scale[place] = STRAIGHT;
+  return r;
+}
+
 function controllerRanges(r: RangeBuilder, family: Family, pull: Pull, expect?: Expect): void {
   const volts = expect?.supplyVolts;
   r.ratio(P.battery, 18, 1.7);
@@ -96,7 +108,7 @@ function controllerRanges(r: RangeBuilder, family: Family, pull: Pull, expect?: 
 
 function potentiometerRanges(r: RangeBuilder, expect?: Expect): void {
   const e = expect?.kind === "potentiometer" ? expect : undefined;
-  if (e?.totalOhms) r.ratio(P.track, e.totalOhms, 1 + (e.tolerancePercent ?? 20) / 100 / Math.sqrt(2)); else r.ratio(P.track, 4000, 3);
+  if (e?.totalOhms) r.ratio(P.track, e.totalOhms + (e.endOhms ?? 0), 1 + (e.tolerancePercent ?? 20) / 100 / Math.sqrt(2)); else r.ratio(P.track, 4000, 3);
   // The wiper's own contact adds some tens of ohms to any resistor in series with it.
   if (e) r.ratio(P.wiper, (e.wiperSeriesOhms ?? 0) + 50, e.wiperSeriesOhms ? 1.12 : 1.8); else r.ratio(P.wiper, 200, 4.5);
   r.share(P.rest, e?.signalRatio?.rest ?? null, 0.013).share(P.full, e?.signalRatio?.full ?? null, 0.013);
@@ -104,7 +116,7 @@ function potentiometerRanges(r: RangeBuilder, expect?: Expect): void {
 
 function electronicRanges(r: RangeBuilder, family: Exclude<Family, "potentiometer">, expect?: Expect): void {
   r.ratio(P.internal, 50_000, 2.6).ratio(P.leak, family === "open-collector" ? 1.6e6 : 5e6, 1.9);
-  r.ratio(P.load, 0.006, 1.5).ratio(P.driveLow, 45, 1.6).ratio(P.high, 5.2, 1.25).ratio(P.frequency, expect?.frequencyHz ?? 430, expect?.frequencyHz ? 1.035 : 2.2);
+  r.ratio(P.load, 0.006, 1.5).ratio(P.driveLow, 45, 1.6).ratio(P.high, 6, 1.7).ratio(P.frequency, expect?.frequencyHz ?? 430, expect?.frequencyHz ? 1.035 : 2.2);
   r.straight(P.dropSupply, 0.3, 0.05).straight(P.dropSignal, 0.5, 0.12).ratio(P.clamp, 60, 2.5);
   const { signalVolts: volts, duty } = expect ?? {};
   if (family === "voltage" && volts) r.straight(P.rest, volts.rest, 0.035).straight(P.full, volts.full, 0.035);

@@ -1,10 +1,11 @@
-import { ALL_CHECKS } from "../checks";
+import { ALL_CHECKS, PLANNED_COUNT } from "../checks";
 import { LOOSE_IF_BAD, LOOSE_IF_SOUND } from "../priors";
 import type { CheckSpec } from "../types";
-import { SIGNAL, type Candidate } from "./candidate";
+import { joinsTwo, SIGNAL, type Candidate } from "./candidate";
 import { cavity, looseToGround, parallel, wireOhms, type Thevenin } from "./controller";
 import { deviceOhms } from "./device-ohms";
 import { METER_OHMS, newMatedVolts, pulses, solveMated } from "./mated";
+import { HALF, halfOhmSlack, optionalCheck, WORN_OPEN, wornThere } from "./optional-readings";
 import { P } from "./parameters";
 import { exp, ln, norm } from "../numerics";
 
@@ -16,7 +17,7 @@ export const GROUP = { device: 1, cold: 2, live: 4, mated: 8, wires: 16 } as con
 /** Every group at once. */
 export const ALL_GROUPS = 31;
 
-const GROUP_OF: Readonly<Record<CheckSpec["place"], number>> = { device: GROUP.device, harness: 0, wire: GROUP.wires, loose: GROUP.wires, mated: GROUP.mated, contact: GROUP.wires, battery: GROUP.live };
+const GROUP_OF: Readonly<Record<CheckSpec["place"], number>> = { device: GROUP.device, harness: 0, wire: GROUP.wires, loose: GROUP.wires, mated: GROUP.mated, contact: GROUP.wires, battery: GROUP.live, colour: 0, controller: 0 };
 export const CHECK_GROUP: readonly number[] = ALL_CHECKS.map((c) => GROUP_OF[c.place] || (c.meter === "ohms" ? GROUP.cold : GROUP.live));
 
 /** Predicted outcome of every check for one candidate at one point of its parameters. */
@@ -56,7 +57,7 @@ const here: Thevenin = { volts: 0, ohms: 0 }, there: Thevenin = { volts: 0, ohms
 const mated = newMatedVolts();
 
 interface Item { readonly spec: CheckSpec; readonly index: number; readonly red: number; readonly black: number; readonly full: number }
-const ITEMS: readonly Item[] = ALL_CHECKS.map((spec, index) => ({ spec, index, red: spec.red as number, black: spec.black as number, full: spec.position === "full" ? 1 : 0 }));
+const ITEMS: readonly Item[] = ALL_CHECKS.map((spec, index) => ({ spec, index, red: spec.red as number, black: spec.black as number, full: spec.position === "full" ? 1 : spec.position === "half" ? 0.5 : 0 }));
 
 /** Which checks to predict, sorted by the part of the machine they hang on. */
 export interface Plan {
@@ -73,7 +74,7 @@ export interface Plan {
 }
 
 const REST = 1, FULL = 2;
-const positionBits = (spec: CheckSpec) => (spec.position === "rest" ? REST : spec.position === "full" ? FULL : spec.meter === "watch" ? REST | FULL : 0);
+const positionBits = (spec: CheckSpec) => (spec.position === "rest" ? REST : spec.position === "full" ? FULL : spec.meter === "watch" || spec.optional ? REST | FULL : 0);
 
 /** A plan for the checks of the given places in the vocabulary. */
 export function planFor(indices: readonly number[]): Plan {
@@ -83,8 +84,8 @@ export function planFor(indices: readonly number[]): Plan {
   return { groups, positions, hertz, device: of(GROUP.device), cold: of(GROUP.cold), live: of(GROUP.live), mated: of(GROUP.mated), wires: of(GROUP.wires) };
 }
 
-/** The whole vocabulary. */
-export const WHOLE_PLAN = planFor(ITEMS.map((i) => i.index));
+/** All checks that are proposed to anybody; and with them the optional ones. */
+export const WHOLE_PLAN = planFor(ITEMS.slice(0, PLANNED_COUNT).map((i) => i.index)), WIDEST_PLAN = planFor(ITEMS.map((i) => i.index));
 
 /**
  * Fills `out` for those checks of the plan that are in `groups`. Pure but for `out`; scratch memory is overwritten on every call.
@@ -102,7 +103,8 @@ export function predictInto(c: Candidate, x: Float64Array, plan: Plan, groups: n
 
 function deviceCheck(c: Candidate, x: Float64Array, index: number, red: number, black: number, position: number, out: Predictions): void {
   setOhms(out, index, deviceOhms(c, x, red, black, position));
-  out.slack[index] = c.family === "potentiometer" ? 0 : JUNCTION_OHM_SLACK;
+  out.slack[index] = c.family !== "potentiometer" ? JUNCTION_OHM_SLACK : position === HALF ? halfOhmSlack(c, x, red, black) : 0;
+  if (position === HALF && wornThere(c, red, black)) out.word[index] = WORN_OPEN;
 }
 
 function setOhms(out: Predictions, index: number, ohms: number): void {
@@ -112,7 +114,7 @@ function setOhms(out: Predictions, index: number, ohms: number): void {
 }
 
 /** The partner of a cavity whose wire is shorted to another wire, or -1. */
-const shortedTo = (c: Candidate, role: number) => (c.code !== "wires-shorted" ? -1 : role === c.at ? c.at2 : role === c.at2 ? c.at : -1);
+const shortedTo = (c: Candidate, role: number) => (!joinsTwo(c.code) ? -1 : role === c.at ? c.at2 : role === c.at2 ? c.at : -1);
 
 function joined(c: Candidate, x: Float64Array, role: number, on: boolean, t: Thevenin): void {
   const partner = shortedTo(c, role);
@@ -148,7 +150,7 @@ function voltsBetween(c: Candidate, x: Float64Array, red: number, black: number)
   if (shortedTo(c, red) === black) {
     cavity(c, x, red, true, here);
     cavity(c, x, black, true, there);
-    const short = x[P.fault]!;
+    const short = x[P.fault]! * METER_OHMS / (x[P.fault]! + METER_OHMS);
     return (here.volts - there.volts) * short / (here.ohms + there.ohms + short);
   }
   joined(c, x, red, true, here);
@@ -162,6 +164,7 @@ function matedChecks(c: Candidate, x: Float64Array, plan: Plan, out: Predictions
   out.idle = c.family !== "potentiometer" && mated.running === 0;
   out.logState = c.running === "yes" ? ln(Math.max(mated.running, 1e-4)) : 0;
   for (const k of plan.mated) {
+    if (k.spec.optional) { optionalCheck(c, x, k.spec, k.index, roles[k.red]!, mated, out); continue; }
     const role = roles[k.red]!, place = 3 * k.full + role, volts = mated.volts[place]!;
     if (k.spec.meter === "dc-volts") { out.value[k.index] = volts; out.slack[k.index] = norm(mated.drop[place]!, out.idle && Math.abs(volts) > 0.03 ? IDLE_SLACK * Math.abs(volts) + IDLE_VOLTS : 0); }
     else if (k.spec.meter === "watch") watch(c, role, k.index, out);

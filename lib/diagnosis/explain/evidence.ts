@@ -1,7 +1,8 @@
 import { parseCheck } from "../checks";
 import { faultId, type Candidate } from "../circuit/candidate";
 import { CHECK_INDEX } from "../circuit/predict";
-import { candidatesForEntry, candidatesForUnknown } from "../inference/candidates";
+import { everyCandidateForEntry, everyCandidateForUnknown } from "../inference/candidates";
+import { isHint } from "../hints";
 import { contradictions } from "../inference/contradiction";
 import { observe } from "../inference/observe";
 import { outlookOf } from "../inference/outlook";
@@ -32,9 +33,9 @@ function standIns(setup: Setup, all: readonly Believed[], fault: Fault): readonl
   const id = faultId(fault), has = isOf(id), likeliest = all.find((b) => has(b.candidate));
   const model = (likeliest && chanceOf(all, id) >= POSSIBLE ? likeliest : all[0]!).candidate;
   const alike = (c: Candidate) => c.hypothesis.kind === model.hypothesis.kind && `${c.pinOf}` === `${model.pinOf}`;
-  const byEntry = setup.expect ? candidatesForEntry(setup.expect, setup.experience).filter(has).filter(alike) : [];
+  const byEntry = setup.expect ? everyCandidateForEntry(setup.expect, setup.experience).filter(has).filter(alike) : [];
   if (byEntry.length > 0) return byEntry;
-  const any = candidatesForUnknown(setup.experience).filter(has), near = any.filter(alike);
+  const any = everyCandidateForUnknown(setup.experience).filter(has), near = any.filter(alike);
   return near.length > 0 ? near : any;
 }
 
@@ -44,7 +45,7 @@ function expectedOf(candidates: readonly Candidate[], setup: Setup, others: read
   let held = 0;
   for (const b of believe(candidates, observe(others, meter), meter)) {
     if (pieces.length >= MOST_PIECES || held > 1 - LEFT_OUT) break;
-    pieces.push({ p: b.p, outlook: outlookOf(b, meter) });
+    pieces.push({ p: b.p, outlook: outlookOf(b, meter, parseCheck(check)!.optional) });
     held += b.p;
   }
   return predictionOf(pieces, CHECK_INDEX.get(check)!);
@@ -55,7 +56,7 @@ function expectedOf(candidates: readonly Candidate[], setup: Setup, others: read
  * Returns null for an unknown check or a finding that this device cannot have.
  */
 export function predict(setup: Setup, readings: readonly Reading[], fault: Fault, check: string): Prediction | null {
-  const candidates = parseCheck(check) ? standIns(setup, believedOf(setup, readings), fault) : [];
+  const candidates = parseCheck(check) && !isHint(check) ? standIns(setup, believedOf(setup, readings), fault) : [];
   return candidates.length === 0 ? null : expectedOf(candidates, setup, readings.filter(([c]) => c !== check), check);
 }
 
@@ -78,6 +79,7 @@ export function* evidenceSteps(setup: Setup, readings: readonly Reading[], fault
   if (sound.length === 0 || found.length === 0) return [];
   for (const [i, [check, value]] of readings.entries()) {
     yield;
+    if (isHint(check)) continue;
     const others = readings.filter((_, k) => k !== i);
     const ifSound = expectedOf(sound, setup, others, check), ifFinding = fault.code === "none" ? ifSound : expectedOf(found, setup, others, check);
     const limit = typeof value === "number" ? meterLimit(parseCheck(check)!, value, meter) : null;

@@ -1,6 +1,6 @@
 import { ALL_CHECKS, parseCheck } from "../checks";
 import { faultId, type Candidate } from "../circuit/candidate";
-import { candidatesForEntry, candidatesForUnknown } from "../inference/candidates";
+import { everyCandidateForEntry, everyCandidateForUnknown } from "../inference/candidates";
 import { stateAfter, TOGGLE_EFFORT } from "../inference/choose";
 import { observe } from "../inference/observe";
 import { outcomeTable, type Expected } from "../inference/outcomes";
@@ -34,8 +34,8 @@ function piecesOf(setup: Setup, readings: readonly Reading[], all: readonly Beli
   const meter = setup.meter ?? DEFAULT_METER, fits = agrees(possibility);
   let believed: readonly Believed[] = all.filter((b) => fits(b.candidate));
   if (believed.reduce((sum, b) => sum + b.p, 0) < POSSIBLE) {
-    const byEntry = setup.expect ? candidatesForEntry(setup.expect, setup.experience).filter(fits) : [];
-    const list = byEntry.length > 0 ? byEntry : candidatesForUnknown(setup.experience).filter(fits);
+    const byEntry = setup.expect ? everyCandidateForEntry(setup.expect, setup.experience).filter(fits) : [];
+    const list = byEntry.length > 0 ? byEntry : everyCandidateForUnknown(setup.experience).filter(fits);
     believed = list.length === 0 ? [] : believe(list, observe(readings, meter), meter);
   }
   const whole = believed.reduce((sum, b) => sum + b.p, 0), pieces: Piece[] = [];
@@ -61,7 +61,7 @@ export function tellApart(setup: Setup, readings: readonly Reading[], among: rea
   if (rows < 2 || sides.some((pieces) => pieces.length === 0)) return [];
   const expected: Expected[] = sides.flatMap((pieces, row) => pieces.map(({ p, outlook }) => ({ p: p / rows, row, outlook }))).sort((a, b) => b.p - a.p);
   const closed = new Set([...readings.map(([check]) => check), ...(setup.excluded ?? [])]);
-  const tests = ALL_CHECKS.flatMap((spec, index) => closed.has(spec.code) ? [] : [{
+  const tests = ALL_CHECKS.flatMap((spec, index) => closed.has(spec.code) || spec.optional ? [] : [{
     id: spec.code, cost: READING_EFFORT, needs: switches(spec.state), outcomes: outcomeTable(spec, index, expected, rows),
   }]);
   const places = new Map(ALL_CHECKS.map(({ code }, index) => [code, index]));

@@ -1,5 +1,4 @@
-import { ALL_CHECKS } from "../checks";
-import { CHECK_INDEX } from "../circuit/predict";
+import { ALL_CHECKS, parseCheck } from "../checks";
 import { rankTests, type PlannedTest } from "../planning";
 import type { MachineState, MeterSpec, Reading, Setup } from "../types";
 import { outcomeTable, type Expected } from "./outcomes";
@@ -22,7 +21,7 @@ export function stateAfter(setup: Setup, readings: readonly Reading[]): Switches
   if (setup.state) return [setup.state.deviceParted, setup.state.controllerParted, setup.state.powerOn];
   let state: Switches = [false, false, false];
   for (const [check] of readings) {
-    const needs = switches(ALL_CHECKS[CHECK_INDEX.get(check)!]!.state);
+    const needs = switches(parseCheck(check)!.state);
     state = state.map((now, i) => needs[i] ?? now) as unknown as Switches;
   }
   return state;
@@ -31,7 +30,7 @@ export function stateAfter(setup: Setup, readings: readonly Reading[]): Switches
 const switches = (s: MachineState): readonly (boolean | null)[] => [s.deviceParted, s.controllerParted, s.powerOn];
 
 /** The believed candidates as rows of hypotheses, likeliest first, with what each expects of every check. */
-export function expectations(believed: readonly Believed[], meter: MeterSpec): { expected: Expected[]; priors: number[]; ids: string[] } {
+export function expectations(believed: readonly Believed[], meter: MeterSpec, wide = false): { expected: Expected[]; priors: number[]; ids: string[] } {
   const rows = new Map<string, { row: number; from: number }>(), priors: number[] = [], expected: Expected[] = [];
   let held = 0;
   for (const b of believed) {
@@ -42,17 +41,17 @@ export function expectations(believed: readonly Believed[], meter: MeterSpec): {
     const row = known?.row ?? priors.length;
     if (!known) rows.set(id, { row, from: COUNTS_FROM * b.p });
     priors[row] = (priors[row] ?? 0) + b.p;
-    if (!known || b.p >= known.from) expected.push({ p: b.p, row, outlook: outlookOf(b, meter) });
+    if (!known || b.p >= known.from) expected.push({ p: b.p, row, outlook: outlookOf(b, meter, wide) });
   }
   return { expected, priors, ids: [...rows.keys()] };
 }
 
 /** Checks not yet taken and not excluded, best first by what they are expected to tell for their effort. */
 export function rankChecks(setup: Setup, readings: readonly Reading[], believed: readonly Believed[], meter: MeterSpec): PlannedTest[] {
-  const { expected, priors } = expectations(believed, meter);
+  const { expected, priors } = expectations(believed, meter, setup.proposeOptional);
   if (priors.length < 2) return [];
   const closed = new Set([...readings.map(([check]) => check), ...(setup.excluded ?? [])]);
-  const tests = ALL_CHECKS.flatMap((spec, index) => closed.has(spec.code) ? [] : [{
+  const tests = ALL_CHECKS.flatMap((spec, index) => closed.has(spec.code) || (spec.optional && !setup.proposeOptional) ? [] : [{
     id: spec.code, cost: READING_EFFORT, needs: switches(spec.state), outcomes: outcomeTable(spec, index, expected, priors.length),
   }]);
   return rankTests({ priors, tests, state: stateAfter(setup, readings), toggleCosts: TOGGLE_EFFORT }, { lookAhead: 2, beam: 5 });

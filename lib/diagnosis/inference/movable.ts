@@ -3,7 +3,7 @@ import { ALL_PINS, pinsOf } from "../circuit/harness-parts";
 import { P } from "../circuit/parameters";
 import { GROUP, type Plan } from "../circuit/predict";
 
-const HAS_FAULT_OHMS = new Set(["wire-resistive", "short-to-ground", "short-to-battery", "wires-shorted"]);
+const HAS_FAULT_OHMS = new Set(["wire-resistive", "short-to-ground", "short-to-battery", "wires-shorted", "connector-damp"]);
 const cache = new WeakMap<Candidate, Map<number, readonly number[]>>();
 
 /** Which unknowns the checks of a plan, taken at the given pins of the harness (bits), can speak of, for this candidate; ascending places. */

@@ -53,9 +53,9 @@ export function scaledSd(spec: CheckSpec, value: number, meter: MeterSpec): numb
   }
 }
 
-/** Readings in the order of the vocabulary, so that the order they were taken in cannot matter. Unknown checks are the caller's to refuse. */
+/** Readings in the order of the vocabulary, so that the order they were taken in cannot matter. What is no circuit's (a colour, a message) is left out. Unknown checks are the caller's to refuse. */
 export function observe(readings: readonly Reading[], meter: MeterSpec = DEFAULT_METER): Observation[] {
-  return readings.map(([check, value]) => observation(CHECK_INDEX.get(check)!, value, meter))
+  return readings.filter(([check]) => CHECK_INDEX.has(check)).map(([check, value]) => observation(CHECK_INDEX.get(check)!, value, meter))
     .sort((a, b) => a.index - b.index || (a.word ?? "").localeCompare(b.word ?? "") || a.scaled - b.scaled);
 }
 

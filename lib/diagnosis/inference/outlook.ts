@@ -1,6 +1,6 @@
-import { ALL_GROUPS, CHECK_COUNT, newPredictions, predictInto, WHOLE_PLAN, type Predictions } from "../circuit/predict";
+import { ALL_GROUPS, CHECK_COUNT, newPredictions, predictInto, WHOLE_PLAN, WIDEST_PLAN, type Plan, type Predictions } from "../circuit/predict";
 import { PARAMETER_COUNT, physicalValue } from "../circuit/parameters";
-import { ALL_CHECKS } from "../checks";
+import { ALL_CHECKS, PLANNED_COUNT } from "../checks";
 import type { MeterSpec } from "../types";
 import { forward } from "./cholesky";
 import { physical } from "./misfit";
@@ -22,17 +22,20 @@ const DIFFERENCE = 1e-3;
 const at = newPredictions(), nudged = newPredictions();
 const x = new Float64Array(PARAMETER_COUNT);
 
-/** Expectation of every check under a fitted candidate, with what the fit leaves open and the meter's own error in the spread. */
-export function outlookOf(b: Believed, meter: MeterSpec): Outlook {
-  const { candidate: c, fit } = b;
+/**
+ * Expectation of every check under a fitted candidate, with what the fit leaves open and the meter's own error in the spread;
+ * of the optional ones only where `wide` is set.
+ */
+export function outlookOf(b: Believed, meter: MeterSpec, wide = false): Outlook {
+  const { candidate: c, fit } = b, plan = wide ? WIDEST_PLAN : WHOLE_PLAN, count = wide ? CHECK_COUNT : PLANNED_COUNT;
   at.logState = 0; at.idle = false;
-  predictInto(c, physical(c, fit.z, x), WHOLE_PLAN, ALL_GROUPS, at);
+  predictInto(c, physical(c, fit.z, x), plan, ALL_GROUPS, at);
   const variance = new Float64Array(CHECK_COUNT), mean = new Float64Array(CHECK_COUNT);
-  for (let i = 0; i < CHECK_COUNT; i++) mean[i] = numeric(at, i) ? scalePrediction(ALL_CHECKS[i]!, at.value[i]!, meter) : 0;
-  const derivatives = derivativesOf(b, meter, mean);
-  addKnown(b, derivatives, variance);
+  for (let i = 0; i < count; i++) mean[i] = numeric(at, i) ? scalePrediction(ALL_CHECKS[i]!, at.value[i]!, meter) : 0;
+  const derivatives = derivativesOf(b, meter, mean, plan, count);
+  addKnown(b, derivatives, variance, count);
   const sd = new Float64Array(CHECK_COUNT);
-  for (let i = 0; i < CHECK_COUNT; i++) {
+  for (let i = 0; i < count; i++) {
     if (numeric(at, i)) sd[i] = Math.sqrt(variance[i]! + square(at.slack[i]!) + square(scaledSd(ALL_CHECKS[i]!, unscale(ALL_CHECKS[i]!, mean[i]!), meter)));
   }
   return { mean, sd, word: Float64Array.from(at.word), jumps: Float64Array.from(at.jumps) };
@@ -43,26 +46,26 @@ const numeric = (p: Predictions, i: number) => ALL_CHECKS[i]!.unit !== "word" &&
 
 interface Derivatives { readonly parameters: readonly number[]; readonly rows: readonly Float64Array[] }
 
-function derivativesOf(b: Believed, meter: MeterSpec, mean: Float64Array): Derivatives {
-  const { candidate: c, fit } = b, parameters = movedBy(c, WHOLE_PLAN);
+function derivativesOf(b: Believed, meter: MeterSpec, mean: Float64Array, plan: Plan, count: number): Derivatives {
+  const { candidate: c, fit } = b, parameters = movedBy(c, plan);
   const idle = at.idle, rows = parameters.map((p) => {
     const row = new Float64Array(CHECK_COUNT), kept = x[p]!, reach = reachOf(c, p, idle);
     x[p] = physicalValue(c.ranges, p, fit.z[p]! + DIFFERENCE);
     nudged.value.set(at.value);
-    predictInto(c, x, WHOLE_PLAN, reach, nudged, true);
+    predictInto(c, x, plan, reach, nudged, true);
     x[p] = kept;
-    for (let i = 0; i < CHECK_COUNT; i++) if (numeric(at, i) && nudged.value[i] !== at.value[i]) row[i] = (scalePrediction(ALL_CHECKS[i]!, nudged.value[i]!, meter) - mean[i]!) / DIFFERENCE;
+    for (let i = 0; i < count; i++) if (numeric(at, i) && nudged.value[i] !== at.value[i]) row[i] = (scalePrediction(ALL_CHECKS[i]!, nudged.value[i]!, meter) - mean[i]!) / DIFFERENCE;
     return row;
   });
   return { parameters, rows };
 }
 
 /** Adds the variance that the unknowns still carry: what the readings fixed jointly, and untouched unknowns at their full range. */
-function addKnown(b: Believed, d: Derivatives, variance: Float64Array): void {
+function addKnown(b: Believed, d: Derivatives, variance: Float64Array, count: number): void {
   const { active, precision } = b.fit, m = active.length;
   const place = new Map(d.parameters.map((p, k) => [p, k])), untouched = d.parameters.filter((p) => !active.includes(p));
   const joint = new Float64Array(m);
-  for (let i = 0; i < CHECK_COUNT; i++) {
+  for (let i = 0; i < count; i++) {
     let sum = 0;
     for (const p of untouched) sum += square(d.rows[place.get(p)!]![i]!);
     let any = false;

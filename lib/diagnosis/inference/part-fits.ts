@@ -57,7 +57,8 @@ export class PartFits {
   private readonly unpowered = new Map<string, number>();
   private readonly meterName: string;
 
-  constructor(private readonly obs: readonly Observation[], readonly meter: MeterSpec, private readonly whole: { readonly fits: PartFits; readonly left: number } | null = null) {
+  constructor(readonly observations: readonly Observation[], readonly meter: MeterSpec, private readonly whole: { readonly fits: PartFits; readonly left: number } | null = null) {
+    const obs = observations;
     this.meterName = JSON.stringify(meter);
     const live = obs.filter((o) => (o.group & GROUP.live) !== 0), mated = obs.filter((o) => o.group === GROUP.mated);
     this.device = this.part((o) => o.group === GROUP.device);
@@ -74,7 +75,7 @@ export class PartFits {
 
   /** The same readings but one, by its place. */
   without(left: number): PartFits {
-    return new PartFits(this.obs.filter((_, i) => i !== left), this.meter, { fits: this, left });
+    return new PartFits(this.observations.filter((_, i) => i !== left), this.meter, { fits: this, left });
   }
 
   /** The most that a candidate's log-weight can be. */
@@ -125,7 +126,7 @@ export class PartFits {
   }
 
   private part(wanted: (o: Observation) => boolean, pins?: number): Part {
-    const obs = this.obs.filter(wanted);
+    const obs = this.observations.filter(wanted);
     return { evidence: evidenceOf(obs, this.meter, pins), fits: fitsTo(nameOf(obs, pins, this.meterName)) };
   }
 }

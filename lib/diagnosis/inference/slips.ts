@@ -2,7 +2,7 @@ import { ALL_CHECKS } from "../checks";
 import type { Candidate } from "../circuit/candidate";
 import { CHECK_INDEX } from "../circuit/predict";
 import { SLIP } from "../priors";
-import type { CheckSpec, MeterSpec } from "../types";
+import type { CheckSpec } from "../types";
 import { scale, type Observation } from "./observe";
 import { outlookOf, type Outlook } from "./outlook";
 import type { PartFits } from "./part-fits";
@@ -35,12 +35,13 @@ const ANY_WORD = 0.3;
 const LOG_ROOT_TWO_PI = 0.5 * ln(2 * Math.PI);
 
 /** Weighs the base belief against one reading being wrong; `candidates` are looked through without that one. */
-export function weighSlips(candidates: readonly Candidate[], fits: PartFits, obs: readonly Observation[], meter: MeterSpec, base: readonly Believed[]): Weighed {
+export function weighSlips(candidates: readonly Candidate[], fits: PartFits, base: readonly Believed[]): Weighed {
+  const { observations: obs, meter } = fits;
   const entries: Entry[] = base.map((b) => ({ believed: b, logWeight: b.logWeight, from: -1 }));
   const best = base[0]!.logWeight;
   obs.forEach((o, i) => {
     for (const b of believeWith(fits.without(i), candidates, { cut: LOOKED_INTO })) {
-      const logWeight = b.logWeight + ln(slipChance(o, outlookOf(b, meter)));
+      const logWeight = b.logWeight + ln(slipChance(o, outlookOf(b, meter, o.spec.optional)));
       if (logWeight >= best + ln(NEGLIGIBLE)) entries.push({ believed: b, logWeight, from: i });
     }
   });
