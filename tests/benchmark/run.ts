@@ -1,6 +1,8 @@
 // npm run bench: speed, choice of readings, memory and the running check in a browser, in one run. Reports; ends with 1 only when something breaks.
 // --every N: each N-th case (quicker); --only steps,orders,memory,browser: these sections alone.
+import { cpus, loadavg } from "node:os";
 import { benchCases, everyNth } from "../support/bench";
+import { reportBrowser } from "./browser/report";
 import { engineOrder, reportOrders } from "./orders";
 import { reportMemory } from "./memory";
 import { options } from "./options";
@@ -9,7 +11,8 @@ import { say } from "./table";
 
 const { every, only } = options(process.argv.slice(2));
 const cases = everyNth(benchCases(), every);
-const heading = (text: string) => say(`\n== ${text} ==`);
+/** Other programs make every time longer: how many wanted the processors in the last minute stands beside each section. */
+const heading = (text: string) => say(`\n== ${text} ==\n(${cpus().length} processors, ${loadavg()[0]?.toFixed(1)} programs wanted them on average in the last minute)`);
 
 say(`Node ${process.versions.node}, ${cases.length} of the bench's machines`);
 if (only.has("steps") || only.has("orders")) {
@@ -26,4 +29,8 @@ if (only.has("steps") || only.has("orders")) {
 if (only.has("memory")) {
   heading("Memory");
   reportMemory(cases, every);
+}
+if (only.has("browser")) {
+  heading("The running check in Chromium");
+  await reportBrowser(cases);
 }
