@@ -23,17 +23,20 @@ function reportTimes(steps: Measured["steps"], waits: Measured["waits"]): void {
   say(table(["readings", ...TIMES_HEAD], [...byReadings(steps), timesRow("all steps", steps.map(({ ms }) => ms)), timesRow("last key to next screen", waits)]));
 }
 
-function reportWorker({ steps, waits, seen, opening, presses, reach }: Measured): void {
+function reportWorker({ steps, waits, seen, opening, presses, reach, work }: Measured): void {
   say("\nThe engine in its worker, as people use it:");
   if (reach) {
     say(`Slowed ${RATE} times by the DevTools protocol: the page became ${reach.page.toFixed(1)} times slower, the worker ${reach.worker.toFixed(1)} times; asked for the same, the worker's own target answers: ${reach.answer}.`);
-    say("Where the worker is not slowed, its times are those of this machine beside a slowed page; the figures without a worker, below, are those of a slow processor.");
+    say(`So a step on a slowed processor is reckoned: processor's work on it, which other programs do not lengthen, times ${RATE}.`);
   }
   reportTimes(steps, waits);
-  say(against("step in the worker at the 95th percentile", percentile(steps.map(({ ms }) => ms), 0.95), "ms", STEP_MS));
+  say(table(["", ...TIMES_HEAD], [timesRow("processor's work on a step", work.engine), timesRow(`the same times ${RATE}`, work.engine.map((ms) => RATE * ms))]));
+  say(against("step in the worker, by the clock of this machine, at the 95th percentile", percentile(steps.map(({ ms }) => ms), 0.95), "ms", STEP_MS));
+  say(against(`step in the worker, processor's work times ${RATE}, at the 95th percentile`, RATE * percentile(work.engine, 0.95), "ms", STEP_MS));
   const frames = seen.frames.map(({ ms }) => ms), tasks = seen.tasks.map(({ ms }) => ms), inputs = seen.inputs.map(({ ms }) => ms);
   say(against(`longest frame in a running check (${frames.length} of 50 ms or more)`, Math.max(0, ...frames), "ms", FRAME_MS, 0));
   say(against(`longest task of the page (${tasks.length} of 50 ms or more)`, Math.max(0, ...tasks), "ms", FRAME_MS, 0));
+  say(against(`longest task of the page, processor's work at ${RATE} times slowed`, Math.max(0, ...work.page), "ms", FRAME_MS, 0));
   say(against(`input to next paint, slowest of ${presses} presses (${inputs.length} events of 16 ms or more)`, Math.max(0, ...inputs), "ms", INPUT_MS, 0));
   say(`longest frame while a check is opened: ${opening.toFixed(0)} ms`);
   if (frames.length > 0) say(`longest frames:\n${[...seen.frames].sort((a, b) => b.ms - a.ms).slice(0, WORST).map(frameLine).join("\n")}`);

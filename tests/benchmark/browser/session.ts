@@ -4,6 +4,7 @@ import { startUnknown } from "../../e2e/support/run-check";
 import type { BenchCase } from "../../support/bench";
 import { takeAll } from "./drive";
 import { observe, type Seen } from "./observer";
+import { watched, type Work } from "./work";
 import { RATE, reachOf, throttle, type Reach } from "./throttle";
 
 const ARGS = ["--no-sandbox", "--disable-gpu", "--disable-quic", "--no-first-run", "--disable-background-networking", "--disable-component-update", "--disable-sync"];
@@ -23,6 +24,7 @@ export interface Measured {
   readonly opening: number;
   /** Presses of a key or button, also those answered too quickly to be listed. */
   readonly presses: number;
+  readonly work: Work;
   readonly reach: Reach | null;
 }
 
@@ -33,10 +35,10 @@ export function launch(): Promise<Browser> {
 /** Runs where the engine runs: the answers that its own marks tell of. */
 const marks = (): EngineStep[] => performance.getEntriesByName("engine assess").map((entry) => ({ readings: Number((entry as PerformanceMeasure).detail), ms: entry.duration }));
 
-async function oneCheck(page: Page, machine: BenchCase, inWorker: boolean): Promise<Omit<Measured, "reach">> {
+async function oneCheck(browser: Browser, page: Page, machine: BenchCase, inWorker: boolean): Promise<Omit<Measured, "reach">> {
   await startUnknown(page);
   const from = await page.evaluate(() => performance.now());
-  const waits = await takeAll(page, machine);
+  const { result: waits, work } = await watched(browser, page, () => takeAll(page, machine));
   const [worker] = page.workers();
   if (inWorker !== (worker !== undefined)) throw new Error("the engine does not run where it was to run");
   const steps = await (worker ? worker.evaluate(marks) : page.evaluate(marks));
@@ -48,12 +50,13 @@ async function oneCheck(page: Page, machine: BenchCase, inWorker: boolean): Prom
   });
   const late = <T extends { at: number }>(list: readonly T[]) => list.filter(({ at }) => at >= from);
   const opening = Math.max(0, ...all.frames.filter(({ at }) => at < from).map(({ ms }) => ms));
-  return { steps, waits, seen: { tasks: late(all.tasks), frames: late(all.frames), inputs: late(all.inputs) }, opening, presses: all.presses };
+  return { steps, waits, seen: { tasks: late(all.tasks), frames: late(all.frames), inputs: late(all.inputs) }, opening, presses: all.presses, work };
 }
 
 function together(parts: readonly Omit<Measured, "reach">[], reach: Reach | null): Measured {
   return {
     steps: parts.flatMap((p) => p.steps), waits: parts.flatMap((p) => p.waits), opening: Math.max(...parts.map((p) => p.opening)), presses: parts.reduce((sum, p) => sum + p.presses, 0), reach,
+    work: { page: parts.flatMap((p) => p.work.page), engine: parts.flatMap((p) => p.work.engine) },
     seen: { tasks: parts.flatMap((p) => p.seen.tasks), frames: parts.flatMap((p) => p.seen.frames), inputs: parts.flatMap((p) => p.seen.inputs) },
   };
 }
@@ -73,7 +76,7 @@ export async function measure(browser: Browser, address: string, machines: reado
   const cdp = await context.newCDPSession(page);
   await throttle(cdp, RATE);
   const parts: Omit<Measured, "reach">[] = [];
-  for (const machine of machines) parts.push(await oneCheck(page, machine, inWorker));
+  for (const machine of machines) parts.push(await oneCheck(browser, page, machine, inWorker));
   const reach = inWorker ? await reachOf(page, cdp) : null;
   await context.close();
   return together(parts, reach);
