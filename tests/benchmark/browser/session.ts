@@ -1,6 +1,6 @@
 import { chromium, type Browser, type Page } from "playwright-core";
 import { signInByForm } from "../../e2e/support/people";
-import { startUnknown } from "../../e2e/support/run-check";
+import { readScreen } from "../../e2e/support/lead-card";
 import type { BenchCase } from "../../support/bench";
 import { takeAll } from "./drive";
 import { observe, type Seen } from "./observer";
@@ -8,6 +8,8 @@ import { watched, type Work } from "./work";
 import { RATE, reachOf, throttle, type Reach } from "./throttle";
 
 const ARGS = ["--no-sandbox", "--disable-gpu", "--disable-quic", "--no-first-run", "--disable-background-networking", "--disable-component-update", "--disable-sync"];
+/** What it takes a person to look at "What do you have?" and press Start. */
+const READING_THE_FORM_MS = 4_000;
 const PHONE = { viewport: { width: 390, height: 844 }, hasTouch: true };
 
 export interface EngineStep { readonly readings: number; readonly ms: number }
@@ -32,16 +34,28 @@ export function launch(): Promise<Browser> {
   return chromium.launch({ executablePath: process.env.CHROMIUM_PATH ?? "/usr/bin/chromium", args: ARGS });
 }
 
-/** Runs where the engine runs: the answers that its own marks tell of. */
-const marks = (): EngineStep[] => performance.getEntriesByName("engine assess").map((entry) => ({ readings: Number((entry as PerformanceMeasure).detail), ms: entry.duration }));
+/** Runs where the engine runs: the answers since `from` (ms since 1970) that its own marks tell of. */
+const marks = (from: number): EngineStep[] => performance.getEntriesByName("engine assess").filter(({ startTime }) => performance.timeOrigin + startTime >= from)
+  .map((entry) => ({ readings: Number((entry as PerformanceMeasure).detail), ms: entry.duration }));
+
+/** Fills in nothing about the device, at a person's pace, and starts; when, in ms since 1970. */
+async function start(page: Page): Promise<number> {
+  await page.goto("/checks/new");
+  await page.getByLabel("Battery voltage").focus();
+  await page.waitForTimeout(READING_THE_FORM_MS);
+  const from = await page.evaluate(() => performance.timeOrigin + performance.now());
+  await page.getByRole("button", { name: "Start the check" }).click();
+  await readScreen(page);
+  return from;
+}
 
 async function oneCheck(browser: Browser, page: Page, machine: BenchCase, inWorker: boolean): Promise<Omit<Measured, "reach">> {
-  await startUnknown(page);
+  const started = await start(page);
   const from = await page.evaluate(() => performance.now());
   const { result: waits, work } = await watched(browser, page, () => takeAll(page, machine));
   const [worker] = page.workers();
   if (inWorker !== (worker !== undefined)) throw new Error("the engine does not run where it was to run");
-  const steps = await (worker ? worker.evaluate(marks) : page.evaluate(marks));
+  const steps = await (worker ? worker.evaluate(marks, started) : page.evaluate(marks, started));
   const all = await page.evaluate(async () => {
     // What was observed last is handed over with the next turn.
     await new Promise((resolve) => setTimeout(resolve, 200));
