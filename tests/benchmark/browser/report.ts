@@ -38,6 +38,7 @@ function reportWorker({ steps, waits, seen, opening, presses, reach, work }: Mea
   say(against(`longest task of the page (${tasks.length} of 50 ms or more)`, Math.max(0, ...tasks), "ms", FRAME_MS, 0));
   say(against(`longest task of the page, processor's work at ${RATE} times slowed`, Math.max(0, ...work.page), "ms", FRAME_MS, 0));
   say(against(`input to next paint, slowest of ${presses} presses (${inputs.length} events of 16 ms or more)`, Math.max(0, ...inputs), "ms", INPUT_MS, 0));
+  say(`  of these events the median took ${percentile(inputs, 0.5).toFixed(0)} ms, the 95th percentile ${percentile(inputs, 0.95).toFixed(0)} ms; ${inputs.filter((ms) => ms > INPUT_MS).length} took longer than asked for (the browser tells them in steps of 8 ms)`);
   say(`longest frame while a check is opened: ${opening.toFixed(0)} ms`);
   if (frames.length > 0) say(`longest frames:\n${[...seen.frames].sort((a, b) => b.ms - a.ms).slice(0, WORST).map(frameLine).join("\n")}`);
 }
