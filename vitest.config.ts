@@ -12,7 +12,7 @@ export default defineConfig({
     },
   },
   test: {
-    include: ["tests/engine/**/*.test.ts", "lib/**/*.test.ts", "components/**/*.test.{ts,tsx}", "db/**/*.test.ts", "seed/**/*.test.ts", "tests/published-values/**/*.test.ts", "tests/integration/**/*.test.ts"],
+    include: ["tests/engine/**/*.test.ts", "tests/benchmark/**/*.test.ts", "lib/**/*.test.ts", "components/**/*.test.{ts,tsx}", "db/**/*.test.ts", "seed/**/*.test.ts", "tests/published-values/**/*.test.ts", "tests/integration/**/*.test.ts"],
     environment: "node",
     // Vitest leaves a core to itself; on two cores that would be half of them.
     maxWorkers: 2,

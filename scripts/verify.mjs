@@ -81,7 +81,7 @@ if (await stage("install", install)) {
     const typegen = await node(NEXT, "typegen");
     return typegen.code || (await node(bin("typescript", "bin", "tsc"), "--noEmit")).code;
   });
-  await vitest("unit", ["lib/", "components/", "db/", "seed/", "tests/published-values"]);
+  await vitest("unit", ["lib/", "components/", "db/", "seed/", "tests/published-values", "tests/benchmark"]);
   await vitest("engine", ["tests/engine"]);
   await vitest("integration", ["tests/integration"]);
   const built = await stage("build", build);

@@ -1,4 +1,4 @@
-import { answerRequest, type Answer } from "@/lib/diagnosis";
+import { answerRequest, type Answer, type Reading } from "@/lib/diagnosis";
 import { sameFault, samePins, type BenchCase, type Named } from "../support/bench";
 import { effortOf, followCheck, FIXED_ORDER } from "../support/run-check";
 
@@ -9,12 +9,15 @@ export interface BenchRow {
   readonly kind: boolean; readonly pins: boolean; readonly top: boolean; readonly inSet: boolean; readonly said: number; readonly truth: string; readonly verdict: string;
 }
 
-export function benchRow(c: BenchCase, order?: readonly string[]): BenchRow {
+/** How a case is followed: readings taken before the first question, and what answers instead of the engine itself (a clock around it). */
+export interface Following { readonly taken?: readonly Reading[]; readonly engine?: typeof answerRequest }
+
+export function benchRow(c: BenchCase, order?: readonly string[], { taken = [], engine = answerRequest }: Following = {}): BenchRow {
   const run = followCheck((readings): Answer => {
-    const answer = answerRequest({ id: c.id, setup: c.setup, readings });
+    const answer = engine({ id: c.id, setup: c.setup, readings });
     if ("error" in answer) throw new Error(`${c.id}: ${answer.error.message}`);
     return answer;
-  }, (check) => c.readings[check], [], order);
+  }, (check) => c.readings[check], taken, order);
   return { ...judged(c, run.last), readings: run.readings.length, effort: effortOf(run.readings), invalid: run.invalid };
 }
 

@@ -13,7 +13,8 @@ export interface Course<A extends Asked> {
   readonly invalid: string | null;
 }
 
-const MOST_READINGS = 40;
+/** A check that is not done by then is broken off. */
+export const MOST_READINGS = 40;
 
 /** Follows the engine's proposals, or an order of one's own, until it is done; starts from `taken`. */
 export function followCheck<A extends Asked>(

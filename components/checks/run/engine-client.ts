@@ -4,6 +4,8 @@ import type { EngineAnswer, EngineJob, EngineRequest, ResultOf } from "./engine-
 export interface EngineClient {
   /** Rejects when the engine failed, or gave up because newer readings came in. */
   ask<Job extends EngineJob>(job: Job, setup: Setup, readings: readonly Reading[]): Promise<ResultOf<Job>>;
+  /** Whether it runs beside the page, so that the page answers meanwhile. */
+  apart(): boolean;
   close(): void;
 }
 
@@ -14,7 +16,7 @@ const onThisThread: Answerer = async (request) => (await import("./engine-answer
 
 interface Waiting { readonly resolve: (answer: EngineAnswer) => void; readonly reject: (error: Error) => void; readonly request: EngineRequest }
 
-function inWorker(worker: Worker): Answerer {
+function inWorker(worker: Worker): { readonly answer: Answerer; readonly apart: () => boolean } {
   const waiting = new Map<number, Waiting>();
   let failed = false;
   worker.addEventListener("message", (event: MessageEvent<EngineAnswer>) => {
@@ -28,15 +30,17 @@ function inWorker(worker: Worker): Answerer {
     waiting.clear();
     for (const { request, resolve, reject } of left) void onThisThread(request).then(resolve, reject);
   });
-  return (request) => failed ? onThisThread(request) : new Promise((resolve, reject) => {
+  const answer: Answerer = (request) => failed ? onThisThread(request) : new Promise((resolve, reject) => {
     waiting.set(request.id, { resolve, reject, request });
     worker.postMessage(request);
   });
+  return { answer, apart: () => !failed };
 }
 
-function clientOf(answer: Answerer, close: () => void): EngineClient {
+function clientOf(answer: Answerer, apart: () => boolean, close: () => void): EngineClient {
   let lastId = 0;
   return {
+    apart,
     close,
     async ask<Job extends EngineJob>(job: Job, setup: Setup, readings: readonly Reading[]) {
       const given = await answer({ id: ++lastId, job, setup, readings });
@@ -51,8 +55,9 @@ function clientOf(answer: Answerer, close: () => void): EngineClient {
 export function startEngine(): EngineClient {
   try {
     const worker = new Worker(new URL("./engine-worker.ts", import.meta.url), { type: "module" });
-    return clientOf(inWorker(worker), () => worker.terminate());
+    const { answer, apart } = inWorker(worker);
+    return clientOf(answer, apart, () => worker.terminate());
   } catch {
-    return clientOf(onThisThread, () => undefined);
+    return clientOf(onThisThread, () => false, () => undefined);
   }
 }

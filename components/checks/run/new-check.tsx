@@ -25,21 +25,24 @@ const WARM_AFTER = 3_000;
 
 /**
  * Fetches the check's screens and engine with the first touch, or a little later without one: the page itself stays
- * light, and the check is there should the server go.
+ * light, and the check is there should the server go. The engine is run in, until a check begins.
  */
-function useWarmUp(): () => void {
-  const warmed = useRef(false);
+function useWarmUp(): { readonly warm: () => void; readonly begin: () => void } {
+  const warmed = useRef(false), begun = useRef(false);
   const warm = useCallback(() => {
     if (warmed.current) return;
     warmed.current = true;
     warmCheckRun();
-    void import("./use-engine").then(({ sharedEngine }) => sharedEngine(), () => { warmed.current = false; });
+    void Promise.all([import("./use-engine"), import("./engine-warm-up")]).then(
+      ([{ sharedEngine }, { warmUp }]) => warmUp(sharedEngine(), () => !begun.current).catch(() => undefined), () => { warmed.current = false; },
+    );
   }, []);
   useEffect(() => {
     const timer = setTimeout(warm, WARM_AFTER);
     return () => clearTimeout(timer);
   }, [warm]);
-  return warm;
+  const begin = useCallback(() => { begun.current = true; }, []);
+  return { warm, begin };
 }
 
 /**
@@ -49,9 +52,10 @@ function useWarmUp(): () => void {
 export function NewCheck({ personId, entry, choices, machineId, experience }: NewCheckProps) {
   const [started, setStarted] = useState<string | null>(null);
 
-  const warm = useWarmUp();
+  const { warm, begin } = useWarmUp();
 
   const start = async (setup: RunSetup) => {
+    begin();
     const id = ulid();
     await keepRun({ id, personId, setup: { ...setup, experience }, startedAt: new Date().toISOString(), started: false, finish: "no" });
     window.history.replaceState(null, "", `/checks/${id}`);
