@@ -65,7 +65,8 @@ describe("chances before the first reading", SLOW, () => {
   });
 
   it("are those of the published table, shared out among the findings that a potentiometer can have (computed from the table)", () => {
-    const can = FINDING_PRIORS.filter(({ code }) => !code.startsWith("output-")), whole = can.reduce((sum, { share }) => sum + share, 0), { faults } = standing([]);
+    // A damp connector is looked at when a verdict is near.
+    const can = FINDING_PRIORS.filter(({ code }) => !code.startsWith("output-") && code !== "connector-damp"), whole = can.reduce((sum, { share }) => sum + share, 0), { faults } = standing([]);
     for (const { code, share } of can) expect(faults.filter((f) => f.code === code).reduce((sum, { p }) => sum + p, 0), code).toBeCloseTo(share / whole, 9);
     expect(faults.some(({ code }) => code.startsWith("output-"))).toBe(false);
   });

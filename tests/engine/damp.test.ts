@@ -12,7 +12,8 @@ describe("a damp connector", SLOW, () => {
     const a = assess({ pins: PINS }, [...WHOLE, ["res:loose:1-2", "OL"], ["res:loose:2-3", ohms], ["res:loose:1-3", "OL"]]);
     if (a.state === "invalid-input") throw new Error(a.message);
     expect(a.faults[0]).toMatchObject({ code, pins: [2, 3] });
-    expect(a.faults[0]!.p).toBeGreaterThan(0.9);
+    // One reading alone may also be a slip: likelier than not, but not sure.
+    expect(a.faults[0]!.p).toBeGreaterThan(0.65);
   });
 
   it("is what no machine of the bench is said to have, all readings at hand", () => {
