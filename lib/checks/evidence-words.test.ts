@@ -63,9 +63,13 @@ describe("a row of the evidence, in words", () => {
     expect(evidencePhrases({ ...wire, check: "fit:contact:1", value: "grips", ifFinding: word("fit:contact:1", ["loose", 0.95], ["grips", 0.05]) })[0]).toBe("The answer would be loose or grips, and it was.");
   });
 
-  it.each([[1e-6, "That rules this out, unless the reading is wrong."], [1e-3, "That rules this out, unless the reading is wrong."], [0.5, "That made this about 2 times less likely."], [0.95, "Beside the other readings, that changed next to nothing."], [1, "Beside the other readings, that changed next to nothing."], [1e6, "That made this more than 1000 times more likely."], [null, null]] as const)("a factor of %s", (factor, words) => {
+  it.each([[1e-6, "That rules this out, unless the reading is wrong."], [1e-3, "That rules this out, unless the reading is wrong."], [0.5, "That made this about 2 times less likely."], [0.95, "The other readings speak against this too: beside them, that changed next to nothing."], [1, "The other readings speak against this too: beside them, that changed next to nothing."], [1e6, "That made this more than 1000 times more likely."], [null, null]] as const)("a factor of %s", (factor, words) => {
     // Away from the finding's band where it speaks against, inside it where it speaks for.
     expect(movedSentence({ ...row, value: factor !== null && factor > 1 ? 0 : 4.98, factor })).toBe(words);
+  });
+
+  it("says that a reading which agrees moved nothing", () => {
+    expect(movedSentence({ ...row, value: 0, factor: 1 })).toBe("Beside the other readings, that changed next to nothing.");
   });
 
   it("gives the reason where a reading agrees and still speaks against, or the other way round", () => {

@@ -104,7 +104,7 @@ export function movedSentence(row: EvidenceRow): string | null {
   if (factor * MOST_TIMES <= 1) return `${closer} rules this out, unless the reading is wrong.`;
   if (factor >= MOVES) return `${agrees ? "That" : "Everything else expects it even less: that"} made this ${times(factor)} times more likely.`;
   if (factor * MOVES <= 1) return `${closer} made this ${times(1 / factor)} times less likely.`;
-  return "Beside the other readings, that changed next to nothing.";
+  return agrees ? "Beside the other readings, that changed next to nothing." : "The other readings speak against this too: beside them, that changed next to nothing.";
 }
 
 const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1);

@@ -10,6 +10,8 @@ export interface Answer {
   readonly faults: readonly { readonly code: string; readonly pins?: readonly number[]; readonly p: number }[];
   /** Devices that are none of the three kinds, from a chance of 0.01 on. */
   readonly others?: readonly { readonly device: string; readonly p: number }[];
+  /** Readings that contradict the others, worst first: to be taken again. Left out where there are none. */
+  readonly again?: readonly { readonly check: string; readonly why: string }[];
   readonly done: boolean;
   readonly next: readonly { readonly check: string; readonly why: string }[];
 }
@@ -35,7 +37,7 @@ export function answerRequest(request: unknown): Answer | Refusal {
     if (a.state === "invalid-input") return { ...id, error: { code: a.code, message: a.message, where: a.where } };
     const kinds = Object.fromEntries(a.kinds.map((k) => [k.kind, k.p])) as Record<Kind, number>;
     const others = a.others.filter(({ p }) => p >= SHOWN_FROM);
-    return { ...id, kinds, pins: a.pins, faults: a.faults, ...(others.length > 0 ? { others } : {}), done: a.done, next: a.next.map(({ check, why }) => ({ check, why })) };
+    return { ...id, kinds, pins: a.pins, faults: a.faults, ...(others.length > 0 ? { others } : {}), ...(a.state === "contradictory" ? { again: a.suspects } : {}), done: a.done, next: a.next.map(({ check, why }) => ({ check, why })) };
   } catch (error) {
     if (error instanceof Malformed) return { ...id, error: { code: error.code, message: error.message, where: error.where } };
     throw error;

@@ -89,7 +89,7 @@ export function assess(setup: Setup, readings: readonly Reading[]): Assessment {
   if (problem) return { state: "invalid-input", ...problem };
   const meter = setup.meter ?? DEFAULT_METER, fits = new PartFits(observe(readings, meter), meter), overLimit = overLimitOf(readings);
   const judged = judge(setup, readings, fits), { believed, wary, slips } = judged.weighed, ranked = overLimit ? [] : judged.ranked, worth = ranked.some(worthWhile);
-  const others = othersFor(setup, fits, believed, !worth), m = besideOthers(marginals(hinted(believed, readings)), others);
+  const others = othersFor(setup, fits, believed), m = besideOthers(marginals(hinted(believed, readings)), others);
   // What was only looked at is no ground to end a check.
   const answered = [believed, wary].every((list) => settled(besideOthers(marginals(list), others)));
   const done = !worth || answered || others.some(({ p }) => p >= SETTLED);
@@ -102,13 +102,10 @@ export function assess(setup: Setup, readings: readonly Reading[]): Assessment {
   return { state: readings.length === 0 ? "needs-reading" : "ranked", ...standing };
 }
 
-/**
- * Devices that are none of the three kinds, beside what is believed of the three: looked at before a verdict (`last`: no reading is worth
- * taking), and where the three do not explain the readings well. One reading says nothing of them.
- */
-function othersFor(setup: Setup, { observations, meter }: PartFits, believed: readonly Believed[], last: boolean): readonly OtherChance[] {
+/** Devices that are none of the three kinds, beside what is believed of the three. One reading says nothing of them. */
+function othersFor(setup: Setup, { observations, meter }: PartFits, believed: readonly Believed[]): readonly OtherChance[] {
   const best = believed[0]!;
-  if (observations.length < 2 || !(last || settled(marginals(believed)) || explainsBadly(best, observations, meter))) return [];
+  if (observations.length < 2) return [];
   // With so many readings none was weighed as wrong: the one that fits worst may cost the three kinds no more than a slip does.
   const relief = observations.length > MOST_WEIGHED ? slipRelief(misfits(best, observations, meter)) : 0;
   return othersBeside(best.logWeight - ln(best.p) + relief, observations, setup.expect ? 1 - ENTRY_IS_RIGHT : 1).filter(({ p }) => p >= LEAST_OTHER);

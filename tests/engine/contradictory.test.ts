@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { assess, parseCheck, type Expect, type Reading } from "@/lib/diagnosis";
+import { answerRequest, assess, parseCheck, type Expect, type Reading } from "@/lib/diagnosis";
 import { SLOW } from "../support/slow";
 
 /**
@@ -42,6 +42,12 @@ describe.each([["with an entry", POT], ["of an unknown device", undefined]] as c
     const named = suspects(withWild(wild), entry);
     expect(named.map(({ check }) => check)).toContain(wild[0]);
     for (const { why } of named) expect(why).toMatch(/\w+.*\.$/);
+  });
+
+  it("are named to other programs too", () => {
+    const [, wild] = WILD[0]!, setup = { pins: ["1", "2", "3"], ...(entry ? { expect: entry } : {}) };
+    expect(answerRequest({ setup, readings: withWild(wild) })).toMatchObject({ again: [{ check: wild[0] }] });
+    expect(answerRequest({ setup, readings: SOUND })).not.toHaveProperty("again");
   });
 
   it.each(NOT_YET)("are seen to contradict each other: %s", (__, wild) => {

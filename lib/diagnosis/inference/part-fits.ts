@@ -13,8 +13,11 @@ const MIDDLE = new Float64Array(PARAMETER_COUNT);
 const TRACK_STARTS = [0, -1.5, 1.5].map((wiper) => { const z = new Float64Array(PARAMETER_COUNT); z[P.wiper] = wiper; return z; });
 const ONE_START = [MIDDLE];
 
-/** Readings fitted together, and the fits to them so far, by what of the machine they were made for. */
-interface Part { readonly evidence: Evidence; readonly fits: Map<string, Fit> }
+/**
+ * Readings fitted together, and the fits to them so far, by what of the machine they were made for. Where one reading was left
+ * out, `before` is the part with it: fits start where those ended.
+ */
+interface Part { readonly name: string; readonly evidence: Evidence; readonly fits: Map<string, Fit>; readonly before: Part | null }
 
 /** Fits of parts are kept for so many sets of readings, the ones used last: from one reading of a check to the next most parts stay the same. */
 const MOST_KEPT = 192;
@@ -61,12 +64,13 @@ export class PartFits {
     const obs = observations;
     this.meterName = JSON.stringify(meter);
     const live = obs.filter((o) => (o.group & GROUP.live) !== 0), mated = obs.filter((o) => o.group === GROUP.mated);
-    this.device = this.part((o) => o.group === GROUP.device);
+    const before = whole?.fits;
+    this.device = this.part((o) => o.group === GROUP.device, before?.device);
     this.scopes = SCOPES.map((scope, i) => {
-      const part = this.part((o) => (o.group & UNPOWERED) !== 0 && inScope(o.spec, i), scope.pins);
+      const part = this.part((o) => (o.group & UNPOWERED) !== 0 && inScope(o.spec, i), before?.scopes[i], scope.pins);
       return part.evidence.observations.length === 0 ? null : part;
     });
-    this.harness = this.part((o) => (o.group & HARNESS) !== 0);
+    this.harness = this.part((o) => (o.group & HARNESS) !== 0, before?.harness);
     this.all = evidenceOf(obs, meter);
     this.live = live.length > 0; this.mated = mated.length > 0;
     this.livePeak = peakOf(live); this.matedPeak = peakOf(mated);
@@ -125,16 +129,20 @@ export class PartFits {
     return this.device.evidence.observations.length === 0 ? NO_FIT : fitOf(this.device, c.deviceKey, c, c.family === "potentiometer" ? TRACK_STARTS : ONE_START);
   }
 
-  private part(wanted: (o: Observation) => boolean, pins?: number): Part {
+  private part(wanted: (o: Observation) => boolean, before: Part | null | undefined, pins?: number): Part {
     const obs = this.observations.filter(wanted);
-    return { evidence: evidenceOf(obs, this.meter, pins), fits: fitsTo(nameOf(obs, pins, this.meterName)) };
+    if (before?.evidence.observations.length === obs.length) return before;
+    const name = `${nameOf(obs, pins, this.meterName)}${before ? `|${before.name}` : ""}`;
+    return { name, evidence: evidenceOf(obs, this.meter, pins), fits: fitsTo(name), before: before ?? null };
   }
 }
 
 /** The best fit from any of the starts, made once. */
-function fitOf({ evidence, fits }: Part, key: string, c: Candidate, starts: readonly Float64Array[]): Fit {
+function fitOf({ evidence, fits, before }: Part, key: string, c: Candidate, starts: readonly Float64Array[]): Fit {
   let fit = fits.get(key);
-  if (!fit) fits.set(key, fit = starts.map((start) => fitCandidate(c, evidence, start)).reduce((best, one) => (one.logEvidence > best.logEvidence ? one : best)));
+  if (fit) return fit;
+  const from = before ? [fitOf(before, key, c, starts).z] : starts;
+  fits.set(key, fit = from.map((start) => fitCandidate(c, evidence, start)).reduce((best, one) => (one.logEvidence > best.logEvidence ? one : best)));
   return fit;
 }
 
