@@ -2,6 +2,7 @@ import type { Assessment, CheckSpec } from "@/lib/diagnosis";
 import type { RunSetup } from "@/lib/checks/run";
 import { leadWords, stateWords } from "@/lib/checks/check-words";
 import { findingHeading, kindTitle, roleOf } from "@/lib/checks/finding-words";
+import { refusalOf } from "@/lib/checks/refusal";
 import { transition } from "@/lib/checks/run-transition";
 import type { MachineState } from "@/lib/diagnosis";
 import type { WiringFacts } from "./wiring-graph";
@@ -11,7 +12,8 @@ const DRAWN = 0.7;
 
 /** What the drawing shows: the machine as it is for this reading, and only beliefs that are likely. */
 export function wiringFacts(setup: RunSetup, spec: CheckSpec | null, known: MachineState, assessment: Assessment | null): WiringFacts {
-  const standing = assessment && assessment.state !== "invalid-input" ? assessment : null;
+  // Pins and findings are beliefs about the three kinds: of another device none is drawn.
+  const standing = assessment && assessment.state !== "invalid-input" && !refusalOf(assessment) ? assessment : null;
   const [kind, pins, fault] = [standing?.kinds[0], standing?.pins[0], standing?.faults[0]];
   const sure = pins && pins.p >= DRAWN ? pins : null;
   return {
