@@ -9,7 +9,7 @@ import { SLOW } from "../support/slow";
  * One slip of a person in a run of a bench case. Asked for: named in 90 % of runs, sure and wrong in 3 %. The limits below are
  * what the engine does today, not what is asked; tighten them as it improves. `npm run slips` runs all cases and lists failures.
  */
-const NAMED_AT_LEAST = 60, SURE_WRONG_AT_MOST = 6, FALSELY_AT_MOST = 5;
+const NAMED_AT_LEAST = 60, SURE_WRONG_AT_MOST = 6, WRONG_VERDICT_AT_MOST = 3, FALSELY_AT_MOST = 5;
 const EVERY = 12, SLIPS_A_CASE = 2;
 
 describe("one slip in a run", () => {
@@ -34,7 +34,11 @@ describe("one slip in a run", () => {
     expect(slipScore(runs).namedPercent).toBeGreaterThanOrEqual(NAMED_AT_LEAST);
   });
 
-  it(`leads to a sure and wrong verdict in ${SURE_WRONG_AT_MOST} % of runs or fewer`, () => {
+  it(`leads to a wrong verdict given out as sure in ${WRONG_VERDICT_AT_MOST} % of runs or fewer`, () => {
+    expect(slipScore(runs).wrongVerdictPercent).toBeLessThanOrEqual(WRONG_VERDICT_AT_MOST);
+  });
+
+  it(`leads to a sure and wrong belief, contradicted or not, in ${SURE_WRONG_AT_MOST} % of runs or fewer`, () => {
     expect(slipScore(runs).sureWrongPercent).toBeLessThanOrEqual(SURE_WRONG_AT_MOST);
   });
 

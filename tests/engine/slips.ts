@@ -20,6 +20,8 @@ export interface SlipRun {
   readonly otherNamed: boolean;
   /** Ends at 0.95 or more with a finding that is not the machine's: with the slip left standing to the end. */
   readonly sureWrong: boolean;
+  /** The same, and given out as a verdict: readings that contradict each other, or are above the limits, get none. */
+  readonly wrongVerdict: boolean;
   /** The same, where whatever was named is taken again at once. */
   readonly sureWrongHeeded: boolean;
   /** Ends with the machine's own finding first all the same. */
@@ -84,7 +86,7 @@ export function slipRun(c: BenchCase, clean: readonly Reading[], kind: SlipKind,
   const place = places[Math.floor(draw() * places.length)]!;
   const taken: Reading[] = [...clean.slice(0, place.step), [place.check, place.wrong]];
   const about = { id: c.id, kind, check: place.check, right: place.right, wrong: place.wrong, truth: text(c.truth.fault) };
-  if (assess(c.setup, taken).state === "invalid-input") return { ...about, refused: true, named: true, otherNamed: false, sureWrong: false, sureWrongHeeded: false, held: true, readings: taken.length, said: "refused" };
+  if (assess(c.setup, taken).state === "invalid-input") return { ...about, refused: true, named: true, otherNamed: false, sureWrong: false, wrongVerdict: false, sureWrongHeeded: false, held: true, readings: taken.length, said: "refused" };
   return { ...about, refused: false, ...outcome(c, taken, place.check, place.right) };
 }
 
@@ -96,5 +98,5 @@ function outcome(c: BenchCase, taken: readonly Reading[], check: string, right: 
   // Once named and taken again, the run goes on as if nothing had happened.
   const mended = at < 0 || !sureWrong ? null : run.readings.slice(0, taken.length + at).map(([k, v]): Reading => [k, k === check ? right : v]);
   const heeded = mended ? followCheck((readings) => standing(c.setup, readings), (k) => c.readings[k], mended).last : run.last;
-  return { named: at >= 0, otherNamed: at < 0 && names.some((list) => list.length > 0), sureWrong, sureWrongHeeded: wrong(heeded), held: sameFault(run.last.faults[0], c.truth.fault), readings: run.readings.length, said: `${text(run.last.faults[0])} ${run.last.faults[0]!.p.toFixed(3)} ${run.last.state}` };
+  return { named: at >= 0, otherNamed: at < 0 && names.some((list) => list.length > 0), sureWrong, wrongVerdict: sureWrong && run.last.state !== "contradictory" && run.last.overLimit === null, sureWrongHeeded: wrong(heeded), held: sameFault(run.last.faults[0], c.truth.fault), readings: run.readings.length, said: `${text(run.last.faults[0])} ${run.last.faults[0]!.p.toFixed(3)} ${run.last.state}` };
 }
