@@ -9,7 +9,7 @@ import { MUTATIONS, type Mutation } from "./mutations";
 
 const ROOT = fileURLToPath(new URL("../..", import.meta.url));
 /** Tests that take seconds, by what they look at; the bench, slips and calibration take minutes and need not see every mistake. */
-const CIRCUIT = ["tests/published-values/checks-against-spice", "tests/published-values/mated-against-spice", "tests/published-values/network-against-spice", "tests/engine/worked-cases", "tests/engine/parts"];
+const CIRCUIT = ["tests/published-values/checks-against-spice", "tests/published-values/wide-values-against-spice", "tests/published-values/mated-against-spice", "tests/published-values/network-against-spice", "tests/engine/worked-cases", "tests/engine/parts"];
 const JUDGEMENT = ["tests/published-values/bench-meter", "tests/engine/worked-cases", "tests/engine/contradictory", "tests/engine/bayes-by-hand", "tests/engine/oracle", "tests/engine/proposals", "tests/engine/parts"];
 const testsFor = (file: string) => (/\/(circuit|network)\//.test(file) ? CIRCUIT : JUDGEMENT);
 const SLOWEST_MS = 600_000;
