@@ -35,8 +35,8 @@ function standIns(setup: Setup, all: readonly Believed[], fault: Fault): readonl
   const alike = (c: Candidate) => c.hypothesis.kind === model.hypothesis.kind && `${c.pinOf}` === `${model.pinOf}`;
   const byEntry = setup.expect ? everyCandidateForEntry(setup.expect, setup.experience).filter(has).filter(alike) : [];
   if (byEntry.length > 0) return byEntry;
-  const any = everyCandidateForUnknown(setup.experience).filter(has), near = any.filter(alike);
-  return near.length > 0 ? near : any;
+  const having = everyCandidateForUnknown(setup.experience).filter(has), near = having.filter(alike);
+  return near.length > 0 ? near : having;
 }
 
 /** What the candidates of a finding expect of a check, given the other readings: in the builds which these make likely. */

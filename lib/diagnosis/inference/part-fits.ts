@@ -94,7 +94,7 @@ export class PartFits {
   fit(c: Candidate, least: number): Fit {
     const device = this.deviceFit(c), unpowered = this.harnessFits(c);
     if (this.separate) return together(device, ...unpowered);
-    const harness = this.live ? fitOf(this.harness, c.harnessKey, c, [startOf(...unpowered)]) : together(...unpowered);
+    const harness = this.live ? this.harnessFit(c) : together(...unpowered);
     if (!this.mated) return together(device, harness);
     if (c.logPrior + device.logEvidence + harness.logEvidence + this.matedPeak < least) return NO_FIT_AT_ALL;
     return this.joint(c, startOf(device, harness), least - c.logPrior);
@@ -108,6 +108,12 @@ export class PartFits {
       if (part) fits.push(fitOf(part, key, c, ONE_START));
     }
     return fits;
+  }
+
+  private harnessFit(c: Candidate): Fit {
+    // A fit with a reading left out starts from that to all of them, which has to be made from its own start: else what is kept would hang on who asked first.
+    if (this.whole) this.whole.fits.harnessFit(c);
+    return fitOf(this.harness, c.harnessKey, c, [startOf(...this.harnessFits(c))]);
   }
 
   private joint(c: Candidate, start: Float64Array, least: number): Fit {
